@@ -1,0 +1,79 @@
+import type { Ticks } from '../length/ticks';
+import type { Reason } from '../reasons';
+import type { ThingRef } from '../things';
+
+/** One course of the whole building; heights above the high point. */
+export interface Course {
+  /** 1 at the bottom, counted through all lifts. */
+  readonly number: number;
+  readonly lift: number;
+  /** Underside of its units. */
+  readonly bottom: Ticks;
+  /** Top of its units: the mark. */
+  readonly top: Ticks;
+  /** Bed joint under it (under the first course: the least bedding). */
+  readonly joint: Ticks;
+}
+
+/** Equal courses between two heights, one joint for the crew to remember. */
+export interface CourseInterval {
+  readonly lift: number;
+  readonly fromHeight: Ticks;
+  readonly toHeight: Ticks;
+  readonly count: number;
+  /** The joint exactly: `(toHeight − fromHeight − count × unit) / count`, in ticks, not rounded. */
+  readonly joint: number;
+  readonly firstCourse: number;
+  readonly lastCourse: number;
+}
+
+/** What became of one height that the courses had to meet. */
+export interface ControlResult {
+  readonly thing: ThingRef;
+  readonly kind: 'sill' | 'head' | 'bondBeam' | 'plate' | 'named';
+  readonly wanted: Ticks;
+  /** The course line nearest to it in this answer. */
+  readonly got: Ticks;
+  readonly miss: Ticks;
+  readonly course: number | null;
+  readonly hold: 'hard' | 'soft';
+  readonly met: boolean;
+  /** Nearest heights that courses can meet, when this one is missed. */
+  readonly below: Ticks | null;
+  readonly above: Ticks | null;
+}
+
+/** The masonry between two bond beams. */
+export interface Lift {
+  readonly number: number;
+  /** Height where it starts: 0 (the high point) or the top of the beam below. */
+  readonly base: Ticks;
+  /** Where it stops: the soffit of the beam above, or the plate. */
+  readonly top: Ticks;
+  /** The beam that closes it, where its soffit ended up. */
+  readonly beam: { readonly id: string; readonly soffit: Ticks; readonly top: Ticks } | null;
+  /** Most height allowed by the rule in force. */
+  readonly most: Ticks;
+  readonly firstCourse: number;
+  readonly lastCourse: number;
+}
+
+/** A whole answer: joints of each interval, misses, and what it costs. */
+export interface CoursingAnswer {
+  readonly intervals: readonly CourseInterval[];
+  readonly controls: readonly ControlResult[];
+  /** In strict order: hard heights missed; soft misses by weight; largest step from the nominal joint; unevenness. */
+  readonly cost: readonly [number, number, number, number];
+}
+
+export interface Coursing {
+  readonly unitHeight: Ticks;
+  readonly courses: readonly Course[];
+  readonly lifts: readonly Lift[];
+  readonly answer: CoursingAnswer;
+  /** The next best answers that really differ, best first. */
+  readonly others: readonly CoursingAnswer[];
+  /** Top of the masonry or of the last beam. */
+  readonly top: Ticks;
+  readonly reasons: readonly Reason[];
+}

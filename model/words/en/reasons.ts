@@ -1,0 +1,1 @@
+export const reasons = {} as const;

@@ -1,0 +1,1 @@
+export const revisions = {} as const;

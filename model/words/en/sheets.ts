@@ -1,0 +1,1 @@
+export const sheets = {} as const;

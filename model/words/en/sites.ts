@@ -1,0 +1,1 @@
+export const sites = {} as const;
