@@ -1,3 +1,4 @@
+const http = require('node:http');
 const path = require('node:path');
 const { getDefaultConfig } = require('expo/metro-config');
 const { FileStore } = require('metro-cache');
@@ -15,6 +16,21 @@ config.resolver.resolveRequest = (context, moduleName, platform) => {
   }
   return context.resolveRequest(context, moduleName, platform);
 };
+
+// In development the API answers at the page's own origin.
+const apiPort = process.env.API_PORT;
+if (apiPort) {
+  config.server.enhanceMiddleware = (metro) => (request, response, next) => {
+    if (!request.url?.startsWith('/api/')) return metro(request, response, next);
+    const { method, headers, url } = request;
+    const onward = http.request({ host: '127.0.0.1', port: Number(apiPort), method, headers, path: url }, (answer) => {
+      response.writeHead(answer.statusCode ?? 502, answer.headers);
+      answer.pipe(response);
+    });
+    onward.once('error', () => response.writeHead(502).end());
+    request.pipe(onward);
+  };
+}
 
 // Only what the client uses is watched.
 config.resolver.blockList = [/[\\/]\.state[\\/].*/, /[\\/]dist[\\/].*/];
