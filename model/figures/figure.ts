@@ -1,4 +1,5 @@
 /** A figure is plain data in model coordinates (ticks), shown on screen as SVG and on paper as vector PDF. */
+import type { Units } from '../drawing/schema';
 import type { PlanPoint } from '../geometry/point';
 import type { Ticks } from '../length/ticks';
 import type { ThingRef } from '../things';
@@ -82,7 +83,20 @@ export type Shape =
       readonly from: PlanPoint;
       readonly to: PlanPoint;
       readonly length: Ticks;
+      /** Middle of its text on the line. */
+      readonly textAt: PlanPoint;
+      /** Turn of its text, in degrees counter-clockwise: along the line, read from below or from the right. */
+      readonly turn: number;
     });
+
+export type TextShape = Extract<Shape, { kind: 'text' }>;
+export type DimensionShape = Extract<Shape, { kind: 'dimension' }>;
+
+/** How measurements in a figure are written: the drawing's units and tape step. */
+export interface Tape {
+  readonly units: Units;
+  readonly step: Ticks;
+}
 
 export interface Box {
   readonly left: Ticks;
@@ -95,6 +109,7 @@ export interface Figure {
   readonly name: 'plan' | 'elevation' | 'pole' | 'profile' | 'course';
   /** All that must be seen: the building with its poles and braces, labels and dimensions. */
   readonly bounds: Box;
+  readonly tape: Tape;
   /** Painted in order. */
   readonly shapes: readonly Shape[];
 }

@@ -1,0 +1,88 @@
+/** How much room a text takes at a scale: the placing of labels and both printers go by the same boxes. */
+import type { Vec } from '../geometry/point';
+import { TICKS_PER_FOOT, TICKS_PER_INCH, TICKS_PER_MM, roundTicks } from '../length/ticks';
+import type { DimensionShape, FigureText, LabelScale, Tape, TextShape, TextSize } from './figure';
+
+/** A frame stands this far off its letter, as a part of the text's height. */
+export const FRAME_PAD = 0.36;
+/** A framed letter is at least as wide as this part of its text's height. */
+const FRAME_LEAST = 1.5;
+
+export interface TextBox {
+  readonly width: number;
+  readonly height: number;
+}
+
+/** Characters of a measurement as it is written: a fraction's figures count three fifths each. */
+function measureLetters(length: number, tape: Tape): number {
+  const rounded = roundTicks(length / tape.step) * tape.step;
+  const size = Math.abs(rounded);
+  if (tape.units === 'metric') return String(Math.round(size / TICKS_PER_MM)).length + 3;
+  const feet = Math.floor(size / TICKS_PER_FOOT);
+  const rest = size - feet * TICKS_PER_FOOT;
+  const whole = Math.floor(rest / TICKS_PER_INCH);
+  const fraction = rest - whole * TICKS_PER_INCH === 0 ? 0 : 3;
+  return (feet > 0 ? String(feet).length + 1.5 : 0) + String(whole).length + fraction + 1 + (rounded < 0 ? 1 : 0);
+}
+
+/** Characters to allow for a text; words are measured once worded, so a printer may give their length. */
+export function lettersOf(text: FigureText, tape: Tape): number {
+  switch (text.kind) {
+    case 'literal':
+      return text.text.length;
+    case 'measure':
+      return measureLetters(text.length, tape);
+    case 'word':
+      return 12;
+  }
+}
+
+/** Width and height of a text at a scale, its frame included, in ticks. */
+export function textBox(text: FigureText, size: TextSize, framed: boolean, scale: LabelScale, tape: Tape): TextBox {
+  const height = scale.textHeight[size];
+  const width = lettersOf(text, tape) * scale.advance * height;
+  if (!framed) return { width, height };
+  return {
+    width: Math.max(width + 2 * FRAME_PAD * height, FRAME_LEAST * height),
+    height: height * (1 + 1.4 * FRAME_PAD),
+  };
+}
+
+/** The corners of a box of that size around `middle`, turned counter-clockwise by `turn` degrees. */
+export function turnedQuad(middle: Vec, box: TextBox, turn: number): Vec[] {
+  const angle = (turn * Math.PI) / 180;
+  const cos = Math.cos(angle);
+  const sin = Math.sin(angle);
+  const [w, h] = [box.width / 2, box.height / 2];
+  return (
+    [
+      [-w, -h],
+      [w, -h],
+      [w, h],
+      [-w, h],
+    ] as const
+  ).map(([x, y]) => ({ x: middle.x + x * cos - y * sin, y: middle.y + x * sin + y * cos }));
+}
+
+/** The box that a text covers, as a polygon. Texts stand with their middle height on `at`. */
+export function textQuad(shape: TextShape, scale: LabelScale, tape: Tape): Vec[] {
+  const box = textBox(shape.text, shape.size, shape.framed === true, scale, tape);
+  const shift = shape.anchor === 'middle' ? 0 : shape.anchor === 'start' ? box.width / 2 : -box.width / 2;
+  const angle = (shape.turn * Math.PI) / 180;
+  const middle = { x: shape.at.x + shift * Math.cos(angle), y: shape.at.y + shift * Math.sin(angle) };
+  return turnedQuad(middle, box, shape.turn);
+}
+
+/** The box that a dimension's text covers, as a polygon. */
+export function dimensionQuad(shape: DimensionShape, scale: LabelScale, tape: Tape): Vec[] {
+  const box = textBox({ kind: 'measure', length: shape.length }, 'dimension', false, scale, tape);
+  return turnedQuad(shape.textAt, box, shape.turn);
+}
+
+/** The turn of a text along a direction so that it reads from below or from the right: above −90° and up to 90°. */
+export function readableTurn(direction: Vec): number {
+  const turn = (Math.atan2(direction.y, direction.x) * 180) / Math.PI;
+  if (turn > 90 + 1e-6) return turn - 180;
+  if (turn <= -90 + 1e-6) return turn + 180;
+  return turn;
+}
