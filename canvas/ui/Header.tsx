@@ -1,0 +1,53 @@
+import type { ReactNode } from 'react';
+import { View } from 'react-native';
+import { IconButton } from './IconButton';
+import { space } from './tokens';
+import { Txt } from './Txt';
+import { useTheme } from './theme';
+import { useWords } from './words';
+
+export interface HeaderProps {
+  readonly title: string;
+  readonly subtitle?: string;
+  /** Buttons at the right; one filled at most. */
+  readonly actions?: ReactNode;
+  readonly onBack?: () => void;
+  /** Read aloud for the back arrow: where it leads. */
+  readonly backLabel?: string;
+}
+
+/** The top of every screen: what it is, a quiet second line, and its actions. */
+export function Header({ title, subtitle, actions, onBack, backLabel }: HeaderProps) {
+  const { colours, strokes } = useTheme();
+  const t = useWords();
+  return (
+    <View
+      role="banner"
+      style={{
+        flexDirection: 'row',
+        alignItems: 'center',
+        gap: space.m,
+        minHeight: 68,
+        paddingLeft: onBack ? space.xs : space.l,
+        paddingRight: space.l,
+        paddingVertical: space.s,
+        backgroundColor: colours.surface,
+        borderBottomWidth: strokes.hair,
+        borderColor: colours.rule,
+      }}
+    >
+      {onBack ? <IconButton icon="back" label={backLabel ?? t('common.back')} onPress={onBack} /> : null}
+      <View style={{ flex: 1, minWidth: 0 }}>
+        <Txt size="large" weight="semibold" role="heading" level={1} numberOfLines={1}>
+          {title}
+        </Txt>
+        {subtitle ? (
+          <Txt size="small" tone="soft" numberOfLines={1}>
+            {subtitle}
+          </Txt>
+        ) : null}
+      </View>
+      {actions ? <View style={{ flexDirection: 'row', alignItems: 'center', gap: space.s }}>{actions}</View> : null}
+    </View>
+  );
+}

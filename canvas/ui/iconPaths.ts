@@ -1,0 +1,62 @@
+/** Our icons as stroked paths on a 24 px grid. */
+export const iconPaths = {
+  // The drawing's parts
+  plan: 'M4 4h9v6h7v10H4z M7.5 7.5h2v6h7v3h-9z',
+  walls: 'M3 7h18v3H3z M5 10v8 M19 10v8 M10 10v8h4v-8',
+  poles: 'M7 3v18 M7 6h4 M7 10h3 M7 14h4 M7 18h3 M20 10l-7 11',
+  levels: 'M3 8h18 M6 8v9 M12 8v4 M18 8v7',
+  takeoff: 'M4 5h7v4H4z M13 5h7v4h-7z M4 15h7v4H4z M13 15h7v4h-7z M8.5 9v6 M15.5 9v6 M8.5 12h7',
+  sheets: 'M6 3h8l4 4v14H6z M14 3v4h4 M9 12h6 M9 16h6',
+  revisions: 'M8 3h8l4 4v10H8z M4 8v13h11',
+  crew: 'M9 10.5a3 3 0 1 0 0-6a3 3 0 0 0 0 6z M3.5 20v-2a5.5 5.5 0 0 1 11 0v2 M15.5 10.2a2.8 2.8 0 0 0 0-5.4 M17.5 13.6a5.2 5.2 0 0 1 3 4.6V20',
+  more: 'M4 6h16 M4 12h16 M4 18h9',
+  // Tools
+  wallRun: 'M4 20V12l7-7h9 M2 20h4 M20 3v4',
+  door: 'M5 21V4 M5 21h3 M19 21V4 M19 21h-3 M8 5a13 13 0 0 0 8 14V5',
+  window: 'M4 6v12 M20 6v12 M4 10h16 M4 14h16',
+  passage: 'M5 4v16 M19 4v16 M8.5 12h7 M12.5 9l3 3l-3 3',
+  keepClear: 'M4 6l9-3l7 6l-3 11l-10 1z M6 10l10 8 M11 5.5l8 7',
+  select: 'M6 3l13 9l-6 1.5L10.5 20z',
+  snap: 'M5 4v8a7 7 0 0 0 14 0V4 M5 4h4v8a3 3 0 0 0 6 0V4h4 M5 8h4 M15 8h4',
+  rightAngle: 'M5 4v15h15 M5 13h6v6',
+  pen: 'M5 19l1-5L16 4l4 4L10 18z M14 6l4 4',
+  finger:
+    'M9 13V5.5a1.5 1.5 0 0 1 3 0V12 M12 12v-1.5a1.5 1.5 0 0 1 3 0V13 M15 12.5a1.5 1.5 0 0 1 3 0V15a6 6 0 0 1-6 6c-3 0-4-1.5-5.5-4L5 14.5c-.8-1.4.9-2.7 2-1.6l2 2',
+  ruler: 'M3 16L16 3l5 5L8 21z M7 12l2 2 M10 9l2.5 2.5 M13 6l2 2',
+  // Commands
+  undo: 'M8 5L4 9l4 4 M4 9h10a6 6 0 0 1 0 12h-4',
+  redo: 'M16 5l4 4l-4 4 M20 9H10a6 6 0 0 0 0 12h4',
+  fit: 'M4 9V4h5 M15 4h5v5 M20 15v5h-5 M9 20H4v-5 M9 9h6v6H9z',
+  zoomIn: 'M11 17.5a6.5 6.5 0 1 0 0-13a6.5 6.5 0 0 0 0 13z M16 16l5 5 M11 8v6 M8 11h6',
+  zoomOut: 'M11 17.5a6.5 6.5 0 1 0 0-13a6.5 6.5 0 0 0 0 13z M16 16l5 5 M8 11h6',
+  delete: 'M4 6h16 M9 6V3h6v3 M6 6l1 15h10l1-15 M10 10v7 M14 10v7',
+  back: 'M15 4l-8 8l8 8',
+  forward: 'M9 4l8 8l-8 8',
+  up: 'M4 15l8-8l8 8',
+  down: 'M4 9l8 8l8-8',
+  close: 'M5 5l14 14 M19 5L5 19',
+  add: 'M12 4v16 M4 12h16',
+  menu: 'M4 7h16 M4 12h16 M4 17h16',
+  print: 'M7 8V3h10v5 M4 8h16v9h-3 M7 17H4V8 M7 14h10v7H7z',
+  download: 'M12 3v12 M7 10l5 5l5-5 M4 20h16',
+  link: 'M10 14l4-4 M9 10l-3 3a4 4 0 0 0 5.5 5.5L14 16 M15 14l3-3A4 4 0 0 0 12.5 5.5L10 8',
+  copy: 'M8 8h12v12H8z M16 8V4H4v12h4',
+  swap: 'M4 8h15 M15 4l4 4l-4 4 M20 16H5 M9 12l-4 4l4 4',
+  edit: 'M5 19l1-5L16 4l4 4L10 18z',
+  lock: 'M6 11h12v9H6z M9 11V8a3 3 0 0 1 6 0v3',
+  eraseLast: 'M9 5h12v14H9l-7-7z M12 9l6 6 M18 9l-6 6',
+  // States
+  check: 'M4 13l5 5L20 6',
+  warning: 'M12 4l9.5 16h-19z M12 10v5 M12 17.4v.2',
+  blocked: 'M12 21a9 9 0 1 0 0-18a9 9 0 0 0 0 18z M6 6l12 12',
+  info: 'M12 21a9 9 0 1 0 0-18a9 9 0 0 0 0 18z M12 11v6 M12 7.5v.2',
+  offline: 'M4 4l16 16 M7 18h9.5 M7 18a4.5 4.5 0 0 1-.6-9 M10 6.3A6 6 0 0 1 17.7 11a3.6 3.6 0 0 1 2.3 5.2',
+  saved: 'M7 18h9.8a3.6 3.6 0 0 0 .9-7.1A6 6 0 0 0 6.4 9A4.5 4.5 0 0 0 7 18z M9.5 13l2 2l3.5-4',
+  sun: 'M12 16a4 4 0 1 0 0-8a4 4 0 0 0 0 8z M12 2v3 M12 19v3 M2 12h3 M19 12h3 M5 5l2 2 M17 17l2 2 M19 5l-2 2 M7 17l-2 2',
+  // People
+  person: 'M12 11a4 4 0 1 0 0-8a4 4 0 0 0 0 8z M4 21v-1a8 8 0 0 1 16 0v1',
+  signOut: 'M10 4H4v16h6 M9 12h11 M16 8l4 4l-4 4',
+  mail: 'M3 6h18v13H3z M3 7l9 7l9-7',
+} as const;
+
+export type IconName = keyof typeof iconPaths;
