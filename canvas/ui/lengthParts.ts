@@ -39,7 +39,7 @@ export function lengthParts(length: Ticks, units: Units, step: Ticks, form: 'inc
     sign,
     feet: showFeet ? String(feet) : null,
     whole: whole > 0 || over === 0 || showFeet ? String(whole) : null,
-    fraction: over === 0 ? null : reduce((over / TICKS_PER_INCH) * 128, 128),
+    fraction: over === 0 ? null : reduce(Math.round((over / TICKS_PER_INCH) * 128), 128),
     unit: '″',
   };
 }
