@@ -1,6 +1,6 @@
 import { Text as SvgText, TSpan } from 'react-native-svg';
 import type { FigureText as Words, Tape } from '../../model/figures/figure';
-import { measureParts } from '../../model/figures/measureParts';
+import { measureParts, type MeasurePart } from '../../model/figures/measureParts';
 import { fonts, fontWeights } from '../ui/tokens';
 import { say } from '../ui/words';
 
@@ -23,12 +23,22 @@ interface Props {
   readonly colour: string;
 }
 
+function partsOf(words: Words, tape: Tape): readonly MeasurePart[] {
+  switch (words.kind) {
+    case 'literal':
+      return [{ text: words.text, fraction: false }];
+    case 'word':
+      return [{ text: say(words.key, words.params), fraction: false }];
+    case 'measure':
+      return measureParts(words.length, tape);
+    case 'labelled':
+      return [{ text: `${say(words.key)} `, fraction: false }, ...measureParts(words.length, tape)];
+  }
+}
+
 /** A text of a figure: a literal, a word, or a measurement whose fraction alone is set as one. */
 export function FigureText({ words, tape, x, y, size, turn, anchor, colour }: Props) {
-  const parts =
-    words.kind === 'measure'
-      ? measureParts(words.length, tape)
-      : [{ text: words.kind === 'literal' ? words.text : say(words.key, words.params), fraction: false }];
+  const parts = partsOf(words, tape);
   return (
     <SvgText
       x={x}

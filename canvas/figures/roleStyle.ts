@@ -36,10 +36,11 @@ function plainStyle(role: Role, { colours, strokes }: FigureTheme): RoleStyle {
         width: strokes.hair * 0.5,
         text,
       };
+    case 'return':
     case 'closer':
-      return { fill: colours.earthDeep, stroke: colours.earthDeep, width: strokes.hair * 0.5, text };
+      return { fill: colours.selected, stroke: colours.earthDeep, width: strokes.hair * 0.5, text };
     case 'joint':
-      return { fill: NONE, stroke: colours.earthDeep, width: strokes.hair * 0.7, text };
+      return { fill: colours.rule, stroke: colours.earthDeep, width: strokes.hair * 0.7, text };
     case 'frame':
       return { fill: colours.frame, stroke: colours.frame, width: strokes.thin, text: colours.frame };
     case 'opening':

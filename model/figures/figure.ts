@@ -10,6 +10,7 @@ export type Role =
   | 'body'
   | 'unit'
   | 'closer'
+  | 'return'
   | 'joint'
   | 'frame'
   | 'opening'
@@ -39,6 +40,8 @@ export type TextSize = 'small' | 'label' | 'dimension' | 'letter';
 export type FigureText =
   | { readonly kind: 'literal'; readonly text: string }
   | { readonly kind: 'measure'; readonly length: Ticks }
+  /** A word and its measurement: "sill 2′ 4″". */
+  | { readonly kind: 'labelled'; readonly key: string; readonly length: Ticks }
   | { readonly kind: 'word'; readonly key: string; readonly params?: Readonly<Record<string, string | number>> };
 
 /** Selected things are drawn solid and heavy; differing ones by line style and label. */

@@ -5,8 +5,10 @@
  * The same input gives the same places. The work grows with the number of labels, by an index of cells.
  */
 import type { Vec } from '../geometry/point';
+import { overlapDepth } from '../geometry/polygon';
+import { between } from '../geometry/vec';
 import type { Box, Shape } from './figure';
-import { CellIndex, overlapDepth } from './overlap';
+import { CellIndex } from './cells';
 
 /** Something drawn that a label should not cover; convex. */
 export interface Obstacle {
@@ -64,10 +66,6 @@ function piecesOf(obstacle: Obstacle, most: number): Obstacle[] {
   const length = Math.hypot(b.x - a.x, b.y - a.y);
   const count = Math.ceil(length / most);
   if (!(count > 1) || (obstacle.points.length !== 2 && obstacle.points.length !== 4)) return [obstacle];
-  const between = (from: Vec, to: Vec, part: number) => ({
-    x: from.x + (to.x - from.x) * part,
-    y: from.y + (to.y - from.y) * part,
-  });
   return Array.from({ length: count }, (_, i) => {
     const [from, to] = [i / count, (i + 1) / count];
     const points =

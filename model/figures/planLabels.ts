@@ -1,6 +1,6 @@
 /** The labels of the plan and every place where each could stand: corner letters, cautions, notes, dimensions. */
 import type { PlanPoint, Vec } from '../geometry/point';
-import { roundTicks } from '../length/ticks';
+import { toPoint } from '../geometry/vec';
 import type { ThingRef } from '../things';
 import type { RunGeometry } from '../walls/types';
 import type { DimensionShape, FigureText, Role, Shape, TextSize } from './figure';
@@ -13,7 +13,6 @@ import { readableTurn, textBox, turnedQuad, type TextBox } from './text';
 const DIRECTIONS = 16;
 const DISTANCES = [0.35, 0.8, 1.5, 2.4, 3.6];
 
-const round = (point: Vec): PlanPoint => ({ x: roundTicks(point.x), y: roundTicks(point.y) });
 const grown = (box: TextBox, by: number): TextBox => ({ width: box.width + 2 * by, height: box.height + 2 * by });
 
 /** Places all round an anchor, nearer first; `liked` is a direction it would rather stand in. */
@@ -35,7 +34,7 @@ function placesAround(
       // The box's own half size in this direction, so that every place on a ring is equally clear of the anchor.
       const half = Math.min(box.width / 2 / Math.max(Math.abs(x), 1e-9), box.height / 2 / Math.max(Math.abs(y), 1e-9));
       const far = half + distance * unit;
-      const at = round({ x: anchor.x + x * far, y: anchor.y + y * far });
+      const at = toPoint({ x: anchor.x + x * far, y: anchor.y + y * far });
       const away = liked ? 1 - (x * liked.x + y * liked.y) : 0;
       return { quad: turnedQuad(at, covered, 0), lines: [], cost: ring * 1.1 + away * 0.6, shapes: shapesAt(at) };
     }),
@@ -127,9 +126,9 @@ function cautionShapes(at: PlanPoint, box: TextBox, thing: ThingRef): Shape[] {
     { x: at.x - w, y: at.y - h },
     { x: at.x + w, y: at.y - h },
     { x: at.x, y: at.y + h },
-  ].map(round);
+  ].map(toPoint);
   const text: FigureText = { kind: 'literal', text: '!' };
-  const middle = round({ x: at.x, y: at.y - h * 0.25 });
+  const middle = toPoint({ x: at.x, y: at.y - h * 0.25 });
   return [
     { kind: 'polygon', role: 'caution', thing, points },
     { kind: 'text', role: 'caution', thing, at: middle, text, size: 'small', turn: 0, anchor: 'middle' },

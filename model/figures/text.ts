@@ -32,6 +32,8 @@ export function lettersOf(text: FigureText, tape: Tape): number {
       return text.text.length;
     case 'measure':
       return measureLetters(text.length, tape);
+    case 'labelled':
+      return measureLetters(text.length, tape) + 7;
     case 'word':
       return 12;
   }
