@@ -1,0 +1,81 @@
+/** What each end of a run offers to its courses: where they start, with or without a head joint, and the return seen there. */
+import type { EndKind, RunGeometry, Walls } from '../walls/types';
+
+/** Odd courses (the first, third …) are parity 0, even ones parity 1. */
+export type Parity = 0 | 1;
+
+export interface CourseEnd {
+  /** Along the face: the solid against which the course starts or stops. */
+  readonly at: number;
+  /** A head joint stands between that solid and the first piece. */
+  readonly joint: boolean;
+  /** Whether that joint has to be lapped by the next course; false where it stands in every course. */
+  readonly lapped: boolean;
+  /** Width of the other run's end seen on this face beyond `at`; 0 where none is. */
+  readonly returnWidth: number;
+}
+
+/** An end in odd and in even courses. */
+export type EndPair = readonly [CourseEnd, CourseEnd];
+
+/** At very blunt corners the end of the crossing run is cut on the skew, and shows no wider than this times its thickness. */
+const MOST_SKEW = 2;
+
+function plainEnd(at: number): CourseEnd {
+  return { at, joint: false, lapped: false, returnWidth: 0 };
+}
+
+/** How wide a wall of `thickness` shows where it is cut by another face at `angle` degrees. */
+export function skewWidth(thickness: number, angle: number | null): number {
+  const sine = Math.abs(Math.sin(((angle ?? 90) * Math.PI) / 180));
+  return Math.round(thickness * Math.min(MOST_SKEW, sine > 0 ? 1 / sine : MOST_SKEW));
+}
+
+/**
+ * An end by its kind, measured from the corner into the run: the units lap in alternation at a corner of two runs, so
+ * `goesThrough` says in which parity this run's courses reach past the other's.
+ * At an outside corner the through course stops at the corner and the other shows the return. At a reentrant corner the
+ * outside faces meet in the hollow, so the through course passes the corner by the other wall's thickness, unseen from outside.
+ */
+export function endByKind(kind: EndKind, width: number, goesThrough: Parity, stemAt: number): EndPair {
+  const pair = (through: CourseEnd, butt: CourseEnd): EndPair =>
+    goesThrough === 0 ? [through, butt] : [butt, through];
+  switch (kind) {
+    case 'outside':
+      return pair(plainEnd(0), { at: width, joint: true, lapped: true, returnWidth: width });
+    case 'reentrant':
+      return pair(plainEnd(-width), { at: 0, joint: true, lapped: true, returnWidth: 0 });
+    case 'teeStem':
+    case 'cross': {
+      const butt = { at: stemAt, joint: true, lapped: false, returnWidth: 0 };
+      return [butt, butt];
+    }
+    case 'straight':
+    case 'teeBar':
+    case 'free':
+      return [plainEnd(0), plainEnd(0)];
+  }
+}
+
+/** An end of a real run, measured from that corner into the run; the arriving run goes through in odd courses. */
+export function endOfRun(walls: Walls, run: RunGeometry, which: 0 | 1): EndPair {
+  const end = run.ends[which];
+  const other = end.others.length > 0 ? walls.runById.get(end.others[0]!) : undefined;
+  const corner = walls.cornerById.get(end.cornerId);
+  const width = other ? skewWidth(other.thickness, corner?.angle ?? null) : 0;
+  const otherArrives = other ? other.ends[1].cornerId === end.cornerId : false;
+  const arrives = which === 1 && !(otherArrives && other!.runId < run.runId);
+  const leavesFirst = which === 0 && !otherArrives && other !== undefined && run.runId < other.runId;
+  const corners = end.others.length === 1 ? end.kind : end.kind === 'free' ? 'free' : 'teeStem';
+  const kind = end.kind === 'outside' || end.kind === 'reentrant' ? corners : end.kind;
+  return endByKind(kind, width, arrives || leavesFirst ? 0 : 1, stemDistance(run, which));
+}
+
+/** From the corner along the run to where its outside face starts: the near face of the bar that a stem butts into. */
+function stemDistance(run: RunGeometry, which: 0 | 1): number {
+  const face = run.outside[which];
+  const corner = which === 0 ? run.start : run.end;
+  const along = (face.x - corner.x) * run.direction.x + (face.y - corner.y) * run.direction.y;
+  const distance = which === 0 ? along : -along;
+  return Number.isFinite(distance) ? Math.round(distance) : 0;
+}
