@@ -2,7 +2,7 @@ import { Text, type StyleProp, type TextStyle } from 'react-native';
 import type { Units } from '../../model/drawing/schema';
 import { sayLength } from '../../model/length/say';
 import type { Ticks } from '../../model/length/ticks';
-import { lengthParts } from './lengthParts';
+import { measureParts, type LengthStyle } from '../../model/length/write';
 import { lineHeightOf } from './Txt';
 import { fonts, fontWeights, numberSize, toneColour } from './tokens';
 import type { NumberSizeName, Tone, Weight } from './tokens';
@@ -26,7 +26,10 @@ export interface MeasurementProps {
 export function Measurement(props: MeasurementProps) {
   const { length, units, step, size = 'table', tone = 'ink', weight = 'semibold', form = 'inches', style } = props;
   const { colours } = useTheme();
-  const parts = lengthParts(length, units, step, form);
+  const written: LengthStyle = units === 'metric' ? 'mm' : form === 'feet' ? 'feetInches' : 'inches';
+  const parts = measureParts(length, { units, step, style: written });
+  const hasFraction = parts.numerator > 0;
+  const showWhole = parts.whole > 0 || parts.feet !== undefined || !hasFraction;
   const pixels = numberSize[size];
   const unit: TextStyle = tone === 'ink' ? { color: colours.inkSoft } : {};
   const gap = Math.max(2, Math.round(pixels * 0.14));
@@ -46,24 +49,27 @@ export function Measurement(props: MeasurementProps) {
         style,
       ]}
     >
-      <Text style={readOnly}>{sayLength(length, units, step)}</Text>
+      <Text style={readOnly}>{sayLength(length, units, step, written)}</Text>
       <Text aria-hidden>
-        {parts.sign}
-        {parts.feet === null ? null : (
+        {parts.sign === '-' ? '−' : ''}
+        {parts.feet === undefined ? null : (
           <Text>
             {parts.feet}
             <Text style={unit}>′</Text>
           </Text>
         )}
-        {parts.whole === null ? null : (
-          <Text style={{ marginLeft: parts.feet === null ? 0 : gap * 2 }}>{parts.whole}</Text>
-        )}
-        {parts.fraction === null ? null : (
-          <Text style={[{ marginLeft: parts.whole === null && parts.feet === null ? 0 : gap }, fraction]}>
-            {parts.fraction}
+        {showWhole ? (
+          <Text style={{ marginLeft: parts.feet === undefined ? 0 : gap * 2 }}>
+            {parts.whole}
+            {parts.decimals === '' ? '' : `.${parts.decimals}`}
           </Text>
-        )}
-        <Text style={unit}>{parts.unit}</Text>
+        ) : null}
+        {hasFraction ? (
+          <Text style={[{ marginLeft: showWhole ? gap : 0 }, fraction]}>
+            {`${parts.numerator}/${parts.denominator}`}
+          </Text>
+        ) : null}
+        <Text style={unit}>{parts.unit === 'in' ? '″' : ` ${parts.unit}`}</Text>
       </Text>
     </Text>
   );

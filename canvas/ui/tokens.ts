@@ -136,7 +136,11 @@ export const radius = 4;
 /** Least size of anything to touch on a field screen, px. */
 export const touch = 48;
 
-export const fonts = { text: 'Barlow', numbers: 'Barlow Condensed' } as const;
+/** Each with a stand-in of about its width, for the moment before it arrives. */
+export const fonts = {
+  text: 'Barlow, "Barlow stand-in", sans-serif',
+  numbers: '"Barlow Condensed", "Barlow Condensed stand-in", sans-serif',
+} as const;
 
 export type TextSizeName = keyof typeof textSize;
 export type NumberSizeName = keyof typeof numberSize;
