@@ -1,6 +1,6 @@
 import { Text as SvgText, TSpan } from 'react-native-svg';
 import type { FigureText as Words, Tape } from '../../model/figures/figure';
-import { measureParts, type MeasurePart } from '../../model/figures/measureParts';
+import { typesetMeasure, type TypePart } from '../../model/figures/typeset';
 import { fonts, fontWeights } from '../ui/tokens';
 import { say } from '../ui/words';
 
@@ -8,7 +8,7 @@ import { say } from '../ui/words';
 const HALF_CAPITAL = 0.35;
 /** The browser takes CSS through `style`, which the library's types leave out. */
 const tabular = { style: { fontVariantNumeric: 'tabular-nums' } } as object;
-const asFraction = { style: { fontFeatureSettings: "'frac'" } } as object;
+const asFraction = { style: { fontFeatureSettings: "'frac'", fontVariantNumeric: 'normal' } } as object;
 
 interface Props {
   readonly words: Words;
@@ -23,16 +23,16 @@ interface Props {
   readonly colour: string;
 }
 
-function partsOf(words: Words, tape: Tape): readonly MeasurePart[] {
+function partsOf(words: Words, tape: Tape): readonly TypePart[] {
   switch (words.kind) {
     case 'literal':
       return [{ text: words.text, fraction: false }];
     case 'word':
       return [{ text: say(words.key, words.params), fraction: false }];
     case 'measure':
-      return measureParts(words.length, tape);
+      return typesetMeasure(words.length, tape);
     case 'labelled':
-      return [{ text: `${say(words.key)} `, fraction: false }, ...measureParts(words.length, tape)];
+      return [{ text: `${say(words.key)} `, fraction: false }, ...typesetMeasure(words.length, tape)];
   }
 }
 

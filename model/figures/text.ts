@@ -1,7 +1,8 @@
 /** How much room a text takes at a scale: the placing of labels and both printers go by the same boxes. */
 import type { Vec } from '../geometry/point';
-import { TICKS_PER_FOOT, TICKS_PER_INCH, TICKS_PER_MM, roundTicks } from '../length/ticks';
+import type { Ticks } from '../length/ticks';
 import type { DimensionShape, FigureText, LabelScale, Tape, TextShape, TextSize } from './figure';
+import { typesetMeasure } from './typeset';
 
 /** A frame stands this far off its letter, as a part of the text's height. */
 export const FRAME_PAD = 0.36;
@@ -13,16 +14,9 @@ export interface TextBox {
   readonly height: number;
 }
 
-/** Characters of a measurement as it is written: a fraction's figures count three fifths each. */
-function measureLetters(length: number, tape: Tape): number {
-  const rounded = roundTicks(length / tape.step) * tape.step;
-  const size = Math.abs(rounded);
-  if (tape.units === 'metric') return String(Math.round(size / TICKS_PER_MM)).length + 3;
-  const feet = Math.floor(size / TICKS_PER_FOOT);
-  const rest = size - feet * TICKS_PER_FOOT;
-  const whole = Math.floor(rest / TICKS_PER_INCH);
-  const fraction = rest - whole * TICKS_PER_INCH === 0 ? 0 : 3;
-  return (feet > 0 ? String(feet).length + 1.5 : 0) + String(whole).length + fraction + 1 + (rounded < 0 ? 1 : 0);
+/** Characters of a measurement as it is set: a fraction's figures take three fifths of their width. */
+function measureLetters(length: Ticks, tape: Tape): number {
+  return typesetMeasure(length, tape).reduce((sum, part) => sum + part.text.length * (part.fraction ? 0.62 : 1), 0);
 }
 
 /** Characters to allow for a text; words are measured once worded, so a printer may give their length. */
