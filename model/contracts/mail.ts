@@ -16,3 +16,6 @@ export type LocalMessage = z.infer<typeof localMessageSchema>;
 
 /** What the client must know of the server it talks to. */
 export const settingsSchema = z.strictObject({ localMail: z.boolean(), demo: z.boolean() });
+
+/** The server and its database answer. */
+export const healthSchema = z.strictObject({ ok: z.literal(true) });

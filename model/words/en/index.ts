@@ -2,6 +2,7 @@
 import { auth } from './auth';
 import { common } from './common';
 import { crew } from './crew';
+import { lengths } from './lengths';
 import { levels } from './levels';
 import { mail } from './mail';
 import { plan } from './plan';
@@ -9,6 +10,7 @@ import { poles } from './poles';
 import { reasons } from './reasons';
 import { revisions } from './revisions';
 import { rules } from './rules';
+import { server } from './server';
 import { sheets } from './sheets';
 import { sites } from './sites';
 import { takeoff } from './takeoff';
@@ -21,6 +23,7 @@ export const en = {
   plan,
   walls,
   poles,
+  lengths,
   levels,
   revisions,
   takeoff,
@@ -29,4 +32,5 @@ export const en = {
   rules,
   sheets,
   mail,
+  server,
 } as const;
