@@ -34,6 +34,7 @@ export interface ControlResult {
   readonly wanted: Ticks;
   /** The course line nearest to it in this answer. */
   readonly got: Ticks;
+  /** Got less wanted: positive where the line lies above. */
   readonly miss: Ticks;
   readonly course: number | null;
   readonly hold: 'hard' | 'soft';
@@ -62,7 +63,10 @@ export interface Lift {
 export interface CoursingAnswer {
   readonly intervals: readonly CourseInterval[];
   readonly controls: readonly ControlResult[];
-  /** In strict order: hard heights missed; soft misses by weight; largest step from the nominal joint; unevenness. */
+  /**
+   * In strict order: hard heights missed; soft misses, weight × ticks, those beyond the tolerance tenfold; largest step
+   * of a joint from the nominal, in ticks; unevenness, the thickest joint less the thinnest, in ticks.
+   */
   readonly cost: readonly [number, number, number, number];
 }
 

@@ -1,9 +1,13 @@
 import type { Ticks } from '../length/ticks';
 import type { Reason } from '../reasons';
 
-/** The mason's line of one run, pole to pole. */
+/** One of the mason's lines, pole to pole: a run has several where poles stand along it. */
 export interface LineRun {
+  /** The run it is strung along; the first of them where it passes on in line to the next. */
   readonly runId: string;
+  /** The poles that hold its ends; null where it ends on a wall, at the foot of a tee. */
+  readonly fromPoleId: string | null;
+  readonly toPoleId: string | null;
   /** Between the two poles. */
   readonly span: Ticks;
   /** Span with hitch allowance at both ends. */

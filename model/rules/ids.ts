@@ -11,7 +11,12 @@ export const RULE_IDS = [
   'bracedOverHeight',
   'powerLineDistance',
   'levelTolerance',
+  'levelToleranceMost',
+  'plumbTolerance',
+  'plumbToleranceMost',
   'bedJointTolerance',
+  'firstBedJointLeast',
+  'firstBedJointMost',
   'lintelBearingLeast',
 ] as const;
 

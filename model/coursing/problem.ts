@@ -1,0 +1,82 @@
+/** The coursing problem as the search sees it: stops from the bottom up, and what a miss of each costs. */
+import type { ControlResult } from './types';
+import type { Ticks } from '../length/ticks';
+import type { ThingRef } from '../things';
+import { HARD_MISS, type Piece } from './costPieces';
+
+/** A thing that wants a height. */
+export interface Control {
+  readonly thing: ThingRef;
+  readonly kind: ControlResult['kind'];
+  readonly height: Ticks;
+  readonly tolerance: Ticks;
+  readonly hold: 'hard' | 'soft';
+  readonly weight: number;
+}
+
+/** A height where the course lines are held: every control that wants it, merged. */
+export interface Stop {
+  readonly height: Ticks;
+  readonly hold: 'hard' | 'soft';
+  readonly tolerance: Ticks;
+  readonly weight: number;
+  readonly controls: readonly Control[];
+  /** The bond beam that starts here and ends the lift: its depth; 0 for any other stop. */
+  readonly beamDepth: Ticks;
+}
+
+export interface Problem {
+  readonly unit: Ticks;
+  readonly joint: { readonly nominal: Ticks; readonly least: Ticks; readonly most: Ticks };
+  /** Top of the first course. */
+  readonly start: Ticks;
+  /** From the lowest up. */
+  readonly stops: readonly Stop[];
+}
+
+/** Ticks missed beyond the tolerance count this many times. */
+export const BEYOND_TOLERANCE = 10;
+
+/** How far from its height a stop may be looked for: one course of the thickest joint either way. */
+export function windowOf(problem: Problem, index: number): { lo: number; hi: number } {
+  const stop = problem.stops[index] as Stop;
+  const beamsBelow = problem.stops.slice(0, index).filter((below) => below.beamDepth > 0).length;
+  const reach = (problem.unit + problem.joint.most) * (1 + 2 * beamsBelow) + 1;
+  return { lo: stop.height - reach, hi: stop.height + reach };
+}
+
+/** What holding the stop at each height within `lo`…`hi` costs. */
+export function chargeOf(stop: Stop, lo: number, hi: number): Piece[] {
+  const { height, weight } = stop;
+  if (stop.hold === 'hard') {
+    return [
+      { lo, hi: height - 1, hard: HARD_MISS + (height - lo), soft: 0, hardSlope: -1, softSlope: 0 },
+      { lo: height, hi: height, hard: 0, soft: 0, hardSlope: 0, softSlope: 0 },
+      { lo: height + 1, hi, hard: HARD_MISS + 1, soft: 0, hardSlope: 1, softSlope: 0 },
+    ];
+  }
+  const tolerance = Math.min(stop.tolerance, height - lo, hi - height);
+  const near = weight;
+  const far = weight * BEYOND_TOLERANCE;
+  const pieces: Piece[] = [
+    {
+      lo,
+      hi: height - tolerance - 1,
+      hard: 0,
+      soft: near * tolerance + far * (height - tolerance - lo),
+      hardSlope: 0,
+      softSlope: -far,
+    },
+    { lo: height - tolerance, hi: height, hard: 0, soft: near * tolerance, hardSlope: 0, softSlope: -near },
+    { lo: height + 1, hi: height + tolerance, hard: 0, soft: near, hardSlope: 0, softSlope: near },
+    {
+      lo: height + tolerance + 1,
+      hi,
+      hard: 0,
+      soft: near * tolerance + far,
+      hardSlope: 0,
+      softSlope: far,
+    },
+  ];
+  return pieces.filter((piece) => piece.lo <= piece.hi);
+}

@@ -1,0 +1,96 @@
+/** Among the plans of least cost, the one whose joints stay nearest the nominal, and then spread least. */
+import { compareCosts } from './costPieces';
+import { cheapestPlan, jointsOf, type CountAllowed, type Plan } from './search';
+import type { JointLimits } from './fitInterval';
+import type { Problem } from './problem';
+
+/** A plan with everything it is judged by. */
+export interface RatedPlan extends Plan {
+  /** Largest step of a joint away from the nominal, in ticks. */
+  readonly step: number;
+  /** Thickest joint less thinnest, in ticks. */
+  readonly spread: number;
+}
+
+/** Two joints that part by less are one: finer than any two different joints of under 300 courses each. */
+const FINE = 1e-5;
+
+export function rate(problem: Problem, plan: Plan): RatedPlan {
+  const joints = jointsOf(problem, plan);
+  if (joints.length === 0) return { ...plan, step: 0, spread: 0 };
+  const thinnest = Math.min(...joints);
+  const thickest = Math.max(...joints);
+  const { nominal } = problem.joint;
+  return {
+    ...plan,
+    step: Math.max(Math.abs(thinnest - nominal), Math.abs(thickest - nominal)),
+    spread: thickest - thinnest,
+  };
+}
+
+/** Strict order of plans: cost, then largest step from the nominal joint, then spread. */
+export function compareRated(a: RatedPlan, b: RatedPlan): number {
+  const cost = compareCosts(a.cost, b.cost);
+  if (cost !== 0) return cost;
+  if (Math.abs(a.step - b.step) > FINE) return a.step - b.step;
+  return Math.abs(a.spread - b.spread) > FINE ? a.spread - b.spread : 0;
+}
+
+/**
+ * Narrows the joint limits round the nominal as far as the least cost still holds: the largest step from nominal is then
+ * the least there is. Then narrows them from each side in turn: with the step fixed, one joint lies at it, so the
+ * least spread is found by raising the lower limit or by lowering the upper. Each trial is a whole exact search.
+ */
+export function refine(problem: Problem, plan: Plan, allowed?: CountAllowed): RatedPlan {
+  const { nominal, least, most } = problem.joint;
+  const within = (limits: JointLimits): RatedPlan | null => {
+    const found = cheapestPlan(problem, limits, allowed);
+    return found && compareCosts(found.cost, plan.cost) === 0 ? rate(problem, found) : null;
+  };
+  const around = (step: number): JointLimits => ({
+    least: Math.max(least, nominal - step),
+    most: Math.min(most, nominal + step),
+  });
+  let best = narrow(
+    rate(problem, plan),
+    (p) => p.step,
+    (step) => within(around(step)),
+  );
+  const { step } = best;
+  const sides = [
+    (spread: number): JointLimits => ({ ...around(step), least: nominal + step - spread }),
+    (spread: number): JointLimits => ({ ...around(step), most: nominal - step + spread }),
+  ];
+  for (const side of sides) {
+    best = narrow(
+      best,
+      (p) => p.spread,
+      (spread) => within(clamp(side(spread), around(step))),
+    );
+  }
+  return best;
+}
+
+function clamp(limits: JointLimits, outer: JointLimits): JointLimits {
+  return { least: Math.max(limits.least, outer.least), most: Math.min(limits.most, outer.most) };
+}
+
+/** Finds the least measure that `attempt` can still reach: just under the best first, which mostly settles it. */
+function narrow(
+  start: RatedPlan,
+  measure: (plan: RatedPlan) => number,
+  attempt: (most: number) => RatedPlan | null,
+): RatedPlan {
+  let best = start;
+  let out = -FINE;
+  while (measure(best) - out > 2 * FINE) {
+    const under = attempt(measure(best) - FINE);
+    if (!under || measure(under) >= measure(best)) return best;
+    best = under;
+    const middle = (out + measure(best)) / 2;
+    const half = middle > 0 ? attempt(middle) : null;
+    if (half && measure(half) < measure(best)) best = half;
+    else out = Math.max(out, middle);
+  }
+  return best;
+}

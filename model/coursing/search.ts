@@ -1,0 +1,172 @@
+/**
+ * The least cost of one coursing problem within given joint limits, exactly.
+ *
+ * Every stop i takes a whole height yᵢ, and every interval between neighbouring stops a whole count nᵢ of courses with
+ * nᵢ (u + l) ≤ yᵢ − (yᵢ₋₁ + depth of the beam between) ≤ nᵢ (u + m), for unit u and joint limits l…m; each lift has a
+ * course at least. The cost is the sum of the stops' charges. For given counts these are difference constraints,
+ * whose matrix is totally unimodular, so whole heights lose nothing. The least cost of having come to each
+ * height is a piecewise linear function: it is carried from stop to stop, for all counts at once.
+ */
+import { compareCosts, costAt, lowerOf, raise, slideUp, sumOf, type Cost, type Piece, costOn } from './costPieces';
+import { countsWithin, heightLimits, jointOf, type JointLimits } from './fitInterval';
+import { chargeOf, windowOf, type Problem, type Stop } from './problem';
+
+/** Counts and heights of one answer, stop by stop. */
+export interface Plan {
+  readonly cost: Cost;
+  /** Height taken by each stop. */
+  readonly heights: readonly number[];
+  /** Courses between the stop below (or the start, or the beam below) and this one. */
+  readonly counts: readonly number[];
+}
+
+/** Which counts a stop's interval may have. */
+export type CountAllowed = (stop: number, count: number) => boolean;
+
+interface Stage {
+  /** Costs before this stop's own charge is added: with a course in this lift, and with none yet. */
+  readonly begun: readonly Piece[];
+  readonly bare: readonly Piece[];
+}
+
+const ANY_COUNT: CountAllowed = () => true;
+
+/** The cheapest plan, or null where no counts fit. Ties go to joints near the nominal. */
+export function cheapestPlan(problem: Problem, joint: JointLimits, allowed: CountAllowed = ANY_COUNT): Plan | null {
+  const stages: Stage[] = [
+    {
+      begun: [{ lo: problem.start, hi: problem.start, hard: 0, soft: 0, hardSlope: 0, softSlope: 0 }],
+      bare: [],
+    },
+  ];
+  for (let i = 0; i < problem.stops.length; i++) {
+    const next = advance(problem, joint, stages[i] as Stage, i, allowed);
+    if (next.begun.length === 0 && next.bare.length === 0) return null;
+    stages.push(next);
+  }
+  return retrace(problem, joint, stages, allowed);
+}
+
+function advance(problem: Problem, joint: JointLimits, from: Stage, index: number, allowed: CountAllowed): Stage {
+  const stop = problem.stops[index] as Stop;
+  const { lo, hi } = windowOf(problem, index);
+  const charge = chargeOf(stop, lo, hi);
+  let begun: Piece[] = [];
+  for (const [pieces, leastCount] of [
+    [from.begun, 0],
+    [from.bare, 1],
+  ] as const) {
+    for (const count of countsFrom(pieces, lo, hi, problem.unit, joint)) {
+      if (count < leastCount || !allowed(index, count)) continue;
+      const limits = heightLimits(count, problem.unit, joint);
+      if (limits.least <= limits.most) begun = lowerOf(begun, slideUp(pieces, limits.least, limits.most, lo, hi));
+    }
+  }
+  begun = sumOf(begun, charge);
+  if (stop.beamDepth > 0) return { begun: [], bare: raise(begun, stop.beamDepth) };
+  return { begun, bare: allowed(index, 0) ? sumOf(from.bare, charge) : [] };
+}
+
+function countsFrom(pieces: readonly Piece[], lo: number, hi: number, unit: number, joint: JointLimits): number[] {
+  const first = pieces[0];
+  const last = pieces[pieces.length - 1];
+  if (!first || !last) return [];
+  const { from, to } = countsWithin(lo - last.hi, hi - first.lo, unit, joint);
+  return Array.from({ length: Math.max(0, to - from + 1) }, (_, i) => from + i);
+}
+
+/** Goes back from the cheapest end, taking at every stop a count and a height below that explain the cost. */
+function retrace(problem: Problem, joint: JointLimits, stages: readonly Stage[], allowed: CountAllowed): Plan | null {
+  const nominal = problem.unit + problem.joint.nominal;
+  const end = stages[stages.length - 1] as Stage;
+  const last = cheapestOf([...end.begun, ...end.bare]);
+  if (!last) return null;
+  const heights: number[] = [];
+  const counts: number[] = [];
+  const lastStop = problem.stops[problem.stops.length - 1];
+  let height = last.height - (lastStop?.beamDepth ?? 0);
+  let bare = (lastStop?.beamDepth ?? 0) === 0 && !isCost(costAt(end.begun, last.height), last.cost);
+  for (let i = problem.stops.length - 1; i >= 0; i--) {
+    const from = stages[i] as Stage;
+    const step = bare
+      ? { count: 0, below: height, bare: true }
+      : stepBelow(problem, joint, from, i, height, nominal, allowed);
+    if (!step) return null;
+    heights.unshift(height);
+    counts.unshift(step.count);
+    const depth = problem.stops[i - 1]?.beamDepth ?? 0;
+    height = step.below - depth;
+    bare = step.bare && depth === 0;
+  }
+  return { cost: last.cost, heights, counts };
+}
+
+function isCost(found: Cost | null, cost: Cost): boolean {
+  return found !== null && compareCosts(found, cost) === 0;
+}
+
+interface Step {
+  readonly count: number;
+  readonly below: number;
+  readonly bare: boolean;
+}
+
+function stepBelow(
+  problem: Problem,
+  joint: JointLimits,
+  from: Stage,
+  index: number,
+  height: number,
+  gauge: number,
+  allowed: CountAllowed,
+): Step | null {
+  let best: (Step & { cost: Cost; off: number }) | null = null;
+  for (const [pieces, leastCount] of [
+    [from.begun, 0],
+    [from.bare, 1],
+  ] as const) {
+    for (const count of countsFrom(pieces, height, height, problem.unit, joint)) {
+      if (count < leastCount || !allowed(index, count)) continue;
+      const limits = heightLimits(count, problem.unit, joint);
+      const wish = height - count * gauge;
+      const found = cheapestOf(pieces, height - limits.most, height - limits.least, wish);
+      if (!found) continue;
+      const off = count === 0 ? 0 : Math.abs(jointOf(found.height, height, count, gauge));
+      const order = best ? compareCosts(found.cost, best.cost) || off - best.off : -1;
+      if (order < 0) best = { count, below: found.height, bare: leastCount === 1, cost: found.cost, off };
+    }
+  }
+  return best;
+}
+
+/** The cheapest height within `lo`…`hi`; of equal ones the nearest to `wish`. */
+function cheapestOf(
+  pieces: readonly Piece[],
+  lo = -Infinity,
+  hi = Infinity,
+  wish = 0,
+): { height: number; cost: Cost } | null {
+  let best: { height: number; cost: Cost } | null = null;
+  for (const piece of pieces) {
+    const from = Math.max(lo, piece.lo);
+    const to = Math.min(hi, piece.hi);
+    if (from > to) continue;
+    const slope = piece.hardSlope !== 0 ? piece.hardSlope : piece.softSlope;
+    const height = slope > 0 ? from : slope < 0 ? to : Math.min(to, Math.max(from, Math.round(wish)));
+    const cost = costOn(piece, height);
+    const order = best ? compareCosts(cost, best.cost) || Math.abs(height - wish) - Math.abs(best.height - wish) : -1;
+    if (order < 0) best = { height, cost };
+  }
+  return best;
+}
+
+/** The joints of a plan's intervals that hold a course, from the bottom up, in ticks, not rounded. */
+export function jointsOf(problem: Problem, plan: Plan): number[] {
+  let below: number = problem.start;
+  return plan.counts.flatMap((count, i) => {
+    const from = below;
+    const height = plan.heights[i] as number;
+    below = height + (problem.stops[i] as Stop).beamDepth;
+    return count === 0 ? [] : [jointOf(from, height, count, problem.unit)];
+  });
+}
