@@ -24,7 +24,7 @@ export interface TapeKeypadProps {
 }
 
 interface KeySpec {
-  readonly key: TapeKey;
+  readonly means: TapeKey;
   readonly face: string;
   readonly spoken: string;
 }
@@ -38,24 +38,24 @@ export function TapeKeypad(props: TapeKeypadProps) {
   const parts = units === 'imperial' ? fractionOf(value) : null;
   useTyping(value, onChange, enterDisabled ? null : onEnter);
 
-  const digit = (face: string): KeySpec => ({ key: { kind: 'digit', digit: face }, face, spoken: face });
-  const erase: KeySpec = { key: { kind: 'erase' }, face: 'erase', spoken: t('plan.keypad.erase') };
+  const digit = (face: string): KeySpec => ({ means: { kind: 'digit', digit: face }, face, spoken: face });
+  const erase: KeySpec = { means: { kind: 'erase' }, face: 'erase', spoken: t('plan.keypad.erase') };
   const eighths = (count: number, face: string, spoken: string): KeySpec => ({
-    key: { kind: 'eighths', count },
+    means: { kind: 'eighths', count },
     face,
     spoken,
   });
   const odd = (count: number) => eighths(count, `${count}/8`, t('plan.keypad.eighths', { count }));
-  const sixteenth: KeySpec = { key: { kind: 'odd', part: 16 }, face: '+1/16', spoken: t('plan.keypad.sixteenth') };
+  const sixteenth: KeySpec = { means: { kind: 'odd', part: 16 }, face: '+1/16', spoken: t('plan.keypad.sixteenth') };
   const thirtySecond: KeySpec = {
-    key: { kind: 'odd', part: 32 },
+    means: { kind: 'odd', part: 32 },
     face: '+1/32',
     spoken: t('plan.keypad.thirtySecond'),
   };
-  const feet: KeySpec = { key: { kind: 'feet' }, face: '′', spoken: t('plan.keypad.feet') };
-  const point: KeySpec = { key: { kind: 'point' }, face: '.', spoken: t('plan.keypad.point') };
+  const feet: KeySpec = { means: { kind: 'feet' }, face: '′', spoken: t('plan.keypad.feet') };
+  const point: KeySpec = { means: { kind: 'point' }, face: '.', spoken: t('plan.keypad.point') };
   const unit = (name: 'mm' | 'm'): KeySpec => ({
-    key: { kind: 'unit', unit: name },
+    means: { kind: 'unit', unit: name },
     face: name,
     spoken: t(`plan.keypad.${name}`),
   });
@@ -93,14 +93,14 @@ export function TapeKeypad(props: TapeKeypadProps) {
           [[digit('0'), point], []],
         ];
 
-  function isOn({ key }: KeySpec): boolean {
-    if (!parts) return key.kind === 'unit' && new RegExp(`\\d ${key.unit}$`).test(value);
-    if (key.kind === 'eighths') return parts.eighths === key.count;
-    return key.kind === 'odd' && (key.part === 16 ? parts.sixteenth : parts.thirtySecond);
+  function isOn({ means }: KeySpec): boolean {
+    if (!parts) return means.kind === 'unit' && new RegExp(`\\d ${means.unit}$`).test(value);
+    if (means.kind === 'eighths') return parts.eighths === means.count;
+    return means.kind === 'odd' && (means.part === 16 ? parts.sixteenth : parts.thirtySecond);
   }
 
-  function press({ key }: KeySpec): void {
-    onChange(pressTapeKey(value, key, units));
+  function press({ means }: KeySpec): void {
+    onChange(pressTapeKey(value, means, units));
   }
 
   return (
@@ -113,13 +113,20 @@ export function TapeKeypad(props: TapeKeypadProps) {
         <View key={left[0]?.face} style={{ flexDirection: 'row', gap: space.s }}>
           <View style={{ flex: 3, flexDirection: 'row', gap: space.s }}>
             {left.map((spec) => (
-              <Key key={spec.face} {...spec} height={height} onPress={() => press(spec)} />
+              <Key key={spec.face} face={spec.face} spoken={spec.spoken} height={height} onPress={() => press(spec)} />
             ))}
           </View>
           <View style={{ width: 1, backgroundColor: colours.rule }} />
           <View style={{ flex: units === 'imperial' ? 2 : 1, flexDirection: 'row', gap: space.s }}>
             {right.map((spec) => (
-              <Key key={spec.face} {...spec} height={height} on={isOn(spec)} onPress={() => press(spec)} />
+              <Key
+                key={spec.face}
+                face={spec.face}
+                spoken={spec.spoken}
+                height={height}
+                on={isOn(spec)}
+                onPress={() => press(spec)}
+              />
             ))}
           </View>
         </View>

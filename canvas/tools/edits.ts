@@ -1,0 +1,46 @@
+/** The model's edits as the tools use them, and the few look-ups that go with them. */
+import { addRun, type EndPlace } from '../../model/drawing/edits/addRun';
+import { standInside } from '../../model/drawing/edits/closeLoop';
+import { findCorner, runWithCorners, type NewId } from '../../model/drawing/edits/find';
+import type { Corner, Drawing, Opening } from '../../model/drawing/schema';
+import type { PlanPoint, Vec } from '../../model/geometry/point';
+import { distance, perp, sub, unit } from '../../model/geometry/vec';
+import { roundTicks, type Ticks } from '../../model/length/ticks';
+
+export function cornerById(drawing: Drawing, id: string): Corner | null {
+  return findCorner(drawing, id) ?? null;
+}
+
+export function openingById(drawing: Drawing, id: string): Opening | null {
+  return drawing.openings.find((opening) => opening.id === id) ?? null;
+}
+
+export interface RunLine {
+  readonly from: PlanPoint;
+  readonly direction: Vec;
+  /** To the left, into the wall's body. */
+  readonly inward: Vec;
+  readonly length: Ticks;
+}
+
+export function runLine(drawing: Drawing, runId: string): RunLine | null {
+  const found = runWithCorners(drawing, runId);
+  if (!found) return null;
+  const direction = unit(sub(found.to, found.from));
+  return { from: found.from, direction, inward: perp(direction), length: roundTicks(distance(found.from, found.to)) };
+}
+
+/** Draws a run; one that closes its chain turns the whole outline so that it stands inside its line. */
+export function drawRun(
+  drawing: Drawing,
+  from: EndPlace,
+  to: EndPlace,
+  chainStart: string | null,
+  newId: NewId,
+): Drawing {
+  // A run goes on in its neighbour's wall type, so that a wall does not change thickness at a corner unasked.
+  const wallTypeId = drawing.runs.at(-1)?.wallTypeId;
+  const drawn = addRun(drawing, { from, to, wallTypeId }, newId);
+  const closes = drawn !== drawing && to.kind === 'corner' && to.cornerId === chainStart;
+  return closes ? standInside(drawn, to.cornerId) : drawn;
+}

@@ -1,0 +1,162 @@
+/** Taps select; in the edit state, drags move what they began on: a corner, a run sideways, an opening along its run. */
+import { moveKeepClear, moveKeepClearPoint } from '../../model/drawing/edits/keepClears';
+import { moveCorner } from '../../model/drawing/edits/moveCorners';
+import { moveOpening } from '../../model/drawing/edits/openings';
+import { slideRun } from '../../model/drawing/edits/slideRun';
+import type { Drawing } from '../../model/drawing/schema';
+import type { PlanPoint } from '../../model/geometry/point';
+import { add, distance, dot, sub } from '../../model/geometry/vec';
+import { roundTicks, type Ticks } from '../../model/length/ticks';
+import type { ThingRef } from '../../model/things';
+import { isDrag, type StrokeEvent } from '../input/events';
+import { EMPTY_PREVIEW } from '../store/preview';
+import { cornerById, openingById, runLine } from './edits';
+import type { Tool, ToolHost } from './tool';
+
+type Grip =
+  | { readonly kind: 'corner'; readonly id: string; readonly from: PlanPoint }
+  | { readonly kind: 'run'; readonly id: string }
+  | { readonly kind: 'opening'; readonly id: string; readonly runId: string; readonly at: Ticks; readonly width: Ticks }
+  | { readonly kind: 'point'; readonly id: string; readonly index: number; readonly from: PlanPoint }
+  | { readonly kind: 'keepClear'; readonly id: string };
+
+type State =
+  | { readonly name: 'idle' }
+  | { readonly name: 'pointing'; readonly down: StrokeEvent; readonly thing: ThingRef | null }
+  | { readonly name: 'dragging'; readonly down: StrokeEvent; readonly grip: Grip; readonly asBegun: Drawing };
+
+const LABELS: Readonly<Record<Grip['kind'], string>> = {
+  corner: 'plan.did.moveCorner',
+  run: 'plan.did.slideRun',
+  opening: 'plan.did.slideOpening',
+  point: 'plan.did.movePoint',
+  keepClear: 'plan.did.movePoint',
+};
+
+export function createSelectTool(host: ToolHost): Tool {
+  const { draft } = host;
+  let state: State = { name: 'idle' };
+
+  function gripOf(thing: ThingRef | null, down: StrokeEvent): Grip | null {
+    const { drawing } = draft.get();
+    if (!thing) return null;
+    if (thing.kind === 'corner' || thing.kind === 'pole') {
+      const corner = cornerById(drawing, thing.id);
+      return corner && { kind: 'corner', id: corner.id, from: { x: corner.x, y: corner.y } };
+    }
+    if (thing.kind === 'run') return { kind: 'run', id: thing.id };
+    if (thing.kind === 'opening') {
+      const opening = openingById(drawing, thing.id);
+      return opening && { kind: 'opening', id: opening.id, runId: opening.runId, at: opening.at, width: opening.width };
+    }
+    if (thing.kind !== 'keepClear') return null;
+    const area = drawing.keepClears.find((one) => one.id === thing.id);
+    const reach = host.reach(down.pointer);
+    const index = area?.points.findIndex((point) => distance(point, down.plan) <= reach) ?? -1;
+    const from = area?.points[index];
+    return from ? { kind: 'point', id: thing.id, index, from } : { kind: 'keepClear', id: thing.id };
+  }
+
+  function drag(grip: Grip, asBegun: Drawing, down: StrokeEvent, event: StrokeEvent): void {
+    const delta = sub(event.plan, down.plan);
+    const snapping = draft.get().snapping && !event.modifiers.alt;
+    const reach = host.reach(event.pointer);
+    const shown = { ...EMPTY_PREVIEW, pointer: event.pointer };
+    if (grip.kind === 'corner' || grip.kind === 'point') {
+      const without = grip.kind === 'corner' ? [grip.id] : [];
+      const caught = host.catchPoint(add(grip.from, delta), {
+        reach,
+        snapping,
+        from: null,
+        before: null,
+        without,
+        also: [],
+      });
+      draft.update((d) =>
+        grip.kind === 'corner'
+          ? moveCorner(d, grip.id, caught.at)
+          : moveKeepClearPoint(d, grip.id, grip.index, caught.at),
+      );
+      draft.setPreview({ ...shown, at: caught.at, guides: caught.guides, caught: caught.word });
+    } else if (grip.kind === 'run') {
+      const line = runLine(asBegun, grip.id);
+      if (!line) return;
+      const by = toStep(dot(delta, line.inward), asBegun.tapeStep, snapping);
+      draft.update((d) => slideRun(d, grip.id, by));
+      const at = { x: roundTicks(event.plan.x), y: roundTicks(event.plan.y) };
+      draft.setPreview({ ...shown, at, length: roundTicks(Math.abs(by)) });
+    } else if (grip.kind === 'opening') {
+      const line = runLine(asBegun, grip.runId);
+      if (!line) return;
+      const wanted = grip.at + dot(delta, line.direction);
+      const caught = snapping
+        ? host.catchAlong(grip.runId, wanted, grip.width, reach, grip.id)
+        : { at: toStep(wanted, asBegun.tapeStep, true), word: null };
+      draft.update((d) => moveOpening(d, grip.id, grip.runId, caught.at));
+      const at = { x: roundTicks(event.plan.x), y: roundTicks(event.plan.y) };
+      draft.setPreview({ ...shown, at, caught: caught.word, length: caught.at });
+    } else {
+      const by = { x: toStep(delta.x, asBegun.tapeStep, true), y: toStep(delta.y, asBegun.tapeStep, true) };
+      draft.update((d) => moveKeepClear(d, grip.id, by));
+      draft.setPreview(shown);
+    }
+  }
+
+  function cancel(): void {
+    if (state.name === 'dragging') draft.cancel();
+    draft.setPreview(null);
+    state = { name: 'idle' };
+  }
+
+  return {
+    handle(event) {
+      if (event.kind === 'key' || event.kind === 'hover') return 'keep';
+      if (event.kind === 'down') {
+        state = { name: 'pointing', down: event, thing: host.hit(event.plan, host.reach(event.pointer)) };
+        return 'keep';
+      }
+      if (event.kind === 'cancel') {
+        cancel();
+        return 'keep';
+      }
+      if (event.kind === 'move') {
+        if (state.name === 'pointing' && isDrag(event.pointer, state.down.screen, event.screen)) {
+          const grip = draft.get().mode === 'edit' ? gripOf(state.thing, state.down) : null;
+          if (!grip) {
+            state = { name: 'idle' };
+            return 'pan';
+          }
+          draft.select(state.thing);
+          draft.begin(LABELS[grip.kind]);
+          state = { name: 'dragging', down: state.down, grip, asBegun: draft.get().drawing };
+        }
+        if (state.name === 'dragging') drag(state.grip, state.asBegun, state.down, event);
+        return 'keep';
+      }
+      if (state.name === 'dragging') {
+        draft.commit();
+        draft.setPreview(null);
+      } else if (state.name === 'pointing') {
+        draft.select(state.thing);
+      }
+      state = { name: 'idle' };
+      return 'keep';
+    },
+    leave: cancel,
+    finish() {
+      if (state.name === 'idle') return false;
+      cancel();
+      return true;
+    },
+    stepBack() {
+      const dragging = state.name === 'dragging';
+      if (dragging) cancel();
+      return dragging;
+    },
+    stateName: () => state.name,
+  };
+}
+
+function toStep(value: number, step: Ticks, on: boolean): Ticks {
+  return on ? roundTicks(roundTicks(value / step) * step) : roundTicks(value);
+}
