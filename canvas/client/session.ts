@@ -145,7 +145,7 @@ export async function signOut(): Promise<void> {
 
 /** Sends a link by mail, if anyone has that address; the answer is the same if not. */
 export async function requestReset(email: string): Promise<void> {
-  await ask('/request-password-reset', { email: email.trim(), redirectTo: '/reset' });
+  await ask('/request-password-reset', { email: email.trim() });
 }
 
 export async function resetPassword(token: string, newPassword: string): Promise<void> {

@@ -1,9 +1,11 @@
 import { useEffect, useState, type ReactNode } from 'react';
+import { whenSignedOut } from '../../client/api';
 import { keepOffline, recallOffline } from '../../client/offline';
 import { queryClient } from '../../client/queryClient';
 import { useSession } from '../../client/session';
 import { Failed } from '../../ui/States';
 import { useWords } from '../../ui/words';
+import { rememberWhereTo } from '../auth/whereTo';
 import { Paper } from './Paper';
 
 /**
@@ -15,6 +17,14 @@ export function WaitForSession({ children }: { children: (signedIn: boolean) => 
   const { session, error, retry } = useSession();
   const userId = typeof session === 'object' ? session.in.id : null;
   const [recalledFor, setRecalledFor] = useState<string | null>(null);
+  const [begun, setBegun] = useState(false);
+
+  if (!begun && session !== 'unknown') {
+    // The first answer: someone who opened a site's own address is brought there once they have signed in.
+    if (session === 'out') rememberWhereTo();
+    setBegun(true);
+  }
+  useEffect(() => whenSignedOut(() => rememberWhereTo()), []);
 
   useEffect(() => {
     if (userId === null) return;

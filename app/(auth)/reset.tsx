@@ -1,0 +1,5 @@
+import { ResetScreen } from '../../canvas/panels/auth/ResetScreen';
+
+export default function ResetRoute() {
+  return <ResetScreen />;
+}

@@ -1,0 +1,5 @@
+import { SignUpScreen } from '../../canvas/panels/auth/SignUpScreen';
+
+export default function SignUpRoute() {
+  return <SignUpScreen />;
+}

@@ -1,0 +1,80 @@
+import { useLocalSearchParams, useRouter } from 'expo-router';
+import { useState } from 'react';
+import { Controller, useForm } from 'react-hook-form';
+import { View } from 'react-native';
+import { AuthError, resetPassword } from '../../client/session';
+import { Button } from '../../ui/Button';
+import { Caution } from '../../ui/Caution';
+import { toast } from '../../ui/toasts';
+import { Txt } from '../../ui/Txt';
+import { useWords } from '../../ui/words';
+import { AuthFrame } from './AuthFrame';
+import { checkNewPassword } from './checks';
+import { PasswordField } from './PasswordField';
+import { TextLink } from './TextLink';
+import { useAuthProblem } from './useAuthProblem';
+
+/** Where the link in the mail leads: `token` to choose a new password, or `error` where the link is too old. */
+export function ResetScreen() {
+  const t = useWords();
+  const router = useRouter();
+  const problem = useAuthProblem();
+  const { token, error } = useLocalSearchParams<{ token?: string; error?: string }>();
+  const [refused, setRefused] = useState<string | null>(null);
+  const [old, setOld] = useState(false);
+  const { control, handleSubmit, formState } = useForm({ defaultValues: { password: '' } });
+
+  const submit = handleSubmit(async ({ password }) => {
+    setRefused(null);
+    try {
+      await resetPassword(token ?? '', password);
+      toast(t('auth.reset.done'));
+      router.replace('/sign-in');
+    } catch (failure) {
+      if (failure instanceof AuthError && failure.problem === 'oldLink') setOld(true);
+      else setRefused(problem(failure));
+    }
+  });
+
+  if (old || error !== undefined || token === undefined)
+    return (
+      <AuthFrame title={t('auth.reset.oldTitle')}>
+        <Txt size="large">{t('auth.reset.old')}</Txt>
+        <TextLink href="/forgot" label={t('auth.reset.askAgain')} />
+      </AuthFrame>
+    );
+
+  return (
+    <AuthFrame title={t('auth.reset.title')}>
+      <Controller
+        control={control}
+        name="password"
+        rules={{ validate: (value) => checkNewPassword(t, value) }}
+        render={({ field, fieldState }) => (
+          <PasswordField
+            ref={field.ref}
+            label={t('auth.fields.newPassword')}
+            hint={t('auth.fields.passwordHint')}
+            value={field.value}
+            onChangeText={field.onChange}
+            onBlur={field.onBlur}
+            error={fieldState.error?.message}
+            autoComplete="new-password"
+            onSubmitEditing={() => void submit()}
+          />
+        )}
+      />
+      {refused ? (
+        <View role="alert">
+          <Caution text={refused} />
+        </View>
+      ) : null}
+      <Button
+        kind="filled"
+        label={t('auth.reset.action')}
+        busy={formState.isSubmitting}
+        onPress={() => void submit()}
+      />
+    </AuthFrame>
+  );
+}
