@@ -138,6 +138,7 @@ async function main() {
       CLIENT_DIR: client,
       AUTH_SECRET: process.env.AUTH_SECRET || keptSecret(state, 'auth-secret'),
       ...(process.env.SMTP_URL ? {} : { LOCAL_MAIL: '1' }),
+      DEMO: process.env.DEMO || '1',
     };
     await step('Migrating the database, and the demo where it is empty', () =>
       runProgram(process.execPath, ['--import', 'tsx', 'db/demo/run.ts'], {

@@ -20,7 +20,8 @@ async function main(): Promise<void> {
   const figures: Figure[] = [];
   for (const name of names.length > 0 ? names : Object.keys(BENCHES)) figures.push(...(await BENCHES[name]!()));
   const missed = (figure: Figure) => figure.most !== null && figure.value > figure.most;
-  if (json) process.stdout.write(`${JSON.stringify(figures.map((figure) => ({ ...figure, missed: missed(figure) })))}\n`);
+  if (json)
+    process.stdout.write(`${JSON.stringify(figures.map((figure) => ({ ...figure, missed: missed(figure) })))}\n`);
   else {
     for (const figure of figures) {
       const limit = figure.most === null ? '' : `  at most ${figure.most}${missed(figure) ? '  MISSED' : ''}`;
