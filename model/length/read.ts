@@ -32,13 +32,9 @@ interface Quantity {
   readonly dashed: boolean;
 }
 
-class Wrong extends Error {
-  constructor(
-    readonly at: number,
-    readonly problem: LengthProblem,
-  ) {
-    super(problem);
-  }
+interface Trouble {
+  readonly at: number;
+  readonly problem: LengthProblem;
 }
 
 function addAmounts(a: Amount, b: Amount): Amount {
@@ -46,30 +42,26 @@ function addAmounts(a: Amount, b: Amount): Amount {
 }
 
 /** Joins a whole number and the fraction after it, and each number with its unit. */
-function groupQuantities(tokens: readonly Token[]): readonly Quantity[] {
+function groupQuantities(tokens: readonly Token[]): readonly Quantity[] | Trouble {
   const quantities: Quantity[] = [];
   let i = 0;
   let dashed = false;
-  while (i < tokens.length) {
-    const token = tokens[i];
-    if (!token) break;
+  for (let token = tokens[i]; token; token = tokens[i]) {
+    if (token.kind === 'unit') return { at: token.at, problem: 'unitWithoutNumber' };
     if (token.kind === 'dash') {
       const after = tokens[i + 1];
-      if (quantities.length === 0 || dashed || after?.kind !== 'number')
-        throw new Wrong(token.at, 'unexpectedCharacter');
+      if (quantities.length === 0 || dashed || !after) return { at: token.at, problem: 'unexpectedCharacter' };
       dashed = true;
       i++;
       continue;
     }
-    if (token.kind === 'unit') throw new Wrong(token.at, 'unitWithoutNumber');
-    let amount = token.amount;
+    let { amount } = token;
     i++;
-    const dash = tokens[i];
-    const gap = dash?.kind === 'dash' ? 1 : 0;
+    const gap = tokens[i]?.kind === 'dash' ? 1 : 0;
     const fraction = tokens[i + gap];
     if (fraction?.kind === 'number' && fraction.form === 'fraction') {
-      if (token.form !== 'whole') throw new Wrong(fraction.at, 'unexpectedNumber');
-      if (fraction.amount.top >= fraction.amount.bottom) throw new Wrong(fraction.at, 'fractionTooLarge');
+      if (token.form !== 'whole') return { at: fraction.at, problem: 'unexpectedNumber' };
+      if (fraction.amount.top >= fraction.amount.bottom) return { at: fraction.at, problem: 'fractionTooLarge' };
       amount = addAmounts(amount, fraction.amount);
       i += gap + 1;
     }
@@ -81,30 +73,34 @@ function groupQuantities(tokens: readonly Token[]): readonly Quantity[] {
   return quantities;
 }
 
+interface Settled extends Quantity {
+  readonly unit: UnitName;
+}
+
 /** Gives every quantity a unit: `5'4` and `5-4` are feet and inches, one bare number takes the site's unit. */
-function settleUnits(quantities: readonly Quantity[], units: Units): readonly { q: Quantity; unit: UnitName }[] {
+function settleUnits(quantities: readonly Quantity[], units: Units): readonly Settled[] | Trouble {
   const [first, second, third] = quantities;
   if (!first) return [];
-  if (third) throw new Wrong(third.at, 'unexpectedNumber');
-  if (!second) return [{ q: first, unit: first.unit ?? (units === 'imperial' ? 'in' : 'mm') }];
+  if (third) return { at: third.at, problem: 'unexpectedNumber' };
+  if (!second) return [{ ...first, unit: first.unit ?? (units === 'imperial' ? 'in' : 'mm') }];
   const feetFirst = first.unit === 'ft' || (first.unit === null && second.dashed);
   const unit = second.unit ?? 'in';
   if (feetFirst && unit === 'in') {
-    if (second.amount.top >= 12n * second.amount.bottom) throw new Wrong(second.at, 'inchesTooLarge');
+    if (second.amount.top >= 12n * second.amount.bottom) return { at: second.at, problem: 'inchesTooLarge' };
     return [
-      { q: first, unit: 'ft' },
-      { q: second, unit },
+      { ...first, unit: 'ft' },
+      { ...second, unit },
     ];
   }
   const order: readonly UnitName[] = ['m', 'cm', 'mm'];
   const larger = first.unit === null ? -1 : order.indexOf(first.unit);
-  if (larger >= 0 && second.unit !== null && order.indexOf(second.unit) > larger) {
+  if (first.unit !== null && larger >= 0 && second.unit !== null && order.indexOf(second.unit) > larger) {
     return [
-      { q: first, unit: first.unit ?? 'm' },
-      { q: second, unit: second.unit },
+      { ...first, unit: first.unit },
+      { ...second, unit: second.unit },
     ];
   }
-  throw new Wrong(second.at, 'unexpectedNumber');
+  return { at: second.at, problem: 'unexpectedNumber' };
 }
 
 /** Half away from zero, of a fraction that is not negative. */
@@ -112,19 +108,8 @@ function roundFraction(top: bigint, bottom: bigint): bigint {
   return (2n * top + bottom) / (2n * bottom);
 }
 
-function readWhole(text: string, units: Units): Ticks {
-  const { negative, tokens, problem } = tokenise(text);
-  if (problem) throw new Wrong(problem.at, problem.problem);
-  const parts = settleUnits(groupQuantities(tokens), units);
-  const first = parts[0];
-  if (!first) throw new Wrong(Math.max(0, text.length - 1), 'empty');
-  let sum: Amount = { top: 0n, bottom: 1n };
-  for (const { q, unit } of parts)
-    sum = addAmounts(sum, { top: q.amount.top * BigInt(TICKS_PER_UNIT[unit]), bottom: q.amount.bottom });
-  const size = roundFraction(sum.top, sum.bottom);
-  if (size > MOST) throw new Wrong(first.q.at, 'tooLarge');
-  const value = Number(size);
-  return ticks(negative && value > 0 ? -value : value);
+function refuse(trouble: Trouble): ReadLength {
+  return { ok: false, at: trouble.at, problem: trouble.problem };
 }
 
 /**
@@ -133,10 +118,19 @@ function readWhole(text: string, units: Units): Ticks {
  * is for the asker to say.
  */
 export function readLength(text: string, site: { readonly units: Units }): ReadLength {
-  try {
-    return { ok: true, ticks: readWhole(text, site.units) };
-  } catch (wrong) {
-    if (wrong instanceof Wrong) return { ok: false, at: wrong.at, problem: wrong.problem };
-    throw wrong;
-  }
+  const { negative, tokens, problem } = tokenise(text);
+  if (problem) return refuse(problem);
+  const quantities = groupQuantities(tokens);
+  if ('problem' in quantities) return refuse(quantities);
+  const parts = settleUnits(quantities, site.units);
+  if ('problem' in parts) return refuse(parts);
+  const [first] = parts;
+  if (!first) return refuse({ at: Math.max(0, text.trimEnd().length - 1), problem: 'empty' });
+  let sum: Amount = { top: 0n, bottom: 1n };
+  for (const { amount, unit } of parts)
+    sum = addAmounts(sum, { top: amount.top * BigInt(TICKS_PER_UNIT[unit]), bottom: amount.bottom });
+  const size = roundFraction(sum.top, sum.bottom);
+  if (size > MOST) return refuse({ at: first.at, problem: 'tooLarge' });
+  const value = Number(size);
+  return { ok: true, ticks: ticks(negative && value > 0 ? -value : value) };
 }

@@ -21,6 +21,11 @@ export function thicknessOf(type: WallType): Ticks {
   return type.laid === 'stretcher' ? type.unit.width : type.unit.length;
 }
 
+/** How long a unit is along a wall of this type. */
+export function unitAlong(type: WallType): Ticks {
+  return type.laid === 'stretcher' ? type.unit.length : type.unit.width;
+}
+
 export interface ReadyRuns {
   readonly runs: readonly ReadyRun[];
   readonly reasons: readonly Reason[];
