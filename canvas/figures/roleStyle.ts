@@ -56,7 +56,7 @@ function plainStyle(role: Role, { colours, strokes }: FigureTheme): RoleStyle {
     case 'line':
       return { fill: NONE, stroke: colours.line, width: strokes.thin, text: colours.line };
     case 'pole':
-      return { fill: colours.steel, stroke: colours.steel, width: strokes.hair, text };
+      return { fill: colours.steel, stroke: colours.steel, width: strokes.normal, text };
     case 'brace':
       return { fill: NONE, stroke: colours.steel, width: strokes.thin, dash: '7 4', text: colours.steel };
     case 'foot':

@@ -32,11 +32,9 @@ function column(context: ElevationContext, labels: readonly HeightLabel[], edge:
       { x: roundTicks(edge + side * height * 0.5), y: label.height },
       { x: roundTicks(text - side * height * 0.3), y },
     ];
-    context.shapes.push({
-      kind: 'lines',
-      role: label.role === 'level-line' ? 'level-line' : 'dimension',
-      lines: [leader],
-    });
+    // The level line runs up to its own name; only a name moved off it needs a leader.
+    if (label.role !== 'level-line' || y !== label.height)
+      context.shapes.push({ kind: 'lines', role: 'dimension', lines: [leader] });
     context.shapes.push({
       kind: 'text',
       role: label.role,

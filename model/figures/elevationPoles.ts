@@ -54,7 +54,7 @@ export function drawElevationPoles(context: ElevationContext): void {
     ]);
     shapes.push({ kind: 'lines', role: 'mark', thing, emphasis, lines });
   }
-  const past = options.scale.textHeight.small * 2;
+  const past = options.scale.textHeight.small * 0.9;
   const first = spans[0]?.left ?? 0;
   const last = spans[spans.length - 1]?.right ?? run.length;
   const level = setOut.ground.levelLine;

@@ -67,6 +67,8 @@ function drawOpening(context: PlanContext, run: RunGeometry, opening: Opening): 
       onRun(run, at + width - frame, run.thickness * part),
     ]);
     context.shapes.push({ kind: 'lines', role: 'frame', thing, emphasis, lines });
+    const sill = [0, run.thickness].map((depth) => [onRun(run, at, depth), onRun(run, at + width, depth)]);
+    context.shapes.push({ kind: 'lines', role: 'swing', thing, emphasis, lines: sill });
   }
   if (opening.kind === 'door') drawLeaf(context, run, opening);
 }

@@ -6,7 +6,7 @@ import type { Emphasis } from './figure';
 import type { PlanContext } from './planContext';
 
 /** A pole's leg is never drawn shorter than this part of a small text's height. */
-const LEAST_LEG = 0.62;
+const LEAST_LEG = 0.85;
 
 /** The section, grown about its heel until it can be seen at this scale. */
 export function readableSection(context: PlanContext, pole: StoryPole): PlanPoint[] {

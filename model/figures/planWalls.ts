@@ -16,7 +16,9 @@ function drawBody(context: PlanContext, run: RunGeometry): void {
   const emphasis = context.emphasisOf('run', run.runId);
   const thing = { kind: 'run', id: run.runId } as const;
   if (run.body.length >= 3) context.shapes.push({ kind: 'polygon', role: 'body', thing, emphasis, points: run.body });
-  context.obstacles.push({ points: stripOnRun(run, 0, run.length, 0, run.thickness), weight: 12 });
+  const ends = [...run.outside, ...run.inside].map((point) => alongRun(run, point));
+  const points = stripOnRun(run, Math.min(...ends), Math.max(...ends), 0, run.thickness);
+  context.obstacles.push({ points, weight: 12 });
 }
 
 /** Head joints of the shown course, across the wall; left out where they would run together at this scale. */
