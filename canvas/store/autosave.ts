@@ -29,6 +29,8 @@ export interface Autosave {
   flush(): Promise<SaveStatus>;
   online(): void;
   resolve(part: DraftConflict['part'], choice: 'mine' | 'theirs'): void;
+  /** A newer draft was fetched: what others saved, or a revision restored. */
+  offer(drawing: Drawing, survey: Survey, versions: Versions): void;
   versions(): Versions;
   stop(): void;
 }
@@ -121,6 +123,10 @@ export function startAutosave(draft: DraftStore, host: AutosaveHost, loaded: Ver
     resolve(part, choice) {
       (part === 'drawing' ? drawing : survey).resolve(choice);
       setConflict(part, null);
+    },
+    offer(newDrawing, newSurvey, versions) {
+      if (draft.get().gesture === null) drawing.offer(newDrawing, versions.drawing);
+      survey.offer(newSurvey, versions.survey);
     },
     versions: () => ({ drawing: drawing.version(), survey: survey.version() }),
     stop() {

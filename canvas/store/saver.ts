@@ -66,6 +66,8 @@ export interface Saver<T> {
   /** Takes up a copy that the device kept from before. The part on the screen must be the copy's value already. */
   resume(copy: LocalCopy<T>): void;
   resolve(choice: 'mine' | 'theirs'): void;
+  /** The server's version as just fetched: taken over where nothing here is unsaved; otherwise the next save finds out. */
+  offer(value: T, version: number): void;
   version(): number;
   status(): SaveStatus;
   stop(): void;
@@ -218,6 +220,12 @@ export function createSaver<T>(host: SaverHost<T>, savedValue: T, savedVersion: 
         keepCopy();
         schedule(0);
       }
+    },
+    offer(value, offered) {
+      if (offered <= version || status !== 'saved' || host.current() !== saved) return;
+      saved = value;
+      version = offered;
+      host.adopt(value);
     },
     version: () => version,
     status: () => status,

@@ -216,6 +216,17 @@ describe('saving by itself', () => {
     expect(await b.saver.flush()).toBe('saved');
   });
 
+  it('takes over a newer version that was fetched, unless something here is unsaved', () => {
+    const b = bench('a', 5);
+    b.saver.offer('older', 5);
+    expect(b.value()).toBe('a');
+    b.saver.offer('restored', 6);
+    expect([b.value(), b.saver.version(), b.saver.status()]).toEqual(['restored', 6, 'saved']);
+    b.type('mine');
+    b.saver.offer('newer', 7);
+    expect([b.value(), b.saver.version()]).toEqual(['mine', 6]);
+  });
+
   it('does nothing more once stopped', async () => {
     const b = bench();
     b.type('b');

@@ -1,0 +1,98 @@
+import { useQueryClient } from '@tanstack/react-query';
+import { usePathname } from 'expo-router';
+import { useEffect, useMemo, useState, type ReactNode } from 'react';
+import { ApiError } from '../../client/api';
+import { useDraft as useFetchedDraft } from '../../client/drafts';
+import { errorWords } from '../../client/errorWords';
+import { useSession } from '../../client/session';
+import { useSite } from '../../client/sites';
+import { Failed, Loading } from '../../ui/States';
+import { useWords } from '../../ui/words';
+import { ConflictWatch } from './ConflictDialog';
+import { recallLocal } from './localDrafts';
+import { openDraft, type OpenDraft } from './openDraft';
+import { WorkspaceContext, type Workspace } from './workspace';
+
+/** Parts of a site that show nothing of the drawing, and so need not wait for it. */
+const WITHOUT_DRAWING = /^\/sites\/[^/]+\/(crew|more)$/;
+
+/** Opens the site's draft for every screen inside it, saves it as it changes, and keeps what is unsaved on the device. */
+export function DraftProvider({ siteId, children }: { siteId: string; children: ReactNode }) {
+  const t = useWords();
+  const pathname = usePathname();
+  const client = useQueryClient();
+  const { session } = useSession();
+  const site = useSite(siteId).data;
+  const query = useFetchedDraft(siteId);
+  const fetched = query.data;
+  const userId = typeof session === 'object' ? session.in.id : null;
+  const role = site?.role;
+  const [open, setOpen] = useState<OpenDraft | null>(null);
+  const ready = userId !== null && role !== undefined && fetched !== undefined;
+
+  useEffect(() => {
+    if (!ready) return;
+    let opened: OpenDraft | null = null;
+    let wanted = true;
+    void recallLocal(userId, siteId).then((local) => {
+      if (!wanted) return;
+      opened = openDraft({ client, userId, siteId, siteName: site?.name ?? '', role, fetched, local });
+      setOpen(opened);
+    });
+    return () => {
+      wanted = false;
+      opened?.stop();
+      setOpen(null);
+    };
+    // Only who it is and which site decides on opening anew; a newer draft or name is taken over below.
+  }, [client, ready, userId, role, siteId]);
+
+  useEffect(() => {
+    if (open && fetched)
+      open.autosave.offer(fetched.drawing, fetched.survey, {
+        drawing: fetched.drawingVersion,
+        survey: fetched.surveyVersion,
+      });
+  }, [open, fetched]);
+
+  useEffect(() => {
+    if (!open) return;
+    const { autosave } = open;
+    const online = () => autosave.online();
+    const leaving = () => void autosave.flush();
+    globalThis.addEventListener('online', online);
+    globalThis.addEventListener('pagehide', leaving);
+    return () => {
+      globalThis.removeEventListener('online', online);
+      globalThis.removeEventListener('pagehide', leaving);
+    };
+  }, [open]);
+
+  const afterRevision = fetched?.afterRevision ?? null;
+  const siteName = site?.name ?? '';
+  const workspace = useMemo<Workspace | null>(
+    () => open && { ...open.workspace, siteName, of: { kind: 'draft', afterRevision } },
+    [open, siteName, afterRevision],
+  );
+
+  if (workspace?.solver.get().solved)
+    return (
+      <WorkspaceContext value={workspace}>
+        {children}
+        <ConflictWatch />
+      </WorkspaceContext>
+    );
+  if (WITHOUT_DRAWING.test(pathname)) return children;
+  if (workspace) return <Failed title={t('plan.failed')} text={t('plan.solveFailed')} />;
+  if (!fetched && query.isError) {
+    const offline = query.error instanceof ApiError && query.error.code === 'offline';
+    return (
+      <Failed
+        title={t('plan.failed')}
+        text={offline ? t('plan.notHere') : errorWords(t, query.error)}
+        onRetry={() => void query.refetch()}
+      />
+    );
+  }
+  return <Loading label={t('plan.loading')} />;
+}
