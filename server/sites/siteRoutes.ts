@@ -1,6 +1,6 @@
 import { changeSiteSchema, newSiteSchema, siteSchema, sitesSchema } from '../../model/contracts/sites';
 import { createSite, deleteSite, listSites, renameSite } from '../../db/queries/sites';
-import { firstDrawing } from '../drawings/firstDrawing';
+import { newDrawing } from '../../model/drawing/defaults';
 import { outlineOf } from '../drawings/outline';
 import { route, type Route, type Site } from '../http/route';
 
@@ -34,7 +34,7 @@ export const siteRoutes: readonly Route[] = [
     answer: siteSchema,
     status: 201,
     handle: async ({ deps, body, person }) => {
-      const drawing = firstDrawing(body.units);
+      const drawing = newDrawing(body.units);
       const outline = outlineOf(drawing);
       return siteAnswer(await createSite(deps.db, { name: body.name, drawing, outline, userId: person.id }));
     },
