@@ -49,8 +49,7 @@ function clamp(value: number, least: number, most: number): number {
 }
 
 /** Joints worth trying: nominal or as near as can be, both limits, and half-way to them. */
-function jointsToTry({ least, most }: Counted, nominal: number): number[] {
-  const near = clamp(nominal, least, most);
+function jointsToTry({ least, most }: Counted, near: number): number[] {
   return [...new Set([near, least, most, (least + near) / 2, (near + most) / 2])];
 }
 
@@ -107,13 +106,14 @@ function wholeCourses(span: Span, limits: BondLimits): CourseFill[] {
   return countsFor(span, 0, 0, 0, limits).map(({ count }) => layCourse(span, count, [], limits));
 }
 
-function oneCloser(span: Span, apart: number, limits: BondLimits): CourseFill[] {
+function oneCloser(span: Span, apart: number, limits: BondLimits, thorough: boolean): CourseFill[] {
   const { unit, leastPiece } = limits;
   const fills: CourseFill[] = [];
   for (const counted of countsFor(span, 1, Math.min(leastPiece, unit - 1), unit - 1, limits)) {
     const left = spanLength(span) - (counted.count - 1) * unit;
-    const sizes = new Set<number>();
-    for (const joint of jointsToTry(counted, limits.joint.nominal)) {
+    const near = clamp(limits.joint.nominal, counted.least, counted.most);
+    const sizes = new Set<number>([Math.round(left - counted.jointCount * near)]);
+    for (const joint of thorough ? jointsToTry(counted, near) : []) {
       sizes.add(Math.round(left - counted.jointCount * joint));
       for (const size of fittingClosers(apart, joint, limits)) sizes.add(size);
     }
@@ -132,7 +132,7 @@ function jointsHold(mortar: number, jointCount: number, { joint }: BondLimits): 
   return mortar >= jointCount * joint.least && mortar <= jointCount * joint.most;
 }
 
-function twoClosers(span: Span, apart: number, limits: BondLimits): CourseFill[] {
+function twoClosers(span: Span, apart: number, limits: BondLimits, thorough: boolean): CourseFill[] {
   const { unit, leastPiece } = limits;
   const fills: CourseFill[] = [];
   const least = Math.min(leastPiece, unit - 1);
@@ -142,7 +142,7 @@ function twoClosers(span: Span, apart: number, limits: BondLimits): CourseFill[]
     const sum = Math.round(left - counted.jointCount * joint);
     if (!jointsHold(left - sum, counted.jointCount, limits)) continue;
     const firsts = new Set([Math.round(sum / 2), Math.max(least, sum - unit + 1), Math.min(unit - 1, sum - least)]);
-    for (const size of fittingClosers(apart, joint, limits)) firsts.add(size).add(sum - size);
+    for (const size of thorough ? fittingClosers(apart, joint, limits) : []) firsts.add(size).add(sum - size);
     for (const first of firsts) {
       const second = sum - first;
       if (first < least || second < least || first >= unit || second >= unit) continue;
@@ -163,12 +163,19 @@ export const MOST_CLOSERS = 2;
 
 /**
  * Ways to fill a span with exactly `closers` cut units, joints inside their limits.
- * `apart` is how far this course starts before the next one, which sets the closers that make them lap.
+ * `apart` is how far this course starts before the next one, which sets the closers that make them lap. Those few whose
+ * joints are nominal, or as near as can be, are enough for most walls; the thorough list has more.
  */
-export function candidateFills(span: Span, closers: number, apart: number, limits: BondLimits): CourseFill[] {
-  if (spanLength(span) <= 0) return [];
+export function candidateFills(
+  span: Span,
+  closers: number,
+  apart: number,
+  limits: BondLimits,
+  thorough: boolean,
+): CourseFill[] {
+  if (spanLength(span) <= 0 || closers > MOST_CLOSERS) return [];
   if (closers === 0) return wholeCourses(span, limits);
-  return closers === 1 ? oneCloser(span, apart, limits) : twoClosers(span, apart, limits);
+  return closers === 1 ? oneCloser(span, apart, limits, thorough) : twoClosers(span, apart, limits, thorough);
 }
 
 /** What is left where nothing fits: a single cut piece, or as many whole units as go in and a piece, however short. */

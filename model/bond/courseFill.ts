@@ -31,8 +31,11 @@ export interface CourseFill {
   readonly joints: readonly number[];
   /** `[start, end, …]` of the closers. */
   readonly closers: readonly number[];
+  /** Those of them that stand away from the ends of the stretch: they are never laid one over another. */
+  readonly innerClosers: readonly number[];
   readonly cuts: number;
-  /** Pieces shorter than the least. */
+  /** Pieces shorter than the least, and closers that stand as the corner's own unit. */
+  readonly faults: number;
   readonly shortPieces: number;
   /** Closers beside a corner or a jamb. */
   readonly endClosers: number;
@@ -56,55 +59,87 @@ export const EMPTY_FILL: CourseFill = {
   pieces: [],
   joints: [],
   closers: [],
+  innerClosers: [],
   cuts: 0,
+  faults: 0,
   shortPieces: 0,
   endClosers: 0,
   jointOff: 0,
   clear: 1 / 2,
 };
 
+/** Takes the measures of a course from its pieces (`[start, end, …]`, in order, whole where they are as long as a unit). */
+export function measureFill(span: Span, pieces: readonly number[], limits: BondLimits): CourseFill {
+  const length = spanLength(span);
+  const joints: number[] = [];
+  const closers: number[] = [];
+  const innerClosers: number[] = [];
+  let shortPieces = 0;
+  let quoinClosers = 0;
+  let endClosers = 0;
+  let clear = 1 / 2;
+  let mortar = 0;
+  let reached = span.from.at;
+  for (let i = 0; i <= pieces.length; i += 2) {
+    const end = i === 0 ? span.from : i === pieces.length ? span.to : null;
+    const start = i === pieces.length ? span.to.at : pieces[i]!;
+    if (end === null || end.joint) {
+      if (end === null || end.lapped) joints.push(reached, start);
+      mortar += start - reached;
+    }
+    if (i === pieces.length) break;
+    const stop = pieces[i + 1]!;
+    reached = stop;
+    if (stop - start < limits.leastPiece) shortPieces += 1;
+    if (stop - start === limits.unit) continue;
+    closers.push(start, stop);
+    clear = Math.min(clear, (start - span.from.at) / length, (span.to.at - stop) / length);
+    const isFirst = i === 0;
+    const isLast = i === pieces.length - 2;
+    if (isFirst || isLast) endClosers += 1;
+    else innerClosers.push(start, stop);
+    if ((isFirst && span.from.quoin) || (isLast && span.to.quoin)) quoinClosers += 1;
+  }
+  const jointCount = pieces.length / 2 - 1 + endJoints(span);
+  const jointOff = jointCount > 0 ? Math.abs(mortar / jointCount - limits.joint.nominal) : 0;
+  return {
+    pieces,
+    joints,
+    closers,
+    innerClosers,
+    cuts: closers.length / 2,
+    faults: shortPieces + quoinClosers,
+    shortPieces,
+    endClosers,
+    jointOff,
+    clear,
+  };
+}
+
 /**
  * Lays `count` pieces, whole but for the closers, with equal joints: what is left of the span is shared out so that the
  * sum is exact and no joint differs from another by more than one tick.
  */
 export function layCourse(span: Span, count: number, closers: readonly Closer[], limits: BondLimits): CourseFill {
-  const { unit, joint } = limits;
-  const length = spanLength(span);
+  const { unit } = limits;
   const masonry = closers.reduce((sum, closer) => sum + closer.length - unit, count * unit);
   const jointCount = count - 1 + endJoints(span);
-  const mortar = length - masonry;
-  const share = (k: number) => (jointCount > 0 ? Math.round((mortar * k) / jointCount) : 0);
-
+  const mortar = spanLength(span) - masonry;
   const pieces: number[] = [];
-  const joints: number[] = [];
-  const cut: number[] = [];
-  let at = span.from.at;
+  let shared = 0;
   let k = 0;
-  const addJoint = (lapped: boolean) => {
-    const end = at + share(k + 1) - share(k);
-    if (lapped) joints.push(at, end);
-    at = end;
-    k += 1;
-  };
-  let shortPieces = 0;
-  let clear = 1 / 2;
-  let endClosers = 0;
   let next = 0;
-  if (span.from.joint) addJoint(span.from.lapped);
+  let at = span.from.at;
   for (let i = 0; i < count; i += 1) {
-    const closer = next < closers.length && closers[next]!.index === i ? closers[next++]! : null;
-    const size = closer ? closer.length : unit;
-    pieces.push(at, at + size);
-    if (closer) {
-      cut.push(at, at + size);
-      clear = Math.min(clear, (at - span.from.at) / length, (span.to.at - at - size) / length);
-      if (i === 0 || i === count - 1) endClosers += 1;
+    if (i > 0 || span.from.joint) {
+      k += 1;
+      const upTo = Math.round((mortar * k) / jointCount);
+      at += upTo - shared;
+      shared = upTo;
     }
-    if (size < limits.leastPiece) shortPieces += 1;
+    const size = next < closers.length && closers[next]!.index === i ? closers[next++]!.length : unit;
+    pieces.push(at, at + size);
     at += size;
-    if (i < count - 1) addJoint(true);
   }
-  if (span.to.joint) addJoint(span.to.lapped);
-  const jointOff = jointCount > 0 ? Math.abs(mortar / jointCount - joint.nominal) : 0;
-  return { pieces, joints, closers: cut, cuts: closers.length, shortPieces, endClosers, jointOff, clear };
+  return measureFill(span, pieces, limits);
 }

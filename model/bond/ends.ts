@@ -13,6 +13,8 @@ export interface CourseEnd {
   readonly lapped: boolean;
   /** Width of the other run's end seen on this face beyond `at`; 0 where none is. */
   readonly returnWidth: number;
+  /** The course's last unit here is the corner's own, which is never cut where it can be helped. */
+  readonly quoin: boolean;
 }
 
 /** An end in odd and in even courses. */
@@ -21,8 +23,8 @@ export type EndPair = readonly [CourseEnd, CourseEnd];
 /** At very blunt corners the end of the crossing run is cut on the skew, and shows no wider than this times its thickness. */
 const MOST_SKEW = 2;
 
-function plainEnd(at: number): CourseEnd {
-  return { at, joint: false, lapped: false, returnWidth: 0 };
+function plainEnd(at: number, quoin = false): CourseEnd {
+  return { at, joint: false, lapped: false, returnWidth: 0, quoin };
 }
 
 /** How wide a wall of `thickness` shows where it is cut by another face at `angle` degrees. */
@@ -42,12 +44,12 @@ export function endByKind(kind: EndKind, width: number, goesThrough: Parity, ste
     goesThrough === 0 ? [through, butt] : [butt, through];
   switch (kind) {
     case 'outside':
-      return pair(plainEnd(0), { at: width, joint: true, lapped: true, returnWidth: width });
+      return pair(plainEnd(0, true), { at: width, joint: true, lapped: true, returnWidth: width, quoin: false });
     case 'reentrant':
-      return pair(plainEnd(-width), { at: 0, joint: true, lapped: true, returnWidth: 0 });
+      return pair(plainEnd(-width, true), { at: 0, joint: true, lapped: true, returnWidth: 0, quoin: false });
     case 'teeStem':
     case 'cross': {
-      const butt = { at: stemAt, joint: true, lapped: false, returnWidth: 0 };
+      const butt = { at: stemAt, joint: true, lapped: false, returnWidth: 0, quoin: false };
       return [butt, butt];
     }
     case 'straight':

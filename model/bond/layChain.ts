@@ -38,7 +38,7 @@ export function layChain(task: ChainTask): { runs: RunBond[]; reasons: Reason[] 
   const end = farEnd(endInto, chain.length);
   const blocks = chain.length > 0 ? blocksOf(chain, walls, task.openings, task.heights, coursing) : [];
   const zones = chain.length > 0 && hasSpan(start, end) ? zonesOf(start, end, blocks, coursing) : [];
-  const laid = layZones(zones, limits, memo);
+  const laid = layZones(zones, { start, end }, limits, memo);
   const noCut = chain.length > 0 ? noCutBetween(start, endInto, chain.length, limits) : { below: null, above: null };
   const noCutOf = (length: number): NoCut => {
     const shift = (value: Ticks | null): Ticks | null => {

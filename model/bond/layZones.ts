@@ -44,7 +44,13 @@ function clip(list: readonly number[], from: number, to: number): number[] {
 function moveFill(fill: CourseFill, by: number): CourseFill {
   if (by === 0 || fill === EMPTY_FILL) return fill;
   const move = (list: readonly number[]) => list.map((value) => value + by);
-  return { ...fill, pieces: move(fill.pieces), joints: move(fill.joints), closers: move(fill.closers) };
+  return {
+    ...fill,
+    pieces: move(fill.pieces),
+    joints: move(fill.joints),
+    closers: move(fill.closers),
+    innerClosers: move(fill.innerClosers),
+  };
 }
 
 /** Solves a stretch once for all places where it is alike. */
@@ -55,20 +61,28 @@ function fillOnce(task: StretchTask, key: string, origin: number, limits: BondLi
     joints: task.below.joints.map((value) => value - origin),
     closers: task.below.closers.map((value) => value - origin),
   };
-  const whole = `${key}|${task.first}${task.both}|${below ? `${below.joints.join()};${below.closers.join()}` : ''}`;
-  let pair = memo.get(whole);
+  const full = `${key}|${task.first}${task.both}|${below ? `${below.joints.join()};${below.closers.join()}` : ''}`;
+  let pair = memo.get(full);
   if (!pair) {
-    pair = fillStretch({ ...task, spans: [moveSpan(task.spans[0]), moveSpan(task.spans[1])], below }, limits);
-    memo.set(whole, pair);
+    const { whole } = task;
+    const back = -origin;
+    const moved: StretchTask = {
+      ...task,
+      spans: [moveSpan(task.spans[0]), moveSpan(task.spans[1])],
+      below,
+      whole: whole && { ...whole, pair: [moveFill(whole.pair[0], back), moveFill(whole.pair[1], back)] },
+    };
+    pair = fillStretch(moved, limits);
+    memo.set(full, pair);
   }
   return [moveFill(pair[0], origin), moveFill(pair[1], origin)];
 }
 
-/** Joints and closers of one course across all stretches of a zone. */
+/** Joints and inner closers of one course across all stretches of a zone. */
 export function courseOf(laid: LaidZone, parity: Parity): Below {
   return {
     joints: laid.stretches.flatMap((stretch) => stretch.pair[parity].joints),
-    closers: laid.stretches.flatMap((stretch) => stretch.pair[parity].closers),
+    closers: laid.stretches.flatMap((stretch) => stretch.pair[parity].innerClosers),
   };
 }
 
@@ -76,23 +90,37 @@ export function parityOf(course: number): Parity {
   return course % 2 === 0 ? 0 : 1;
 }
 
+/** The bond of the chain from end to end, as if nothing interrupted it. */
+function layWhole(full: Stretch, limits: BondLimits, memo: FillMemo): FillPair {
+  const spans = spansOf(full);
+  const origin = Math.min(spans[0].from.at, spans[1].from.at);
+  const task: StretchTask = { spans, first: 0, both: true, below: null, whole: null };
+  return fillOnce(task, keyOfStretch(full, origin), origin, limits, memo);
+}
+
 /**
- * Lays zone over zone. A stretch that carries on from the zone below keeps its courses; a new one laps the course under it.
+ * Lays zone over zone from the bottom. A stretch that carries on from the zone below keeps its courses; a new one laps
+ * the course under it, and the bond of the whole chain, which closes over the openings again.
  */
-export function layZones(zones: readonly Zone[], limits: BondLimits, memo: FillMemo): LaidZone[] {
+export function layZones(zones: readonly Zone[], full: Stretch, limits: BondLimits, memo: FillMemo): LaidZone[] {
   const keys = zones.map((zone) => zone.stretches.map((stretch) => keyOfStretch(stretch, 0)));
+  const whole = zones.length > 0 ? layWhole(full, limits, memo) : null;
   const laid: LaidZone[] = [];
   zones.forEach((zone, z) => {
     const under = zone.startsLift ? null : (laid[z - 1] ?? null);
     const carried = new Map<string, LaidStretch>();
     under?.stretches.forEach((stretch, i) => carried.set(keys[z - 1]![i]!, stretch));
     const above = zones[z + 1];
+    const goesOn = above !== undefined && !above.startsLift;
     const first = parityOf(zone.firstCourse);
     const lower = under ? courseOf(under, parityOf(zone.firstCourse - 1)) : null;
     const stretches = zone.stretches.map((stretch, i): LaidStretch => {
       const key = keys[z]![i]!;
       const same = carried.get(key);
       if (same?.both) return same;
+      const atStart = stretch.start === full.start;
+      const atEnd = stretch.end === full.end;
+      if (atStart && atEnd && !lower && whole) return { stretch, both: true, pair: whole };
       const spans = spansOf(stretch);
       const origin = Math.min(spans[0].from.at, spans[1].from.at);
       const to = Math.max(spans[0].to.at, spans[1].to.at);
@@ -100,10 +128,11 @@ export function layZones(zones: readonly Zone[], limits: BondLimits, memo: FillM
         joints: clip(lower.joints, origin - limits.leastLap, to + limits.leastLap),
         closers: clip(lower.closers, origin, to),
       };
-      const carriesOn = above !== undefined && !above.startsLift && keys[z + 1]!.includes(key);
-      const both = zone.lastCourse > zone.firstCourse || carriesOn;
-      const task: StretchTask = { spans, first, both, below };
-      return { stretch, both, pair: fillOnce(task, keyOfStretch(stretch, origin), origin, limits, memo) };
+      const both = zone.lastCourse > zone.firstCourse || (goesOn && keys[z + 1]!.includes(key));
+      const keeps = whole && (goesOn || lower) ? { pair: whole, atStart, atEnd } : null;
+      const task: StretchTask = { spans, first, both, below, whole: keeps };
+      const kept = `${keyOfStretch(stretch, origin)}${keeps ? `|${keyOfStretch(full, origin)}` : ''}`;
+      return { stretch, both, pair: fillOnce(task, kept, origin, limits, memo) };
     });
     laid.push({ zone, stretches });
   });

@@ -84,7 +84,7 @@ export function blocksOf(
 }
 
 function edge(at: number, block: Block): EndPair {
-  const end: CourseEnd = { at, joint: block.lintel, lapped: false, returnWidth: 0 };
+  const end: CourseEnd = { at, joint: block.lintel, lapped: false, returnWidth: 0, quoin: false };
   return [end, end];
 }
 
