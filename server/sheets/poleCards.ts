@@ -4,13 +4,20 @@ import { poleFigure, usualGap } from '../../model/figures/pole';
 import { roundTicks } from '../../model/length/ticks';
 import type { StoryPole } from '../../model/poles/types';
 import { colours, paperLabelScale } from './ink';
-import { cardPaper, largestThatFits, type Area, type DrawingScale } from './paper';
+import { cardPaper, type Area } from './paper';
 import { printFigure } from './paperPrinter';
-import { drawingArea, type Sheet, type SheetSet } from './sheet';
+import {
+  CARD_HEADING,
+  drawHeadingRule,
+  drawingArea,
+  issueStyleOf,
+  issueText,
+  type Sheet,
+  type SheetSet,
+} from './sheet';
 import { measure, setLine, widthOf, type Doc } from './type';
 
 const STRIP = 120;
-const TITLE = 66;
 const HEAD = 22;
 const BRACE_LINE = 15;
 const LEAST_ROW = 11.5;
@@ -23,10 +30,10 @@ interface Card {
   readonly parts: number;
 }
 
-/** Room between the title and the lines about braces. */
+/** Room between the table's head and the lines about braces. */
 function tableRoom(area: Area, braces: number): Area {
   const below = braces > 0 ? braces * BRACE_LINE + 14 : 6;
-  return { ...area, y: area.y + TITLE + HEAD, height: area.height - TITLE - HEAD - below };
+  return { ...area, y: area.y + HEAD, height: area.height - HEAD - below };
 }
 
 /** A lift with more marks than a card has rows goes on over several cards, the lower part first. */
@@ -119,26 +126,27 @@ function columnsIn(area: Area): Columns {
   };
 }
 
+/** The pole's letter first, then where it belongs; at the right which issue this is, and the first mark. */
 function drawTitle(doc: Doc, set: SheetSet, card: Card, area: Area): void {
   const { marks } = card;
-  setLine(doc, set.say('sheets.poleTitle', { letter: marks.letter }), area.x, area.y + 36, {
-    font: 'numbersBold',
-    size: 46,
-  });
-  const lift = set.say('sheets.poleSubtitle', { letter: marks.letter, lift: marks.lift });
-  const part = card.parts > 1 ? `, ${set.say('sheets.polePart', { part: card.part, parts: card.parts })}` : '';
-  setLine(doc, `${lift}${part} · ${set.siteName}`, area.x, area.y + 54, { font: 'textMedium', size: 11.5 });
-  const first = marks.marks[marks.marks.length - 1];
-  if (!first) return;
+  const { say } = set;
+  const top = area.y - CARD_HEADING;
   const right = area.x + area.width;
-  const side = set.say(first.printed.fromLine <= 0 ? 'sheets.belowLine' : 'sheets.aboveLine');
-  setLine(doc, `${set.say('sheets.firstMark')}, ${side}`, right, area.y + 54, {
-    size: 10,
-    colour: colours.soft,
-    align: 'end',
-  });
+  setLine(doc, say('sheets.poleTitle', { letter: marks.letter }), area.x, top + 40, { font: 'numbersBold', size: 52 });
+  const lift = say('sheets.poleSubtitle', { letter: marks.letter, lift: marks.lift });
+  const part = card.parts > 1 ? `, ${say('sheets.polePart', { part: card.part, parts: card.parts })}` : '';
+  setLine(doc, `${lift}${part} · ${set.siteName}`, area.x, top + 60, { font: 'textMedium', size: 11.5 });
+  setLine(doc, issueText(set), right, top + 40, { ...issueStyleOf(set), align: 'end' });
+  drawHeadingRule(doc, area, top + 67);
+  const first = card.part === 1 ? marks.marks[marks.marks.length - 1] : undefined;
+  if (!first) return;
+  const side = say(first.printed.fromLine <= 0 ? 'sheets.belowLine' : 'sheets.aboveLine');
+  const words = { size: 11.5 } as const;
+  const sideWidth = setLine(doc, ` ${side}`, right, top + 60, { ...words, align: 'end' });
   const parts = measure(roundTicks(Math.abs(first.printed.fromLine)), set.tape, inchStyle(set));
-  setLine(doc, parts, right, area.y + 36, { font: 'numbersBold', size: 34, align: 'end' });
+  const bold = { font: 'numbersBold', size: 13.5 } as const;
+  const width = setLine(doc, parts, right - sideWidth, top + 60, { ...bold, align: 'end' });
+  setLine(doc, `${say('sheets.firstMark')} `, right - sideWidth - width, top + 60, { ...words, align: 'end' });
 }
 
 function drawHeadings(doc: Doc, set: SheetSet, room: Area, columns: Columns): void {
@@ -176,7 +184,7 @@ function drawBraces(doc: Doc, set: SheetSet, pole: StoryPole, area: Area): void 
   });
 }
 
-function cardSheet(set: SheetSet, card: Card, scale: DrawingScale, paper: Sheet['paper']): Sheet {
+function cardSheet(set: SheetSet, card: Card, scale: { readonly pointsPerTick: number }, paper: Sheet['paper']): Sheet {
   const { marks, pole } = card;
   const braces = marks.lift === 1 && pole ? pole.braces.length : 0;
   return {
@@ -184,11 +192,11 @@ function cardSheet(set: SheetSet, card: Card, scale: DrawingScale, paper: Sheet[
     lying: false,
     documentType: 'pole',
     title: `${set.say('sheets.poleTitle', { letter: marks.letter })}, ${set.say('sheets.poleSubtitle', { letter: marks.letter, lift: marks.lift })}`,
-    scale,
+    scale: null,
+    heading: (doc, area) => drawTitle(doc, set, card, area),
     draw(doc, area) {
       const room = tableRoom(area, braces);
       const columns = columnsIn(area);
-      drawTitle(doc, set, card, area);
       if (braces > 0 && pole) drawBraces(doc, set, pole, area);
       if (marks.marks.length === 0) {
         setLine(doc, set.say('sheets.noMarks'), room.x, room.y + 20, { size: 12, colour: colours.soft });
@@ -209,7 +217,12 @@ function cardSheet(set: SheetSet, card: Card, scale: DrawingScale, paper: Sheet[
       const top = (marks.marks[0]?.height ?? marks.head) * scale.pointsPerTick;
       const origin = room.y + rowHeight / 2 + top;
       printFigure(doc, figure, { x: left, y: origin, pointsPerTick: scale.pointsPerTick }, set.say);
-      const size = Math.min(15, rowHeight * 0.7);
+      doc.undash().lineWidth(0.4).strokeColor(colours.rule);
+      doc
+        .moveTo(area.x + STRIP, room.y)
+        .lineTo(area.x + area.width, room.y)
+        .stroke();
+      const size = Math.min(16, rowHeight * 0.74);
       for (const { mark, y } of rows) {
         const at = origin - y * scale.pointsPerTick;
         doc.undash().lineWidth(0.4).strokeColor(colours.rule);
@@ -233,12 +246,13 @@ function drawLevelName(doc: Doc, set: SheetSet, y: number, area: Area): void {
 /** Cards in the order of the poles, each pole's lifts from the bottom up. */
 export function poleCards(set: SheetSet): Sheet[] {
   const paper = cardPaper(set.paper);
-  const room = tableRoom(drawingArea(paper, false), 2);
+  const room = tableRoom(drawingArea(paper, false, CARD_HEADING), 2);
   const most = Math.max(1, Math.floor(room.height / LEAST_ROW) - 3);
   const cards = set.setOut.marks.poles.flatMap((marks) => cardsOf(set, marks, most));
   return cards.map((card) => {
-    const tall = heightOf(card.marks);
-    const scale = largestThatFits(set.drawing.units, (each) => tall * each.pointsPerTick + MOST_ROW / 2 <= room.height);
+    // The strip fills the card, so that its rows are as large as they can be; a single mark needs no more than a row.
+    const fill = (room.height - LEAST_ROW) / Math.max(1, heightOf(card.marks));
+    const scale = { pointsPerTick: Math.min(fill, MOST_ROW / usualGap(card.marks)) };
     return cardSheet(set, card, scale, paper);
   });
 }

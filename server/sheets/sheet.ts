@@ -37,8 +37,10 @@ export interface Sheet {
   readonly lying: boolean;
   readonly documentType: 'plan' | 'elevation' | 'pole';
   readonly title: string;
-  /** Null where nothing on the sheet is to one scale. */
+  /** The scale that its drawing is true to; null on a card, whose strip fills the card. */
   readonly scale: DrawingScale | null;
+  /** A sheet with its own heading; the others have their title. */
+  readonly heading?: (doc: Doc, area: Area) => void;
   draw(doc: Doc, area: Area): void;
 }
 
@@ -47,25 +49,16 @@ const BLOCK_ROW = 25;
 const CAUTION_SIZE = 7.2;
 const CAUTION_LEADING = 8.8;
 const HEADING = 34;
+/** A card's heading is read at arm's length. */
+export const CARD_HEADING = 74;
+/** Two rows of fields and three lines of cautions. */
+const BLOCK_HEIGHT = 2 * BLOCK_ROW + 3 * CAUTION_LEADING + 12;
 
-/** The part of a sheet left for its drawing. Cautions take three lines on narrow sheets, two on wide ones. */
-export function drawingArea(paper: Paper, lying: boolean): Area {
+/** The part of a sheet left for its drawing, under a heading of this height. */
+export function drawingArea(paper: Paper, lying: boolean, heading = HEADING): Area {
   const size = sizeOf(paper, lying);
-  const top = MARGIN + HEADING;
-  return {
-    x: MARGIN,
-    y: top,
-    width: size.width - 2 * MARGIN,
-    height: size.height - MARGIN - blockHeight(size.width) - top,
-  };
-}
-
-function blockHeight(width: number): number {
-  return 2 * BLOCK_ROW + cautionLines(width) * CAUTION_LEADING + 14;
-}
-
-function cautionLines(width: number): number {
-  return width < 700 ? 5 : 4;
+  const top = MARGIN + heading;
+  return { x: MARGIN, y: top, width: size.width - 2 * MARGIN, height: size.height - MARGIN - BLOCK_HEIGHT - top };
 }
 
 /** The day of an ISO date and time, in UTC, as it is said: 12 November 2026. */
@@ -86,20 +79,32 @@ function identification(set: SheetSet, number: number): string {
   return `${initials || 'S'}-${set.revision ? `R${set.revision.number}` : 'DRAFT'}-${String(number).padStart(2, '0')}`;
 }
 
+/** The revision and its day, or that this is a draft. */
+export function issueText(set: SheetSet): string {
+  if (!set.revision) return set.say('sheets.draft');
+  return `${set.say('sheets.revision', { number: set.revision.number })} · ${dayOf(set.revision.savedAt)}`;
+}
+
+export function issueStyleOf(set: SheetSet): { font: 'textBold'; size: number; colour: string } {
+  return { font: 'textBold', size: 10, colour: set.revision ? colours.ink : colours.caution };
+}
+
 function drawHeading(doc: Doc, set: SheetSet, sheet: Sheet, area: Area): void {
   const right = area.x + area.width;
-  const issue = set.revision
-    ? `${set.say('sheets.revision', { number: set.revision.number })} · ${dayOf(set.revision.savedAt)}`
-    : set.say('sheets.draft');
-  const issueStyle = { font: 'textBold', size: 10, colour: set.revision ? colours.ink : colours.caution } as const;
+  const issue = issueText(set);
+  const issueStyle = issueStyleOf(set);
   const issueWidth = widthOf(doc, issue, issueStyle);
   const title = { font: 'textBold', size: 17 } as const;
   setLine(doc, fitted(doc, sheet.title, area.width - issueWidth - 24, title), area.x, MARGIN + 16, title);
   setLine(doc, issue, right, MARGIN + 16, { ...issueStyle, align: 'end' });
+  drawHeadingRule(doc, area, MARGIN + 24);
+}
+
+export function drawHeadingRule(doc: Doc, area: Area, y: number): void {
   doc.undash().lineWidth(1.2).strokeColor(colours.ink);
   doc
-    .moveTo(area.x, MARGIN + 24)
-    .lineTo(right, MARGIN + 24)
+    .moveTo(area.x, y)
+    .lineTo(area.x + area.width, y)
     .stroke();
 }
 
@@ -183,9 +188,10 @@ function drawBlock(doc: Doc, set: SheetSet, sheet: Sheet, area: Area, number: nu
 export function drawSheet(doc: Doc, set: SheetSet, sheet: Sheet, number: number, total: number): void {
   const size = sizeOf(sheet.paper, sheet.lying);
   doc.addPage({ size: [size.width, size.height], margin: 0 });
-  const area = drawingArea(sheet.paper, sheet.lying);
+  const area = drawingArea(sheet.paper, sheet.lying, sheet.heading ? CARD_HEADING : HEADING);
   if (!set.revision) drawDraftLine(doc, set, area);
   sheet.draw(doc, area);
-  drawHeading(doc, set, sheet, area);
+  if (sheet.heading) sheet.heading(doc, area);
+  else drawHeading(doc, set, sheet, area);
   drawBlock(doc, set, sheet, area, number, total);
 }

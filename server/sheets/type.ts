@@ -40,9 +40,11 @@ export interface TypeStyle {
 const plain = (text: string): TypePart[] => [{ text, fraction: false }];
 const featuresOf = (part: TypePart): ('frac' | 'tnum' | 'kern')[] => (part.fraction ? ['frac'] : ['tnum', 'kern']);
 
-/** A measurement ready to be set. */
+/** A measurement ready to be set. The PDF writer makes a fraction of figures round a fraction slash only. */
 export function measure(length: Ticks, tape: Tape, style?: LengthStyle): TypePart[] {
-  return typesetMeasure(length, tape, style);
+  return typesetMeasure(length, tape, style).map((part) =>
+    part.fraction ? { ...part, text: part.text.replace('/', '\u2044') } : part,
+  );
 }
 
 /** Width of a text in points. */
