@@ -3,6 +3,21 @@ import type { PlanPoint } from '../../model/geometry/point';
 import type { Ticks } from '../../model/length/ticks';
 import type { PointerKind } from '../input/events';
 
+/** What a point caught, as words under `plan.caught`. */
+export type CaughtWord =
+  | 'corner'
+  | 'close'
+  | 'run'
+  | 'square'
+  | 'angle'
+  | 'inLine'
+  | 'noCut'
+  | 'middle'
+  | 'end'
+  | 'units'
+  | 'opening'
+  | 'back';
+
 /** A run being drawn: pale and dashed until it is placed. */
 export interface RunPreview {
   readonly from: PlanPoint;
@@ -23,8 +38,7 @@ export interface Preview {
   readonly guides: readonly (readonly [PlanPoint, PlanPoint])[];
   /** Where the point stands, after snapping. */
   readonly at: PlanPoint | null;
-  /** What it caught: a dictionary key, or null. */
-  readonly caught: string | null;
+  readonly caught: CaughtWord | null;
   /** The finger or pen that the numbers keep clear of. */
   readonly pointer: PointerKind;
   /** A length that the drag is changing, to ride beside it. */

@@ -1,11 +1,12 @@
 /** The model's edits as the tools use them, and the few look-ups that go with them. */
 import { addRun, type EndPlace } from '../../model/drawing/edits/addRun';
 import { standInside } from '../../model/drawing/edits/closeLoop';
-import { findCorner, runWithCorners, type NewId } from '../../model/drawing/edits/find';
+import { findCorner, otherEnd, runWithCorners, type NewId } from '../../model/drawing/edits/find';
 import type { Corner, Drawing, Opening } from '../../model/drawing/schema';
 import type { PlanPoint, Vec } from '../../model/geometry/point';
 import { distance, perp, sub, unit } from '../../model/geometry/vec';
 import { roundTicks, type Ticks } from '../../model/length/ticks';
+import type { SnapAnchor } from '../../model/snapping/types';
 
 export function cornerById(drawing: Drawing, id: string): Corner | null {
   return findCorner(drawing, id) ?? null;
@@ -43,4 +44,31 @@ export function drawRun(
   const drawn = addRun(drawing, { from, to, wallTypeId }, newId);
   const closes = drawn !== drawing && to.kind === 'corner' && to.cornerId === chainStart;
   return closes ? standInside(drawn, to.cornerId) : drawn;
+}
+
+/** Directions of the runs at a corner, away from it. */
+export function directionsAt(drawing: Drawing, cornerId: string | null): Vec[] {
+  const here = cornerId === null ? null : cornerById(drawing, cornerId);
+  if (!here) return [];
+  return drawing.runs.flatMap((run) => {
+    if (run.from !== here.id && run.to !== here.id) return [];
+    const there = cornerById(drawing, otherEnd(run, here.id));
+    return there ? [unit(sub(there, here))] : [];
+  });
+}
+
+/** What a corner being moved is held by: its neighbours, each with its other runs, and the ids that move with it. */
+export function neighboursOf(
+  drawing: Drawing,
+  cornerId: string,
+): { anchors: SnapAnchor[]; moving: ReadonlySet<string> } {
+  const runs = drawing.runs.filter((run) => run.from === cornerId || run.to === cornerId);
+  const moved = new Set(runs.map((run) => run.id));
+  const anchors = runs.flatMap((run) => {
+    const there = cornerById(drawing, otherEnd(run, cornerId));
+    if (!there) return [];
+    const rest = { ...drawing, runs: drawing.runs.filter((one) => !moved.has(one.id)) };
+    return [{ point: { x: there.x, y: there.y }, along: directionsAt(rest, there.id) }];
+  });
+  return { anchors, moving: new Set([cornerId, ...moved]) };
 }

@@ -16,13 +16,12 @@ export function createKeepClearTool(host: ToolHost): Tool {
 
   function caughtAt(event: StrokeEvent): Caught {
     const points = state.name === 'outlining' ? state.points : [];
+    const last = points.at(-1);
     return host.catchPoint(event.plan, {
       reach: host.reach(event.pointer),
       snapping: draft.get().snapping && !event.modifiers.alt,
-      from: points.at(-1) ?? null,
-      before: null,
-      without: [],
-      also: points.slice(0, 1),
+      from: last ? { point: last } : null,
+      points: points.length >= 3 ? points.slice(0, 1) : [],
     });
   }
 

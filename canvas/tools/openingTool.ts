@@ -39,11 +39,9 @@ export function createOpeningTool(host: ToolHost, kind: OpeningKind): Tool {
     const line = runLine(asBegun, runId);
     if (!line) return;
     const along = (event.plan.x - line.from.x) * line.direction.x + (event.plan.y - line.from.y) * line.direction.y;
-    const wanted = along - width / 2;
     const snapping = draft.get().snapping && !event.modifiers.alt;
-    const caught = snapping
-      ? host.catchAlong(runId, wanted, width, host.reach(event.pointer), id)
-      : { at: roundTicks(wanted), word: null };
+    const reach = host.reach(event.pointer);
+    const caught = host.catchOpening({ runId, raw: along - width / 2, width, reach, snapping, openingId: id });
     const at = roundTicks(Math.max(0, Math.min(line.length - width, caught.at)));
     draft.update((d) => addOpening(d, { kind, runId, at }, () => id));
     const place = { x: roundTicks(event.plan.x), y: roundTicks(event.plan.y) };

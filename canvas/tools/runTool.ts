@@ -8,7 +8,7 @@ import { distance, samePoint, sub, unit } from '../../model/geometry/vec';
 import { roundTicks, type Ticks } from '../../model/length/ticks';
 import { DOUBLE_TAP_TIME, isDrag, type PointerKind, type StrokeEvent } from '../input/events';
 import { EMPTY_PREVIEW } from '../store/preview';
-import { cornerById, drawRun } from './edits';
+import { cornerById, directionsAt, drawRun } from './edits';
 import { aimedEnd, angleTo, firstAim, type RunAim } from './runDirection';
 import type { Caught, RunTool, ToolHost } from './tool';
 
@@ -49,16 +49,12 @@ export function createRunTool(host: ToolHost): RunTool {
   }
 
   function caughtAt(event: StrokeEvent, chain: Chain | null): Caught {
-    const first = chain?.corners[0];
-    const firstCorner =
-      first === undefined || !chain || chain.corners.length < 3 ? null : cornerById(draft.get().drawing, first);
+    const { drawing, snapping } = draft.get();
     return host.catchPoint(event.plan, {
       reach: host.reach(event.pointer),
-      snapping: draft.get().snapping && !event.modifiers.alt,
-      from: chain?.at ?? null,
-      before: chain && beforeOf(chain),
-      without: chain?.corners.slice(-1) ?? [],
-      also: firstCorner ? [{ x: firstCorner.x, y: firstCorner.y }] : [],
+      snapping: snapping && !event.modifiers.alt,
+      from: chain && { point: chain.at, along: directionsAt(drawing, chain.corners.at(-1) ?? null) },
+      closes: chain && chain.corners.length >= 3 ? chain.corners[0] : undefined,
     });
   }
 

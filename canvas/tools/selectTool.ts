@@ -6,11 +6,11 @@ import { slideRun } from '../../model/drawing/edits/slideRun';
 import type { Drawing } from '../../model/drawing/schema';
 import type { PlanPoint } from '../../model/geometry/point';
 import { add, distance, dot, sub } from '../../model/geometry/vec';
-import { roundTicks, type Ticks } from '../../model/length/ticks';
+import { roundTicks, roundToStep, type Ticks } from '../../model/length/ticks';
 import type { ThingRef } from '../../model/things';
 import { isDrag, type StrokeEvent } from '../input/events';
 import { EMPTY_PREVIEW } from '../store/preview';
-import { cornerById, openingById, runLine } from './edits';
+import { cornerById, neighboursOf, openingById, runLine } from './edits';
 import type { Tool, ToolHost } from './tool';
 
 type Grip =
@@ -63,14 +63,13 @@ export function createSelectTool(host: ToolHost): Tool {
     const reach = host.reach(event.pointer);
     const shown = { ...EMPTY_PREVIEW, pointer: event.pointer };
     if (grip.kind === 'corner' || grip.kind === 'point') {
-      const without = grip.kind === 'corner' ? [grip.id] : [];
+      const held = grip.kind === 'corner' ? neighboursOf(asBegun, grip.id) : null;
       const caught = host.catchPoint(add(grip.from, delta), {
         reach,
         snapping,
-        from: null,
-        before: null,
-        without,
-        also: [],
+        from: held?.anchors[0] ?? null,
+        also: held?.anchors.slice(1),
+        without: held?.moving,
       });
       draft.update((d) =>
         grip.kind === 'corner'
@@ -81,22 +80,21 @@ export function createSelectTool(host: ToolHost): Tool {
     } else if (grip.kind === 'run') {
       const line = runLine(asBegun, grip.id);
       if (!line) return;
-      const by = toStep(dot(delta, line.inward), asBegun.tapeStep, snapping);
+      const { at: by, word } = host.catchSlide({ runId: grip.id, raw: dot(delta, line.inward), reach, snapping });
       draft.update((d) => slideRun(d, grip.id, by));
       const at = { x: roundTicks(event.plan.x), y: roundTicks(event.plan.y) };
-      draft.setPreview({ ...shown, at, length: roundTicks(Math.abs(by)) });
+      draft.setPreview({ ...shown, at, caught: word, length: roundTicks(Math.abs(by)) });
     } else if (grip.kind === 'opening') {
       const line = runLine(asBegun, grip.runId);
       if (!line) return;
-      const wanted = grip.at + dot(delta, line.direction);
-      const caught = snapping
-        ? host.catchAlong(grip.runId, wanted, grip.width, reach, grip.id)
-        : { at: toStep(wanted, asBegun.tapeStep, true), word: null };
+      const raw = grip.at + dot(delta, line.direction);
+      const { runId, width, id: openingId } = grip;
+      const caught = host.catchOpening({ runId, raw, width, reach, snapping, openingId });
       draft.update((d) => moveOpening(d, grip.id, grip.runId, caught.at));
       const at = { x: roundTicks(event.plan.x), y: roundTicks(event.plan.y) };
       draft.setPreview({ ...shown, at, caught: caught.word, length: caught.at });
     } else {
-      const by = { x: toStep(delta.x, asBegun.tapeStep, true), y: toStep(delta.y, asBegun.tapeStep, true) };
+      const by = { x: roundToStep(delta.x, asBegun.tapeStep), y: roundToStep(delta.y, asBegun.tapeStep) };
       draft.update((d) => moveKeepClear(d, grip.id, by));
       draft.setPreview(shown);
     }
@@ -155,8 +153,4 @@ export function createSelectTool(host: ToolHost): Tool {
     },
     stateName: () => state.name,
   };
-}
-
-function toStep(value: number, step: Ticks, on: boolean): Ticks {
-  return on ? roundTicks(roundTicks(value / step) * step) : roundTicks(value);
 }

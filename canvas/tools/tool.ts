@@ -1,9 +1,11 @@
 /** What every drawing tool is: a small state chart fed with events, that changes the draft and says what to show. */
 import type { PlanPoint, Vec } from '../../model/geometry/point';
+import type { SnapAnchor } from '../../model/snapping/types';
 import type { Ticks } from '../../model/length/ticks';
 import type { ThingRef } from '../../model/things';
 import type { InputEvent, PointerKind } from '../input/events';
 import type { DraftStore } from '../store/draftStore';
+import type { CaughtWord } from '../store/preview';
 
 /** What a point caught, and how to show it. */
 export interface Caught {
@@ -14,7 +16,7 @@ export interface Caught {
   readonly onRun: { readonly runId: string; readonly at: Ticks } | null;
   readonly guides: readonly (readonly [PlanPoint, PlanPoint])[];
   /** A dictionary key under `plan.caught`; null when it caught nothing. */
-  readonly word: string | null;
+  readonly word: CaughtWord | null;
 }
 
 export interface CatchOptions {
@@ -22,14 +24,22 @@ export interface CatchOptions {
   readonly reach: number;
   /** Off: the point only falls on the tape's step. */
   readonly snapping: boolean;
-  /** Where the run being drawn or the corner being moved is held from. */
-  readonly from: PlanPoint | null;
-  /** Direction of the run that it goes on from. */
-  readonly before: Vec | null;
-  /** Corners that are being moved and so catch nothing. */
-  readonly without: readonly string[];
-  /** Points caught besides the drawing's own: the first point of an outline. */
-  readonly also: readonly PlanPoint[];
+  /** Where the run being drawn is held from, with the runs that are there already. */
+  readonly from: SnapAnchor | null;
+  /** Neighbours of a corner being moved. */
+  readonly also?: readonly SnapAnchor[];
+  /** Corners and runs that move with the point and so catch nothing. */
+  readonly without?: ReadonlySet<string>;
+  /** A corner that would close the chain being drawn. */
+  readonly closes?: string;
+  /** Points that catch besides corners: the first of an outline. */
+  readonly points?: readonly PlanPoint[];
+}
+
+/** Where an opening's near jamb stops along its run, or a run that is slid sideways. */
+export interface CaughtAlong {
+  readonly at: Ticks;
+  readonly word: CaughtWord | null;
 }
 
 /** What a tool may ask of the world. */
@@ -39,14 +49,21 @@ export interface ToolHost {
   reach(pointer: PointerKind): number;
   hit(at: Vec, reach: number): ThingRef | null;
   catchPoint(at: Vec, options: CatchOptions): Caught;
-  /** An opening's distance from the run's first corner, caught by whole units, jambs and the tape's step. */
-  catchAlong(
-    runId: string,
-    at: number,
-    width: Ticks,
-    reach: number,
-    openingId: string | null,
-  ): { at: Ticks; word: string | null };
+  catchOpening(of: {
+    readonly runId: string;
+    readonly raw: number;
+    readonly width: Ticks;
+    readonly reach: number;
+    readonly snapping: boolean;
+    readonly openingId: string;
+  }): CaughtAlong;
+  /** A run slid sideways by so much, to the side of its body. */
+  catchSlide(of: {
+    readonly runId: string;
+    readonly raw: number;
+    readonly reach: number;
+    readonly snapping: boolean;
+  }): CaughtAlong;
   newId(): string;
 }
 
