@@ -28,7 +28,10 @@ export function ThemeProvider({ children }: { children: ReactNode }) {
     const root = globalThis.document?.documentElement;
     if (!root) return;
     const { colours } = themes[name];
+    // What only a style sheet can say, focus and hover, takes its colours from here.
     root.style.setProperty('--ground', colours.ground);
+    root.style.setProperty('--surface', colours.surface);
+    root.style.setProperty('--hover', colours.hover);
     root.style.setProperty('--focus', colours.focus);
     root.style.backgroundColor = colours.ground;
     document.querySelector('meta[name="theme-color"]')?.setAttribute('content', colours.surface);

@@ -29,7 +29,6 @@ export function SiteRow({ site }: { site: SiteSummary }) {
         borderBottomWidth: strokes.hair,
         borderBottomColor: colours.rule,
         borderStyle: 'solid',
-        backgroundColor: colours.surface,
       }}
     >
       <View

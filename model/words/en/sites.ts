@@ -62,5 +62,7 @@ export const sites = {
     noRevisions: 'Save a revision first: sheets for the wall are printed from a revision.',
     screen: 'Screen',
     rules: 'Cautions',
+    openPdf: 'Open {{name}} as PDF',
+    setAside: 'Set aside',
   },
 } as const;

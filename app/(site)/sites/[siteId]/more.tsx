@@ -1,0 +1,7 @@
+import { useLocalSearchParams } from 'expo-router';
+import { MoreScreen } from '../../../../canvas/panels/more/MoreScreen';
+
+export default function MoreRoute() {
+  const { siteId } = useLocalSearchParams<{ siteId: string }>();
+  return <MoreScreen siteId={siteId} />;
+}

@@ -1,0 +1,7 @@
+import { useLocalSearchParams } from 'expo-router';
+import { RevisionsScreen } from '../../../../../canvas/panels/revisions/RevisionsScreen';
+
+export default function RevisionsRoute() {
+  const { siteId } = useLocalSearchParams<{ siteId: string }>();
+  return <RevisionsScreen siteId={siteId} />;
+}
