@@ -70,8 +70,12 @@ export function drawElevationUnits(context: ElevationContext): void {
   const crosses: PlanPoint[][] = [];
   setOut.coursing.courses.forEach((course, i) => {
     for (const piece of bond?.patterns[bond.patternByCourse[i] ?? -1]?.pieces ?? []) {
-      boxes[piece.kind].push([piece.start, course.bottom, piece.end - piece.start, course.top - course.bottom]);
-      if (piece.kind === 'closer') crosses.push([place(piece.start, course.bottom), place(piece.end, course.top)]);
+      // Where a run ends in a reentrant corner its units go on behind the other wall's face, out of sight.
+      const start = Math.max(0, piece.start);
+      const end = Math.min(run.length, piece.end);
+      if (end <= start) continue;
+      boxes[piece.kind].push([start, course.bottom, end - start, course.top - course.bottom]);
+      if (piece.kind === 'closer') crosses.push([place(start, course.bottom), place(end, course.top)]);
     }
   });
   const thing = { kind: 'run', id: run.runId } as const;
