@@ -107,6 +107,8 @@ export function roleStyle(role: Role, emphasis: Emphasis | undefined, theme: Fig
       if (role === 'way') return { ...style, stroke: colours.caution };
       return { ...style, stroke: colours.caution, width: style.width * 1.6, dash: '6 3' };
     case 'quiet':
+      // The far leg of a steel angle, lighter than the near one.
+      if (role === 'pole') return { ...style, fill: colours.steelLight, stroke: NONE };
       return { ...style, stroke: style.stroke === NONE ? NONE : colours.rule, text: colours.inkSoft };
     default:
       return style;
