@@ -19,7 +19,7 @@ const AUTH_TRIES = { most: 60, minutes: 10 };
 const AUTH_BODY_LIMIT = '16kb';
 
 function mountAuth(app: Express, deps: Deps): void {
-  const limit = limitTries(deps.env.NODE_ENV === 'test' ? { most: 10_000, minutes: 10 } : AUTH_TRIES);
+  const limit = limitTries(deps.env, AUTH_TRIES);
   app.use('/api/auth', (req, res, next) => (req.method === 'GET' ? next() : limit(req, res, next)));
   // Read here, so that a body that is too long or not JSON is refused in our own words; better-auth takes it as read.
   app.all('/api/auth/{*any}', express.json({ limit: AUTH_BODY_LIMIT }), handleAuth(deps.auth));

@@ -2,6 +2,7 @@
 import { draftRoutes } from './drawings/draftRoutes';
 import { revisionRoutes } from './drawings/revisionRoutes';
 import { setAsideRoutes } from './drawings/setAsideRoutes';
+import { sheetRoutes } from './drawings/sheetRoutes';
 import { solveRoutes } from './drawings/solveRoutes';
 import { metaRoutes } from './http/metaRoutes';
 import type { Route } from './http/route';
@@ -18,6 +19,7 @@ export const routes: readonly Route[] = [
   ...draftRoutes,
   ...setAsideRoutes,
   ...revisionRoutes,
+  ...sheetRoutes,
   ...solveRoutes,
   ...mailRoutes,
 ];

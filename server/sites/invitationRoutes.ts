@@ -46,7 +46,7 @@ export const invitationRoutes: readonly Route[] = [
     answer: invitationSchema,
     status: 201,
     refusals: [409, 429],
-    before: ({ env }) => limitTries({ most: env.NODE_ENV === 'test' ? 1000 : 60, minutes: 60 }),
+    before: ({ env }) => limitTries(env, { most: 60, minutes: 60 }),
     handle: async ({ deps, site, person, body }) => {
       const { email, role } = body;
       if (await isMember(deps.db, site.id, email)) {
@@ -92,7 +92,7 @@ export const invitationRoutes: readonly Route[] = [
     params: tokenParams,
     answer: invitationViewSchema,
     refusals: [429],
-    before: ({ env }) => limitTries({ most: env.NODE_ENV === 'test' ? 1000 : 120, minutes: 15 }),
+    before: ({ env }) => limitTries(env, { most: 120, minutes: 15 }),
     handle: async ({ deps, params }) => {
       const found = await findInvitation(deps.db, hashToken(params.token));
       if (found === null) throw new Failure('notFound', word('server.notFound'));
@@ -108,7 +108,7 @@ export const invitationRoutes: readonly Route[] = [
     params: tokenParams,
     answer: acceptedSchema,
     refusals: [403, 409, 410, 429],
-    before: ({ env }) => limitTries({ most: env.NODE_ENV === 'test' ? 1000 : 60, minutes: 15 }),
+    before: ({ env }) => limitTries(env, { most: 60, minutes: 15 }),
     handle: async ({ deps, params, person }) => {
       const acceptance = await acceptInvitation(deps.db, {
         tokenHash: hashToken(params.token),
