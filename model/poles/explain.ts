@@ -1,6 +1,7 @@
 /** Why a brace had to turn, and why a pole can't be braced: the obstacle, and what would free it. */
 import type { Door, Drawing } from '../drawing/schema';
 import { boxAround } from '../geometry/box';
+import type { Vec } from '../geometry/point';
 import { negate } from '../geometry/vec';
 import { roundTicks, ticks } from '../length/ticks';
 import type { Reason } from '../reasons';
@@ -13,17 +14,28 @@ import { cheapestPair, poleBraces, type PoleSite } from './pairs';
 import { stepFrom } from './plane';
 import { standAt } from './section';
 
-/** What stands where a brace would go if it were not turned; null where nothing fixed does. */
-export function turnedFor(site: PoleSite, candidate: Candidate, which: 0 | 1, ground: Ground): ThingRef | null {
-  if (candidate.turned === 0) return null;
-  const ideals = idealsAt(site.seat)[which];
-  const ideal = ideals.find((each) => each.alongFace === candidate.alongFace) ?? ideals[0];
-  if (!ideal) return null;
-  const foot = stepFrom(site.at, [ideal.bearing, candidate.reach]);
+/** What refuses a brace straight along one ideal bearing: an opening before a wall; null where nothing fixed does. */
+function refusal(site: PoleSite, bearing: Vec, reach: number, ground: Ground): ThingRef | null {
+  const foot = stepFrom(site.at, [bearing, reach]);
   const tried = tryBrace({ from: site.at, foot }, site.poleId, site.kit, ground, true);
   if (tried.free) return null;
-  const openings = tried.refusedBy.find((obstacle) => obstacle.thing.kind === 'opening');
-  return (openings ?? tried.refusedBy[0])?.thing ?? { kind: 'boundary', id: 'boundary' };
+  const opening = tried.refusedBy.find((obstacle) => obstacle.thing.kind === 'opening');
+  return (opening ?? tried.refusedBy[0])?.thing ?? { kind: 'boundary', id: 'boundary' };
+}
+
+/**
+ * What made a brace turn: the thing that stands where it would go straight, away from its wall; or, where only the walls
+ * of its own corner do (in an angle they always do), what stands where it would go straight toward its wall.
+ */
+export function turnedFor(site: PoleSite, candidate: Candidate, which: 0 | 1, ground: Ground): ThingRef | null {
+  if (candidate.turned === 0) return null;
+  const own = new Set(site.seat.faces.map((face) => face.runId));
+  const ideals = idealsAt(site.seat)[which];
+  const away = ideals.find((each) => !each.alongFace);
+  const refused = away ? refusal(site, away.bearing, candidate.reach, ground) : null;
+  if (!candidate.alongFace || (refused && !(refused.kind === 'run' && own.has(refused.id)))) return refused;
+  const toward = ideals.find((each) => each.alongFace);
+  return toward ? refusal(site, toward.bearing, candidate.reach, ground) : null;
 }
 
 /** Coarse enough to ask "what if" for every obstacle near a pole. */

@@ -59,8 +59,9 @@ function standAll(drawing: Drawing, walls: Walls, ground: Ground, reasons: Reaso
         amount: short,
         change: { kind: 'move', thing: opening, by: short },
       });
-    if (standing.blockedBy.length > 0)
-      reasons.push({ code: 'poleBlocked', weight: 'blocked', thing: poleRef(seat.id), against: standing.blockedBy });
+    const named = new Set(standing.frames.map(({ opening }) => opening.id));
+    const against = standing.blockedBy.filter((thing) => !named.has(thing.id));
+    if (against.length > 0) reasons.push({ code: 'poleBlocked', weight: 'blocked', thing: poleRef(seat.id), against });
     return { seat, standing };
   });
 }
@@ -116,6 +117,7 @@ interface Search {
 /** Sites in an order that the drawing's lists don't change, each with the angle limits that it can keep. */
 function searchAll(
   drawing: Drawing,
+  walls: Walls,
   stood: readonly Stood[],
   ground: Ground,
   options: PoleOptions,
@@ -146,8 +148,8 @@ function searchAll(
       if (cheapestPair(strict)) return strict;
       const loose = { ...strict, limits: LOOSE_ANGLES };
       if (!cheapestPair(loose)) return strict;
-      const thing = poleRef(seat.id);
-      reasons.push({ code: 'braceAngleOut', weight: 'warning', thing, rule: 'braceAngleLeast' });
+      const why = whyBlocked(drawing, walls, site, ground);
+      reasons.push({ ...why, code: 'braceAngleOut', weight: 'warning', rule: 'braceAngleLeast' });
       return loose;
     });
   return { sites, poles, placed: placeBraces(poles, kit.clearance, options.bound) };
@@ -222,7 +224,7 @@ export function placePoles(drawing: Drawing, walls: Walls, options: PoleOptions 
   const stood = standAll(drawing, walls, groundOf(fixed, drawing.boundary), reasons);
   const poleObstacles = stood.map(({ seat, standing }) => obstacleOf('pole', poleRef(seat.id), standing.ring));
   const ground = groundOf([...fixed, ...poleObstacles], drawing.boundary);
-  const search = searchAll(drawing, stood, ground, options, reasons);
+  const search = searchAll(drawing, walls, stood, ground, options, reasons);
   const braces = search ? bracesByPole(drawing, walls, search, ground, reasons) : new Map<string, readonly Brace[]>();
   const poles = stood.map((each) => storyPole(each, each.seat.vertex, braces.get(each.seat.id) ?? []));
   const idsOf = (group: readonly number[]) => group.flatMap((i) => search?.sites[i]?.poleId ?? []);
