@@ -46,12 +46,21 @@ function joinedTo(plan: Plan, start: string, run: WallRun): ReadonlySet<string> 
   return reached;
 }
 
+/** Which runs in line with a move give way to it: any of them, or those long enough not to turn back on themselves. */
+type GivesWay = 'any' | 'longEnough';
+
 /**
  * The corners carried along when one side of a closed outline grows: from the far end on, through every run that is not
- * in line with the move. Runs in line with it stretch instead, unless that would turn them back on themselves. Null where
- * the kept corner would be carried too.
+ * in line with the move or can't give way to it; the others stretch or shorten. Null where the kept corner would be
+ * carried too.
  */
-function carriedAlong(plan: Plan, run: WallRun, far: string, kept: string, shift: Vec): ReadonlySet<string> | null {
+function carriedAlong(
+  plan: Plan,
+  run: WallRun,
+  [kept, far]: readonly [string, string],
+  shift: Vec,
+  givesWay: GivesWay,
+): ReadonlySet<string> | null {
   const direction = unit(shift);
   const carried = new Set<string>([far]);
   const waiting = [far];
@@ -66,7 +75,7 @@ function carriedAlong(plan: Plan, run: WallRun, far: string, kept: string, shift
       const away = directionFrom(plan, other, id);
       // The near end of the stretching run moves towards its far end by this much.
       const shortens = dot(shift, away);
-      if (areInLine(away, direction) && shortens < distance(here, there)) continue;
+      if (areInLine(away, direction) && (givesWay === 'any' || shortens < distance(here, there))) continue;
       if (next === kept) return null;
       carried.add(next);
       waiting.push(next);
@@ -84,8 +93,11 @@ function moveFarEnd(drawing: Drawing, run: WallRun, keep: KeptEnd, place: PlanPo
   const shift = sub(place, corner);
   if (shift.x === 0 && shift.y === 0) return drawing;
   const joined = joinedTo(plan, far, run);
-  const carried = joined.has(kept) ? carriedAlong(plan, run, far, kept, shift) : joined;
-  if (!carried) return moveCorner(drawing, far, place);
+  const carried = joined.has(kept) ? carriedAlong(plan, run, [kept, far], shift, 'longEnough') : joined;
+  if (!carried) {
+    // Walls that would give way but are too short leave no answer; where none runs the same way, the corner moves alone.
+    return carriedAlong(plan, run, [kept, far], shift, 'any') ? drawing : moveCorner(drawing, far, place);
+  }
   const places = new Map<string, PlanPoint>();
   for (const id of carried) {
     const one = plan.corners.get(id);
@@ -99,7 +111,7 @@ function moveFarEnd(drawing: Drawing, run: WallRun, keep: KeptEnd, place: PlanPo
 /**
  * Gives a run a length; the corner at the kept end stays. What is joined to the far end only is carried along whole. In a
  * closed outline the walls beyond the far end are carried along, and the walls that run the same way as this one stretch,
- * so a rectangle stays a rectangle and every other wall keeps its length. Where nothing can stretch (a triangle) only the
+ * so a rectangle stays a rectangle and every other wall keeps its length. Where none runs the same way (a triangle) only the
  * far corner moves. The same drawing comes back where a wall would turn back on itself.
  */
 export function setRunLength(drawing: Drawing, runId: string, length: Ticks, keep: KeptEnd): Drawing {
