@@ -19,19 +19,21 @@ function lHouse(x: number, y: number): Place[] {
   ].map(([dx, dy]) => [x + dx!, y + dy!]);
 }
 
-/** A house with a crenellated back: `runs` is even and at least 8. */
+/** A house crenellated front and back, each merlon 16 ft wide: `runs` is even and at least 8. */
 function crenellatedHouse(runs: number): Place[] {
   const steps = (runs - 4) / 2;
-  const front: Place[] = [
-    [0, 0],
-    [16 * (steps + 1), 0],
-  ];
-  const back: Place[] = [];
-  for (let i = steps; i >= 0; i -= 1) {
-    const depth = i % 2 === 0 ? 30 : 20;
-    back.push([16 * (i + 1), depth], [16 * i, depth]);
-  }
-  return [...front, ...back];
+  const front = Math.floor(steps / 2);
+  const back = steps - front;
+  const width = 16 * (Math.max(front, back) + 1);
+  const edge = (count: number, depthAt: (i: number) => number): Place[] =>
+    Array.from({ length: count + 1 }, (_, i): Place[] => {
+      const right = i === count ? width : 16 * (i + 1);
+      return [
+        [16 * i, depthAt(i)],
+        [right, depthAt(i)],
+      ];
+    }).flat();
+  return [...edge(front, (i) => (i % 2 === 0 ? 0 : 6)), ...edge(back, (i) => (i % 2 === 0 ? 30 : 24)).reverse()];
 }
 
 /** A site of exactly `runs` runs (even, at least 10), and a reading at every corner. */
