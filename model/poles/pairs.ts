@@ -140,3 +140,21 @@ export function pairsUpTo(braces: PoleBraces, most: number, spend: () => boolean
   }
   return found.sort((p, q) => p.cost - q.cost);
 }
+
+/** The cheapest pair with one brace given, within `most`; null where it can't stand or finds no partner. */
+export function bestWith(braces: PoleBraces, given: Candidate, which: 0 | 1, most: number): Pair | null {
+  const costGiven = fullCost(braces, given);
+  if (costGiven === null) return null;
+  let best: Pair | null = null;
+  for (const other of braces.lists()[which === 0 ? 1 : 0]) {
+    if (costGiven + other.cost > most || (best && costGiven + other.cost >= best.cost)) break;
+    const angle = angleCost(given, other, braces.limits);
+    if (angle === null || (best && costGiven + other.cost + angle >= best.cost)) continue;
+    const costOther = fullCost(braces, other);
+    if (costOther === null) continue;
+    const cost = costGiven + costOther + angle;
+    if (cost > most || (best && cost >= best.cost)) continue;
+    best = { cost, braces: which === 0 ? [given, other] : [other, given] };
+  }
+  return best;
+}

@@ -12,7 +12,8 @@ import { bracesConflict, type BraceLine } from './clearance';
 import { turnedFor, whyBlocked } from './explain';
 import { groundOf, obstacleOf, obstaclesOf, type Ground } from './obstacles';
 import { cheapestPair, poleBraces, type AngleLimits, type PoleBraces, type PoleSite } from './pairs';
-import { placeBraces, USUAL_BOUND, type Placed, type SearchBound } from './search';
+import { USUAL_BOUND, type SearchBound } from './group';
+import { placeBraces, type Placed } from './search';
 import { nearJambs, standClear, takenOf, type Standing } from './section';
 import { seatsAlongRuns, seatsAtCorners, type Seat } from './seats';
 import { cornersAround, tiesOf } from './ties';
@@ -169,8 +170,7 @@ function bracesByPole(
   ground: Ground,
   reasons: Reason[],
 ): Map<string, readonly Brace[]> {
-  const crowded = new Map(search.placed.crowded.flatMap((group) => group.map((i) => [i, group] as const)));
-  const placedLines: BraceLine[] = crowded.size > 0 || search.placed.pairs.includes(null) ? linesPlaced(search) : [];
+  const placedLines: BraceLine[] = search.placed.pairs.includes(null) ? linesPlaced(search) : [];
   const found = new Map<string, readonly Brace[]>();
   search.sites.forEach((site, i) => {
     const pole = search.poles[i];
@@ -187,7 +187,7 @@ function bracesByPole(
       return;
     }
     const group = search.placed.groups.find((members) => members.includes(i)) ?? [];
-    if (crowded.has(i)) {
+    if (cheapestPair(pole)) {
       const against = group.flatMap((j) => (j === i ? [] : (search.sites[j]?.poleId ?? []))).map(poleRef);
       reasons.push({ code: 'braceBlocked', weight: 'blocked', thing: poleRef(site.poleId), against });
     } else reasons.push(whyBlocked(drawing, walls, site, ground));

@@ -418,7 +418,7 @@ describe('poles of two buildings near one another', () => {
 });
 
 describe('degenerate drawings', () => {
-  it.each([
+  it.each<[string, Drawing]>([
     ['nothing', emptySite()],
     ['one corner', { ...emptySite(), corners: [{ id: 'A', letter: 'A', x: inches(0), y: inches(0) }] }],
     [
@@ -475,7 +475,7 @@ describe('degenerate drawings', () => {
         [240, 0],
       ]),
     ],
-  ] as const)('%s is solved without an exception or a figure that is none', (_, drawing) => {
+  ])('%s is solved without an exception or a figure that is none', (_, drawing) => {
     const set = place(drawing);
     for (const pole of set.poles) {
       for (const point of [pole.at, ...pole.section])

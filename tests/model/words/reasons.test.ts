@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { inches, ticks } from '../../../model/length/ticks';
 import { writeLength } from '../../../model/length/write';
+import type { Survey } from '../../../model/drawing/surveySchema';
 import type { Reason } from '../../../model/reasons';
 import { en } from '../../../model/words/en';
 import { nameThing } from '../../../model/words/naming';
@@ -39,11 +40,11 @@ describe('names of things', () => {
   });
 
   it('says where a reading was taken when it has the survey', () => {
-    const survey = {
+    const survey: Survey = {
       version: 1,
       method: 'measureDown',
       readings: [{ id: 'r1', station: { kind: 'corner', cornerId: 'E' }, down: inches(48) }],
-    } as const;
+    };
     const thing = { kind: 'station', id: 'r1' } as const;
     expect(nameThing(thing, site, say)).toBe('Reading');
     expect(nameThing(thing, site, say, { survey })).toBe('Reading at E');
@@ -102,7 +103,15 @@ describe('reasons in words', () => {
   it('gives the nearest that does, on one side or both', () => {
     const base = { code: 'runDoesNotBond', weight: 'blocked', thing } as const;
     const fix = (below: number | null, above: number | null) =>
-      wordFix({ ...base, nearest: { below: below && inches(below), above: above && inches(above) } }, site, say, write);
+      wordFix(
+        {
+          ...base,
+          nearest: { below: below === null ? null : inches(below), above: above === null ? null : inches(above) },
+        },
+        site,
+        say,
+        write,
+      );
     expect(fix(10, 12)).toBe('Nearest that does: 10" or 12".');
     expect(fix(10, null)).toBe('Nearest that does: 10".');
     expect(fix(null, 12)).toBe('Nearest that does: 12".');

@@ -1,0 +1,169 @@
+/** Every brace placed is checked against the site by a general geometry library, and the search by trying everything. */
+import fc from 'fast-check';
+import GeometryFactory from 'jsts/org/locationtech/jts/geom/GeometryFactory.js';
+import Coordinate from 'jsts/org/locationtech/jts/geom/Coordinate.js';
+import OverlayOp from 'jsts/org/locationtech/jts/operation/overlay/OverlayOp.js';
+import DistanceOp from 'jsts/org/locationtech/jts/operation/distance/DistanceOp.js';
+import { describe, expect, it } from 'vitest';
+import type { Drawing } from '../../../model/drawing/schema';
+import type { PlanPoint } from '../../../model/geometry/point';
+import { inches } from '../../../model/length/ticks';
+import { reachLimits, type CandidateOptions } from '../../../model/poles/candidates';
+import { groundOf, obstacleOf, obstaclesOf } from '../../../model/poles/obstacles';
+import { poleBraces, type PoleSite } from '../../../model/poles/pairs';
+import { placePoles } from '../../../model/poles/placePoles';
+import { USUAL_BOUND } from '../../../model/poles/group';
+import { seatsAtCorners } from '../../../model/poles/seats';
+import { layOutWalls } from '../../../model/walls/layOutWalls';
+import { door, emptySite, KIT, withOpenings, withWalls, type Place } from './sites';
+
+const factory = new GeometryFactory();
+const coordinate = (p: PlanPoint) => new Coordinate(p.x, p.y);
+const line = (a: PlanPoint, b: PlanPoint) => factory.createLineString([coordinate(a), coordinate(b)]);
+const area = (ring: readonly PlanPoint[]) =>
+  factory.createPolygon(factory.createLinearRing([...ring, ring[0]!].map(coordinate)));
+const lengthInside = (a: object, b: object): number => OverlayOp.intersection(a as never, b as never).getLength();
+const apart = (a: object, b: object): number => DistanceOp.distance(a as never, b as never);
+
+const rectangleAt = (x: number, y: number, width: number, height: number): Place[] => [
+  [x, y],
+  [x + width, y],
+  [x + width, y + height],
+  [x, y + height],
+];
+
+/** Two small rectangles a lane apart, a door and two areas to keep clear, all at random. */
+const sites: fc.Arbitrary<Drawing> = fc
+  .record({
+    lane: fc.integer({ min: 40, max: 130 }),
+    shift: fc.integer({ min: -60, max: 60 }),
+    doorAt: fc.integer({ min: 12, max: 70 }),
+    out: fc.boolean(),
+    areas: fc.array(
+      fc.record({
+        x: fc.integer({ min: -80, max: 400 }),
+        y: fc.integer({ min: -80, max: 200 }),
+        size: fc.integer({ min: 5, max: 60 }),
+      }),
+      { maxLength: 2 },
+    ),
+  })
+  .map(({ lane, shift, doorAt, out, areas }) => {
+    const first = withWalls(emptySite(), rectangleAt(0, 0, 120, 100), true, 'p');
+    const both = withWalls(first, rectangleAt(120 + lane, shift, 120, 100), true, 'q');
+    const opened = withOpenings(
+      both,
+      door('pBC', Math.min(doorAt, 50), { swing: { hinge: 'near', opens: out ? 'out' : 'in' } }),
+    );
+    const keepClears = areas.map(({ x, y, size }, i) => ({
+      id: `k${i}`,
+      name: 'area',
+      points: rectangleAt(x, y, size, size).map(([px, py]) => ({ x: inches(px), y: inches(py) })),
+    }));
+    return { ...opened, keepClears };
+  });
+
+const COARSE: CandidateOptions = { turnMost: 60, turnStep: 30, reaches: [66] };
+
+describe('braces on random sites', () => {
+  it('cross no wall, no area, no swing and no other brace, and keep the angle rule', () => {
+    fc.assert(
+      fc.property(sites, (drawing) => {
+        const walls = layOutWalls(drawing);
+        const set = placePoles(drawing, walls);
+        const loose = new Set(set.reasons.filter((r) => r.code === 'braceAngleOut').map((r) => r.thing.id));
+        const braces = set.poles.flatMap((pole) =>
+          pole.braces.map((brace) => ({ pole, brace, line: line(pole.at, brace.foot) })),
+        );
+        for (const { pole, brace, line: path } of braces) {
+          for (const run of walls.runs) {
+            expect(apart(path, area(run.body))).toBeGreaterThan(0);
+            expect(apart(line(brace.foot, brace.foot), area(run.body))).toBeGreaterThanOrEqual(KIT.clearance - 1);
+          }
+          // It may touch an area's edge, within the rounding of its foot.
+          for (const keep of drawing.keepClears) expect(lengthInside(path, area(keep.points))).toBeLessThan(8);
+          for (const other of braces)
+            if (other.pole !== pole) expect(apart(path, other.line)).toBeGreaterThanOrEqual(KIT.clearance - 1);
+          for (const other of set.poles)
+            if (other !== pole) expect(apart(path, area(other.section))).toBeGreaterThanOrEqual(KIT.clearance - 1);
+          expect(brace.reach).toBe(Math.round(Math.hypot(brace.foot.x - pole.at.x, brace.foot.y - pole.at.y)));
+        }
+        for (const pole of set.poles) {
+          const [a, b] = pole.braces;
+          if (!a || !b || loose.has(pole.id)) continue;
+          const turned = Math.abs(a.bearing - b.bearing);
+          const angle = Math.min(turned, 360 - turned);
+          expect(angle).toBeGreaterThanOrEqual(60 - 1e-3);
+          expect(angle).toBeLessThanOrEqual(120 + 1e-3);
+        }
+      }),
+      { numRuns: 30 },
+    );
+  });
+
+  it('cost no more than the cheapest of every possible placing', () => {
+    fc.assert(
+      fc.property(sites, (drawing) => {
+        const walls = layOutWalls(drawing);
+        const set = placePoles(drawing, walls, { candidates: COARSE, bound: USUAL_BOUND });
+        fc.pre(set.reasons.length === 0);
+        expect(set.exact).toBe(true);
+        expect(set.cost).toBe(cheapestOfAll(drawing));
+      }),
+      { numRuns: 30 },
+    );
+  });
+});
+
+interface Choice {
+  readonly cost: number;
+  readonly lines: readonly object[];
+}
+
+/** Every pair of candidates of every pole, and every combination of them, by brute force. */
+function cheapestOfAll(drawing: Drawing): number {
+  const walls = layOutWalls(drawing);
+  const placed = placePoles(drawing, walls, { candidates: COARSE, bound: USUAL_BOUND });
+  const poles = placed.poles.map((pole) => obstacleOf('pole', { kind: 'pole', id: pole.id }, pole.section));
+  const ground = groundOf([...obstaclesOf(drawing, walls), ...poles], null);
+  const reach = reachLimits(KIT)!;
+  const choices = seatsAtCorners(walls).map((seat): Choice[] => {
+    const at = placed.poleById.get(seat.id)!.at;
+    const limits = { least: 60, most: 120 };
+    const site: PoleSite = { poleId: seat.id, seat, at, kit: KIT, reach, limits, options: COARSE };
+    const braces = poleBraces(site, ground);
+    const [first, second] = braces.lists();
+    return first.flatMap((a) =>
+      second.flatMap((b): Choice[] => {
+        const overA = braces.over(a);
+        const overB = braces.over(b);
+        const cosine = a.direction.x * b.direction.x + a.direction.y * b.direction.y;
+        const angle = Math.round((Math.acos(Math.max(-1, Math.min(1, cosine))) * 180) / Math.PI);
+        if (!overA || !overB || angle < 60 || angle > 120) return [];
+        const cost = a.cost + b.cost + (angle - 90) ** 2 + 400 * (overA.length + overB.length);
+        return [{ cost, lines: [line(at, a.foot), line(at, b.foot)] }];
+      }),
+    );
+  });
+  for (const options of choices) options.sort((a, b) => a.cost - b.cost);
+  const least = choices.map((_, i) => choices.slice(i).reduce((sum, options) => sum + (options[0]?.cost ?? 0), 0));
+  const known = new Map<Choice, Map<Choice, boolean>>();
+  const clear = (a: Choice, b: Choice): boolean => {
+    const row = known.get(a) ?? new Map<Choice, boolean>();
+    known.set(a, row);
+    const found = row.get(b) ?? a.lines.every((p) => b.lines.every((q) => apart(p, q) >= KIT.clearance));
+    row.set(b, found);
+    return found;
+  };
+  let best = Infinity;
+  const descend = (i: number, chosen: readonly Choice[], cost: number): void => {
+    const options = choices[i];
+    if (!options) best = Math.min(best, cost);
+    for (const choice of options ?? []) {
+      if (cost + choice.cost + (least[i + 1] ?? 0) >= best) return;
+      if (chosen.every((other) => clear(choice, other))) descend(i + 1, [...chosen, choice], cost + choice.cost);
+    }
+  };
+  descend(0, [], 0);
+  return best;
+}
