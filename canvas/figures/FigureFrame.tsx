@@ -1,23 +1,26 @@
 import { useMemo, useRef, useState } from 'react';
 import { View } from 'react-native';
-import type { Figure, LabelScale } from '../../model/figures/figure';
 import type { Vec } from '../../model/geometry/point';
 import { HIT_REACH, isDrag, type StrokeEvent } from '../input/events';
 import { PlanViewport } from '../viewport/PlanViewport';
 import type { Camera, Padding, ViewSize } from '../viewport/camera';
 import { FigureView } from './FigureView';
-import { fitFigure } from './fit';
+import { fitFigures, type MakeFigure } from './fit';
 import { labelScale } from './labelScale';
 
 interface Props {
   /** Makes the figure for labels of a size; the same function for as long as the figure is the same. */
-  readonly make: (scale: LabelScale) => Figure;
+  readonly make: MakeFigure;
   /** What is shown: when it changes, the figure is fitted anew; otherwise it stays where it was moved to. */
   readonly of: string;
   readonly label: string;
   /** A place pointed at, in the figure's ticks, and how far around it a thing is still meant. */
   readonly onTap?: (at: Vec, reach: number) => void;
   readonly padding?: Padding;
+  /** Another figure that is fitted together with this one, so that both stand alike beside one another. */
+  readonly alongside?: MakeFigure;
+  /** Where it was moved to, when that is shared with another figure; null while it is as fitted. */
+  readonly shared?: { readonly camera: Camera | null; readonly onCamera: (camera: Camera) => void };
 }
 
 const PADDING: Padding = { left: 14, top: 14, right: 14, bottom: 14 };
@@ -25,13 +28,17 @@ const NO_SIZE: ViewSize = { width: 0, height: 0 };
 const nothing = () => undefined;
 
 /** A figure fitted into its box; fingers and the wheel move it, and a tap says where. */
-export function FigureFrame({ make, of, label, onTap, padding = PADDING }: Props) {
+export function FigureFrame({ make, of, label, onTap, padding = PADDING, alongside, shared }: Props) {
   const [size, setSize] = useState<ViewSize>(NO_SIZE);
   const [moved, setMoved] = useState<{ of: string; camera: Camera } | null>(null);
   const down = useRef<StrokeEvent | null>(null);
   const there = size.width > 0 && size.height > 0;
-  const fitted = useMemo(() => fitFigure(make, size, padding), [make, size, padding]);
-  const camera = moved?.of === of ? moved.camera : fitted;
+  const fitted = useMemo(
+    () => fitFigures(alongside ? [make, alongside] : [make], size, padding),
+    [make, alongside, size, padding],
+  );
+  const own = moved?.of === of ? moved.camera : null;
+  const camera = (shared ? shared.camera : own) ?? fitted;
   const figure = useMemo(() => make(labelScale(camera.scale)), [make, camera.scale]);
 
   function onStroke(event: StrokeEvent): 'keep' | 'pan' {
@@ -52,7 +59,7 @@ export function FigureFrame({ make, of, label, onTap, padding = PADDING }: Props
         camera={camera}
         size={size}
         onSize={setSize}
-        onCamera={(next) => setMoved({ of, camera: next })}
+        onCamera={(next) => (shared ? shared.onCamera(next) : setMoved({ of, camera: next }))}
         onStroke={onStroke}
         fingersOnlyMove={false}
         onPenSeen={nothing}
