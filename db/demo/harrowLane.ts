@@ -4,19 +4,26 @@ import type { Survey } from '../../model/drawing/surveySchema';
 import { mm, ticks, type Ticks } from '../../model/length/ticks';
 import type { DemoSite } from './demoSite';
 
-const LENGTH = 295;
+/** A unit is twice as long as it is wide, joint included, so that a wall bonds in whole and half units. */
+const LENGTH = 490;
+const WIDTH = 240;
 const JOINT = 10;
+const HALF = (LENGTH + JOINT) / 2;
 const GAUGE = 100;
 
-/** Where a jamb falls after so many whole units, and an opening as wide as so many with a joint more, in millimetres. */
-const afterUnits = (count: number): Ticks => mm(count * (LENGTH + JOINT) - JOINT);
-const unitsWide = (count: number): Ticks => mm(count * (LENGTH + JOINT) + JOINT);
+/** Where a jamb falls after so many half units, and an opening as wide as so many with a joint more, in millimetres. */
+const afterHalves = (count: number): Ticks => mm(count * HALF - JOINT);
+const halvesWide = (count: number): Ticks => mm(count * HALF + JOINT);
 
 const GROUND_SOFFIT = 23 * GAUGE;
 const BEAM_DEPTH = 200;
 /** Each lift starts afresh: the upper one on the first beam. */
 const UPPER = GROUND_SOFFIT + BEAM_DEPTH;
 const UPPER_SOFFIT = UPPER + 22 * GAUGE;
+
+/** Outside lengths that bond without cutting. */
+const ALONG = 29 * HALF - JOINT;
+const ACROSS = 19 * HALF - JOINT;
 
 interface Variant {
   readonly upper: boolean;
@@ -33,8 +40,8 @@ function windowAt(id: string, runId: string, after: number, storey: 'ground' | '
     kind: 'window',
     id,
     runId,
-    at: afterUnits(after),
-    width: unitsWide(3),
+    at: afterHalves(after),
+    width: halvesWide(4),
     sill: mm(base + 9 * GAUGE),
     head: mm(base + 20 * GAUGE),
     frame: FRAME,
@@ -69,25 +76,26 @@ function draw({ upper, splay, doorHinge }: Variant): Drawing {
         name: '240 mm earth block',
         unitName: 'Pressed earth block',
         mortarName: 'Stabilised earth mortar',
-        unit: { length: mm(LENGTH), width: mm(240), height: mm(90) },
+        unit: { length: mm(LENGTH), width: mm(WIDTH), height: mm(GAUGE - JOINT) },
         laid: 'stretcher',
-        headJoint: { nominal: mm(JOINT), least: mm(7), most: mm(15) },
+        headJoint: { nominal: mm(JOINT), least: mm(7), most: mm(13) },
         bedJoint: { nominal: mm(JOINT), least: mm(8), most: mm(13) },
         bedding: { least: mm(JOINT), most: mm(30) },
         bondOffset: 'half',
-        leastLap: mm(50),
-        leastPiece: mm(60),
+        // A quarter of the unit's length (NMAC 14.7.4.11 E).
+        leastLap: mm(LENGTH / 4),
+        leastPiece: mm(110),
       },
     ],
-    corners: [corner('A', 0, 0), corner('B', 7315 + splay, 0), corner('C', 7315, 4875), corner('D', 0, 4875)],
+    corners: [corner('A', 0, 0), corner('B', ALONG + splay, 0), corner('C', ALONG, ACROSS), corner('D', 0, ACROSS)],
     runs: [run('A', 'B'), run('B', 'C'), run('C', 'D'), run('D', 'A')],
     openings: [
       {
         kind: 'door',
         id: 'door',
         runId: 'rAB',
-        at: afterUnits(4),
-        width: unitsWide(3),
+        at: afterHalves(4),
+        width: halvesWide(4),
         sill: ticks(0),
         head: mm(20 * GAUGE),
         frame: FRAME,
@@ -95,16 +103,16 @@ function draw({ upper, splay, doorHinge }: Variant): Drawing {
         swing: { hinge: doorHinge, opens: 'in' },
         way: { used: true, width: mm(1500), depth: mm(1500) },
       },
-      windowAt('windowSouth', 'rAB', 14, 'ground'),
-      windowAt('windowNorth', 'rCD', 5, 'ground'),
-      windowAt('windowNorthWest', 'rCD', 14, 'ground'),
-      windowAt('windowWest', 'rDA', 6, 'ground'),
+      windowAt('windowSouth', 'rAB', 16, 'ground'),
+      windowAt('windowNorth', 'rCD', 6, 'ground'),
+      windowAt('windowNorthWest', 'rCD', 18, 'ground'),
+      windowAt('windowWest', 'rDA', 8, 'ground'),
       ...(upper
         ? [
             windowAt('upperSouthWest', 'rAB', 4, 'upper'),
-            windowAt('upperSouth', 'rAB', 14, 'upper'),
-            windowAt('upperNorth', 'rCD', 5, 'upper'),
-            windowAt('upperWest', 'rDA', 6, 'upper'),
+            windowAt('upperSouth', 'rAB', 16, 'upper'),
+            windowAt('upperNorth', 'rCD', 6, 'upper'),
+            windowAt('upperWest', 'rDA', 8, 'upper'),
           ]
         : []),
     ],
@@ -163,7 +171,7 @@ function surveyed(splay: number): Survey {
 
 const FIRST: Variant = { upper: false, splay: 0, doorHinge: 'near' };
 const SECOND: Variant = { ...FIRST, upper: true };
-const THIRD: Variant = { ...SECOND, splay: 610, doorHinge: 'far' };
+const THIRD: Variant = { ...SECOND, splay: 500, doorHinge: 'far' };
 
 export const harrowLane: DemoSite = {
   name: 'Harrow Lane studio',
@@ -178,9 +186,9 @@ export const harrowLane: DemoSite = {
     {
       note: 'The lane end follows the lane; the door is hung on its other jamb.',
       drawing: draw(THIRD),
-      survey: surveyed(610),
+      survey: surveyed(500),
       daysAgo: 2,
     },
   ],
-  draft: { drawing: draw(THIRD), survey: surveyed(610) },
+  draft: { drawing: draw(THIRD), survey: surveyed(500) },
 };

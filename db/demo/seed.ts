@@ -17,6 +17,7 @@ async function fillSite(db: Db, site: DemoSite, on: 'cedarBend' | 'harrowLane', 
   const members = DEMO_PEOPLE.map((person) => ({ userId: person.id, role: person[on] }));
   const ago = (days: number) => new Date(now.getTime() - days * DAY_MS);
   const last = site.revisions.at(-1);
+  const changed = !isDeepStrictEqual(site.draft, { drawing: last?.drawing, survey: last?.survey });
   await putSite(db, {
     name: site.name,
     createdAt: ago((site.revisions[0]?.daysAgo ?? 0) + 3),
@@ -28,9 +29,9 @@ async function fillSite(db: Db, site: DemoSite, on: 'cedarBend' | 'harrowLane', 
       savedAt: ago(daysAgo),
     })),
     draft: { ...site.draft, outline: drawingOutlines(site.draft.drawing) },
-    draftChanged: !isDeepStrictEqual(site.draft, { drawing: last?.drawing, survey: last?.survey }),
+    draftChanged: changed,
     changedBy: drawnBy.id,
-    changedAt: ago(1),
+    changedAt: changed ? ago(1) : ago(last?.daysAgo ?? 1),
   });
 }
 
