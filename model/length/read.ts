@@ -1,5 +1,5 @@
 /** Reads a length as people write it on site, exactly, or says what was wrong with it and where. */
-import type { Units } from '../drawing/schema';
+import type { LengthUnits } from './units';
 import { ticks, TICKS_PER_INCH, TICKS_PER_MM, type Ticks } from './ticks';
 import { tokenise, type Amount, type LengthProblem, type Token, type UnitName } from './tokens';
 
@@ -78,7 +78,7 @@ interface Settled extends Quantity {
 }
 
 /** Gives every quantity a unit: `5'4` and `5-4` are feet and inches, one bare number takes the site's unit. */
-function settleUnits(quantities: readonly Quantity[], units: Units): readonly Settled[] | Trouble {
+function settleUnits(quantities: readonly Quantity[], units: LengthUnits): readonly Settled[] | Trouble {
   const [first, second, third] = quantities;
   if (!first) return [];
   if (third) return { at: third.at, problem: 'unexpectedNumber' };
@@ -117,7 +117,7 @@ function refuse(trouble: Trouble): ReadLength {
  * rounded to the tick once, half away from zero. A minus sign in front is allowed; whether a negative length makes sense
  * is for the asker to say.
  */
-export function readLength(text: string, site: { readonly units: Units }): ReadLength {
+export function readLength(text: string, site: { readonly units: LengthUnits }): ReadLength {
   const { negative, tokens, problem } = tokenise(text);
   if (problem) return refuse(problem);
   const quantities = groupQuantities(tokens);

@@ -1,5 +1,5 @@
 /** A length in words, as a person would say it, for screen readers. */
-import type { Units } from '../drawing/schema';
+import type { LengthUnits } from './units';
 import { lengths } from '../words/en/lengths';
 import type { Ticks } from './ticks';
 import { measureParts, type LengthStyle } from './write';
@@ -51,7 +51,7 @@ function sayFeet(feet: number, whole: number, numerator: number, denominator: nu
 }
 
 /** Says a length, rounded to the tape's step as it is shown: "four feet three and three eighths". */
-export function sayLength(length: Ticks, units: Units, step: Ticks, style?: LengthStyle): string {
+export function sayLength(length: Ticks, units: LengthUnits, step: Ticks, style?: LengthStyle): string {
   const parts = measureParts(length, style ? { units, step, style } : { units, step });
   const sign = parts.sign === '' ? '' : `${words.minus} `;
   const { feet, whole, numerator, denominator, decimals, unit } = parts;

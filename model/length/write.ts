@@ -1,12 +1,12 @@
 /** Writes a length to the tape's step: rounded once, fractions reduced, never 12 inches beside feet, never −0. */
-import type { Units } from '../drawing/schema';
+import type { LengthUnits } from './units';
 import { roundToStep, ticks, TICKS_PER_INCH, TICKS_PER_MM, type Ticks } from './ticks';
 
 /** `feetInches`: 5' 4 3/8". `inches`: 64 3/8". `mm`: 350 mm. `m`: 1.200 m. */
 export type LengthStyle = 'feetInches' | 'inches' | 'mm' | 'm';
 
 export interface LengthFormat {
-  readonly units: Units;
+  readonly units: LengthUnits;
   /** The tape's step in ticks. */
   readonly step: Ticks;
   /** Feet and inches, or millimetres, unless it says otherwise. */

@@ -1,7 +1,7 @@
 /** Where a point stops: on corners first, then where two things agree, then on one. */
 import { boxAround } from '../geometry/box';
 import type { PlanPoint, Vec } from '../geometry/point';
-import { along, bearing, distance, dot, samePoint, sub, toPoint, unit } from '../geometry/vec';
+import { along, bearing, cross, distance, dot, samePoint, sub, toPoint, unit } from '../geometry/vec';
 import { roundTicks, type Ticks } from '../length/ticks';
 import type { RunGeometry } from '../walls/types';
 import { placeAt } from '../drawing/edits/runLength';
@@ -122,6 +122,12 @@ function settle(candidate: Candidate): PlanPoint {
   return by.every((one) => keeps(one, point)) ? point : toPoint(place);
 }
 
+/** Whether two constraints are one line, as far as the eye can tell: a run and the corners at its ends. */
+function sameLine(a: Constraint, b: Constraint): boolean {
+  if (a.shape === 'circle' || b.shape === 'circle') return false;
+  return Math.abs(cross(a.direction, b.direction)) < 1e-6 && distance(dropOnto(a, b.through), b.through) < 1;
+}
+
 /** Where a raw point stops and what it caught. Off or out of everything's reach it is only rounded to the tick. */
 export function snapPoint(request: SnapRequest): Snap {
   const { scene, raw, reach, from, also = [], options, exclude = NONE } = request;
@@ -143,7 +149,9 @@ export function snapPoint(request: SnapRequest): Snap {
   const best = bestCandidate(constraints, raw, reach);
   if (!best) return finish(request, toPoint(raw), []);
   const point = settle(best);
-  const others = constraints.filter((one) => !best.by.includes(one) && one.kind !== 'angle15' && keeps(one, point));
+  const others = constraints.filter(
+    (one) => one.kind !== 'angle15' && keeps(one, point) && !best.by.some((by) => by === one || sameLine(by, one)),
+  );
   return finish(
     request,
     point,
