@@ -150,10 +150,28 @@ export function sumOf(a: readonly Piece[], b: readonly Piece[]): Piece[] {
 }
 
 /** The least cost of coming to each height from one that is `least` to `most` below it, kept to `lo`…`hi`. */
-export function slideUp(pieces: readonly Piece[], least: number, most: number, lo: number, hi: number): Piece[] {
-  let slid: Piece[] = [];
-  for (const piece of pieces) slid = lowerOf(slid, clip(slidePiece(piece, least, most), lo, hi));
-  return slid;
+export function slideUp(
+  pieces: readonly Piece[],
+  least: number,
+  most: number,
+  lo: number,
+  hi: number,
+): readonly Piece[] {
+  return lowestOf(pieces.map((piece) => clip(slidePiece(piece, least, most), lo, hi)));
+}
+
+/** The lowest of many costs, taken in pairs so that the work grows as n log n. */
+export function lowestOf(costs: readonly (readonly Piece[])[]): readonly Piece[] {
+  let round = costs.filter((pieces) => pieces.length > 0);
+  while (round.length > 1) {
+    const next: (readonly Piece[])[] = [];
+    for (let i = 0; i < round.length; i += 2) {
+      const [one, other] = [round[i] as readonly Piece[], round[i + 1]];
+      next.push(other ? lowerOf(one, other) : one);
+    }
+    round = next;
+  }
+  return round[0] ?? [];
 }
 
 function slidePiece(piece: Piece, least: number, most: number): Piece[] {
@@ -185,4 +203,23 @@ function clip(pieces: readonly Piece[], lo: number, hi: number): Piece[] {
 /** The same costs, `by` higher. */
 export function raise(pieces: readonly Piece[], by: number): Piece[] {
   return pieces.map((piece) => ({ ...piece, lo: piece.lo + by, hi: piece.hi + by }));
+}
+
+/** The heights at which neither part of the cost is over its bound. */
+export function prune(pieces: readonly Piece[], bound: Cost): Piece[] {
+  return pieces.flatMap((piece) => {
+    const hard = under(piece.lo, piece.hi, piece.hard, piece.hardSlope, bound.hard);
+    const soft = under(piece.lo, piece.hi, piece.soft, piece.softSlope, bound.soft);
+    const lo = Math.max(hard.lo, soft.lo);
+    const hi = Math.min(hard.hi, soft.hi);
+    return lo <= hi ? [cut(piece, lo, hi)] : [];
+  });
+}
+
+/** Where a straight cost stays within its bound; `lo` is over `hi` where it never does. */
+function under(lo: number, hi: number, start: number, slope: number, bound: number): { lo: number; hi: number } {
+  const room = bound - start;
+  if (slope === 0) return room >= 0 ? { lo, hi } : { lo, hi: lo - 1 };
+  if (slope > 0) return { lo, hi: Math.min(hi, lo + Math.floor(room / slope)) };
+  return { lo: Math.max(lo, lo + Math.ceil(room / slope)), hi };
 }

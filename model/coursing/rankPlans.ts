@@ -1,7 +1,8 @@
 /** The best few plans that differ in the count of some interval, in strict order of cost. */
 import { compareCosts } from './costPieces';
 import { compareRated, refine, type RatedPlan } from './refine';
-import { cheapestPlan, type CountAllowed, type Plan } from './search';
+import { cheapestPlan } from './deepen';
+import type { CountAllowed, Plan } from './search';
 import type { Problem } from './problem';
 
 /** Counts already settled from the bottom up, and counts that the next stop may not have. */
@@ -13,7 +14,7 @@ interface Branch {
 }
 
 /** Exact searches that the alternatives may cost, the best answer apart. */
-const MOST_SEARCHES = 600;
+const MOST_SEARCHES = 150;
 
 export interface Ranking {
   readonly plans: readonly RatedPlan[];

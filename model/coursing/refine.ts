@@ -1,6 +1,6 @@
 /** Among the plans of least cost, the one whose joints stay nearest the nominal, and then spread least. */
 import { compareCosts } from './costPieces';
-import { cheapestPlan, jointsOf, type CountAllowed, type Plan } from './search';
+import { cheapestWithin, jointsOf, type CountAllowed, type Plan } from './search';
 import type { JointLimits } from './fitInterval';
 import type { Problem } from './problem';
 
@@ -44,8 +44,8 @@ export function compareRated(a: RatedPlan, b: RatedPlan): number {
 export function refine(problem: Problem, plan: Plan, allowed?: CountAllowed): RatedPlan {
   const { nominal, least, most } = problem.joint;
   const within = (limits: JointLimits): RatedPlan | null => {
-    const found = cheapestPlan(problem, limits, allowed);
-    return found && compareCosts(found.cost, plan.cost) === 0 ? rate(problem, found) : null;
+    const found = cheapestWithin(problem, limits, plan.cost, allowed);
+    return found && rate(problem, found);
   };
   const around = (step: number): JointLimits => ({
     least: Math.max(least, nominal - step),

@@ -7,7 +7,18 @@
  * whose matrix is totally unimodular, so whole heights lose nothing. The least cost of having come to each
  * height is a piecewise linear function: it is carried from stop to stop, for all counts at once.
  */
-import { compareCosts, costAt, lowerOf, raise, slideUp, sumOf, type Cost, type Piece, costOn } from './costPieces';
+import {
+  compareCosts,
+  costAt,
+  lowestOf,
+  prune,
+  raise,
+  slideUp,
+  sumOf,
+  type Cost,
+  type Piece,
+  costOn,
+} from './costPieces';
 import { countsWithin, heightLimits, jointOf, type JointLimits } from './fitInterval';
 import { chargeOf, windowOf, type Problem, type Stop } from './problem';
 
@@ -31,8 +42,17 @@ interface Stage {
 
 const ANY_COUNT: CountAllowed = () => true;
 
-/** The cheapest plan, or null where no counts fit. Ties go to joints near the nominal. */
-export function cheapestPlan(problem: Problem, joint: JointLimits, allowed: CountAllowed = ANY_COUNT): Plan | null {
+/**
+ * The cheapest plan of those with neither part of the cost over `bound`, or null where there is none. Ties go to joints
+ * near the nominal. Costs only grow from stop to stop, so what is over the bound is dropped on the way: a tight bound
+ * makes the search quick, and changes nothing else.
+ */
+export function cheapestWithin(
+  problem: Problem,
+  joint: JointLimits,
+  bound: Cost,
+  allowed: CountAllowed = ANY_COUNT,
+): Plan | null {
   const stages: Stage[] = [
     {
       begun: [{ lo: problem.start, hi: problem.start, hard: 0, soft: 0, hardSlope: 0, softSlope: 0 }],
@@ -40,18 +60,25 @@ export function cheapestPlan(problem: Problem, joint: JointLimits, allowed: Coun
     },
   ];
   for (let i = 0; i < problem.stops.length; i++) {
-    const next = advance(problem, joint, stages[i] as Stage, i, allowed);
+    const next = advance(problem, joint, stages[i] as Stage, i, allowed, bound);
     if (next.begun.length === 0 && next.bare.length === 0) return null;
     stages.push(next);
   }
   return retrace(problem, joint, stages, allowed);
 }
 
-function advance(problem: Problem, joint: JointLimits, from: Stage, index: number, allowed: CountAllowed): Stage {
+function advance(
+  problem: Problem,
+  joint: JointLimits,
+  from: Stage,
+  index: number,
+  allowed: CountAllowed,
+  bound: Cost,
+): Stage {
   const stop = problem.stops[index] as Stop;
   const { lo, hi } = windowOf(problem, index);
   const charge = chargeOf(stop, lo, hi);
-  let begun: Piece[] = [];
+  const arrivals: (readonly Piece[])[] = [];
   for (const [pieces, leastCount] of [
     [from.begun, 0],
     [from.bare, 1],
@@ -59,12 +86,12 @@ function advance(problem: Problem, joint: JointLimits, from: Stage, index: numbe
     for (const count of countsFrom(pieces, lo, hi, problem.unit, joint)) {
       if (count < leastCount || !allowed(index, count)) continue;
       const limits = heightLimits(count, problem.unit, joint);
-      if (limits.least <= limits.most) begun = lowerOf(begun, slideUp(pieces, limits.least, limits.most, lo, hi));
+      if (limits.least <= limits.most) arrivals.push(slideUp(pieces, limits.least, limits.most, lo, hi));
     }
   }
-  begun = sumOf(begun, charge);
+  const begun = prune(sumOf(lowestOf(arrivals), charge), bound);
   if (stop.beamDepth > 0) return { begun: [], bare: raise(begun, stop.beamDepth) };
-  return { begun, bare: allowed(index, 0) ? sumOf(from.bare, charge) : [] };
+  return { begun, bare: allowed(index, 0) ? prune(sumOf(from.bare, charge), bound) : [] };
 }
 
 function countsFrom(pieces: readonly Piece[], lo: number, hi: number, unit: number, joint: JointLimits): number[] {
