@@ -63,11 +63,10 @@ function simpleLoops(walk: readonly Step[]): readonly (readonly Step[])[] {
   return loops;
 }
 
-/** Walks round one connected part from its leftmost corner, the outside at the right: counter-clockwise. */
-function walkRound(graph: Graph, start: Step): readonly Step[] {
+/** Walks round one connected part from its leftmost corner, the outside at the right: counter-clockwise, `most` steps at most. */
+function walkRound(graph: Graph, start: Step, most: number): readonly Step[] {
   const walk: Step[] = [];
   let step = start;
-  const most = 2 * [...graph.runsAt.values()].reduce((sum, runs) => sum + runs.length, 0);
   do {
     walk.push(step);
     const next = graph.farEnd(step.runId, step.cornerId);
@@ -75,7 +74,7 @@ function walkRound(graph: Graph, start: Step): readonly Step[] {
     const turned = runs[(runs.indexOf(step.runId) + 1) % runs.length];
     if (turned === undefined) break;
     step = { cornerId: next, runId: turned };
-  } while ((step.cornerId !== start.cornerId || step.runId !== start.runId) && walk.length <= most);
+  } while ((step.cornerId !== start.cornerId || step.runId !== start.runId) && walk.length < most);
   return walk;
 }
 
@@ -90,6 +89,8 @@ export function findLoops(
   const byPlace = [...corners].sort((a, b) => a.at.x - b.at.x || a.at.y - b.at.y);
   const seen = new Set<string>();
   const loops: (readonly Step[])[] = [];
+  // Every run is walked once each way at most.
+  const most = 2 * runs.size;
   for (const corner of byPlace) {
     const here = graph.runsAt.get(corner.cornerId) ?? [];
     if (seen.has(corner.cornerId) || here.length === 0) continue;
@@ -100,7 +101,7 @@ export function findLoops(
       const turn = crossSign(a.x - corner.at.x, a.y - corner.at.y, b.x - corner.at.x, b.y - corner.at.y);
       return turn < 0 ? runId : best;
     });
-    loops.push(...simpleLoops(walkRound(graph, { cornerId: corner.cornerId, runId: lowest })));
+    loops.push(...simpleLoops(walkRound(graph, { cornerId: corner.cornerId, runId: lowest }, most)));
     const reached = [corner.cornerId];
     for (let id = reached.pop(); id !== undefined; id = reached.pop()) {
       if (seen.has(id)) continue;

@@ -1,10 +1,19 @@
 /** Adds wall runs: from and to corners that are there, places on runs (which makes a tee), or bare points. */
 import type { PlanPoint } from '../../geometry/point';
 import { along, samePoint, sub, toPoint, unit } from '../../geometry/vec';
-import { ticks, type Ticks } from '../../length/ticks';
+import type { Ticks } from '../../length/ticks';
 import { nextLetter } from '../letters';
 import type { Drawing, Opening, WallRun } from '../schema';
-import { areJoined, findCorner, isOnPlan, lengthBetween, MOST_THINGS, runWithCorners, type NewId } from './find';
+import {
+  areJoined,
+  findCorner,
+  isOnPlan,
+  lengthBetween,
+  MOST_THINGS,
+  runWithCorners,
+  type NewId,
+  placeAlong,
+} from './find';
 
 /** Where a run starts or ends: a corner, a place on a run measured along its outside face, or a point of the plan. */
 export type EndPlace =
@@ -35,7 +44,7 @@ function splitRun(drawing: Drawing, run: WallRun, cornerId: string, at: Ticks, n
   const toHalf = (opening: Opening): Opening =>
     opening.runId !== run.id || opening.at + opening.width / 2 < at
       ? opening
-      : { ...opening, runId: second.id, at: ticks(opening.at - at) };
+      : { ...opening, runId: second.id, at: placeAlong(opening.at - at) };
   return {
     ...drawing,
     runs: drawing.runs.flatMap((one) => (one.id === run.id ? [{ ...one, to: cornerId }, second] : [one])),

@@ -1,9 +1,8 @@
 /** Closes a chain of runs into an outline, and turns runs round so that an outline stands inside its line. */
 import { signedArea } from '../../geometry/polygon';
-import { ticks } from '../../length/ticks';
 import type { Drawing, Opening, WallRun } from '../schema';
 import { addRun } from './addRun';
-import { findCorner, lengthBetween, otherEnd, runsByCorner, type NewId } from './find';
+import { findCorner, lengthBetween, otherEnd, runsByCorner, type NewId, placeAlong } from './find';
 
 interface Chain {
   /** From the corner that was asked for to the other end; the same corner again where the chain is closed. */
@@ -49,7 +48,7 @@ export function closeLoop(drawing: Drawing, cornerId: string, newId: NewId): Dra
 }
 
 function turnOpening(opening: Opening, length: number): Opening {
-  const at = ticks(length - opening.at - opening.width);
+  const at = placeAlong(length - opening.at - opening.width);
   if (opening.kind !== 'door') return { ...opening, at };
   const hinge = opening.swing.hinge === 'near' ? 'far' : 'near';
   return { ...opening, at, swing: { ...opening.swing, hinge } };

@@ -1,9 +1,8 @@
 /** Deletes a thing and what can't stand without it. */
 import { dot } from '../../geometry/vec';
-import { ticks } from '../../length/ticks';
 import type { ThingRef } from '../../things';
 import type { Drawing, Opening, WallRun } from '../schema';
-import { areJoined, findCorner, lengthBetween, otherEnd, runsByCorner } from './find';
+import { areJoined, findCorner, lengthBetween, otherEnd, runsByCorner, placeAlong } from './find';
 import { deleteKeepClear } from './keepClears';
 import { deleteBondBeam, deleteControlHeight } from './heights';
 import { areInLine, directionFrom, planOf } from './straight';
@@ -53,7 +52,7 @@ function joinRunsAt(drawing: Drawing, cornerId: string, a: WallRun, b: WallRun):
   if (!corner || !from || !to) return null;
   const shift = lengthBetween(from, to) - lengthBetween(corner, to);
   const moved = (opening: Opening): Opening =>
-    opening.runId === second.id ? { ...opening, runId: first.id, at: ticks(opening.at + shift) } : opening;
+    opening.runId === second.id ? { ...opening, runId: first.id, at: placeAlong(opening.at + shift) } : opening;
   return {
     ...drawing,
     runs: drawing.runs.flatMap((run) => {

@@ -44,6 +44,11 @@ export function isOnPlan(point: PlanPoint): boolean {
   );
 }
 
+/** A distance along a run, kept within what a drawing can hold. */
+export function placeAlong(at: number): Ticks {
+  return roundTicks(Math.max(-MAX_COORDINATE, Math.min(MAX_COORDINATE, at)));
+}
+
 /** Whether a run already joins two corners, either way round. */
 export function areJoined(drawing: Drawing, a: string, b: string): boolean {
   return drawing.runs.some((run) => (run.from === a && run.to === b) || (run.from === b && run.to === a));

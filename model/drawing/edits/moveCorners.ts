@@ -2,9 +2,9 @@
 import type { PlanPoint } from '../../geometry/point';
 import { meetLines, partAlong } from '../../geometry/segment';
 import { between, distance, dot, samePoint, sub, toPoint, unit } from '../../geometry/vec';
-import { roundTicks, ticks } from '../../length/ticks';
+import { roundTicks } from '../../length/ticks';
 import type { Corner, Drawing, Opening, WallRun } from '../schema';
-import { findCorner, isOnPlan, lengthBetween } from './find';
+import { findCorner, isOnPlan, lengthBetween, placeAlong } from './find';
 import { placeOf, planOf, straightWall, wayOff } from './straight';
 
 function shiftOf(run: WallRun, before: ReadonlyMap<string, Corner>, moved: ReadonlyMap<string, PlanPoint>): number {
@@ -40,7 +40,7 @@ export function placeCorners(drawing: Drawing, places: ReadonlyMap<string, PlanP
   }
   const shifted = (opening: Opening): Opening => {
     const shift = shifts.get(opening.runId);
-    return shift === undefined ? opening : { ...opening, at: ticks(opening.at + shift) };
+    return shift === undefined ? opening : { ...opening, at: placeAlong(opening.at + shift) };
   };
   return {
     ...drawing,
