@@ -110,7 +110,11 @@ export function createSelectTool(host: ToolHost): Tool {
     handle(event) {
       if (event.kind === 'key' || event.kind === 'hover') return 'keep';
       if (event.kind === 'down') {
-        state = { name: 'pointing', down: event, thing: host.hit(event.plan, host.reach(event.pointer)) };
+        state = {
+          name: 'pointing',
+          down: event,
+          thing: meant(host.hit(event.plan, host.reach(event.pointer)), draft.get().drawing),
+        };
         return 'keep';
       }
       if (event.kind === 'cancel') {
@@ -153,4 +157,11 @@ export function createSelectTool(host: ToolHost): Tool {
     },
     stateName: () => state.name,
   };
+}
+
+/** A pole and its braces stand for the corner they belong to; a pole along a run stands for itself. */
+function meant(thing: ThingRef | null, drawing: Drawing): ThingRef | null {
+  if (thing?.kind !== 'pole' && thing?.kind !== 'brace') return thing;
+  const poleId = thing.kind === 'brace' ? thing.id.replace(/\.\d+$/, '') : thing.id;
+  return cornerById(drawing, poleId) ? { kind: 'corner', id: poleId } : { kind: 'pole', id: poleId };
 }

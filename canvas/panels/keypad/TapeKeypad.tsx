@@ -1,13 +1,13 @@
-import { useEffect, useRef } from 'react';
 import { View } from 'react-native';
 import type { Units } from '../../../model/drawing/schema';
 import { TICKS_PER_INCH, type Ticks } from '../../../model/length/ticks';
-import { fractionOf, pressTapeKey, typeTapeKey, type TapeKey } from '../../input/tapeEntry';
+import { fractionOf, pressTapeKey, type TapeKey } from '../../input/tapeEntry';
 import { Button } from '../../ui/Button';
 import { space } from '../../ui/tokens';
 import { useTheme } from '../../ui/theme';
 import { useWords } from '../../ui/words';
 import { Key } from './Key';
+import { useTapeTyping } from './useTapeTyping';
 
 export interface TapeKeypadProps {
   readonly units: Units;
@@ -36,7 +36,7 @@ export function TapeKeypad(props: TapeKeypadProps) {
   const t = useWords();
   const height = compact ? 48 : 56;
   const parts = units === 'imperial' ? fractionOf(value) : null;
-  useTyping(value, onChange, enterDisabled ? null : onEnter);
+  useTapeTyping({ value, onChange, onEnter: enterDisabled ? null : onEnter });
 
   const digit = (face: string): KeySpec => ({ means: { kind: 'digit', digit: face }, face, spoken: face });
   const erase: KeySpec = { means: { kind: 'erase' }, face: 'erase', spoken: t('plan.keypad.erase') };
@@ -140,31 +140,4 @@ export function TapeKeypad(props: TapeKeypadProps) {
       />
     </View>
   );
-}
-
-/** A physical keyboard types into the keypad while no field has the focus. */
-function useTyping(value: string, onChange: (text: string) => void, onEnter: (() => void) | null): void {
-  const latest = useRef({ value, onChange, onEnter });
-  useEffect(() => {
-    latest.current = { value, onChange, onEnter };
-  });
-  useEffect(() => {
-    function onKey(event: KeyboardEvent): void {
-      const inField = event.target instanceof HTMLElement && /^(INPUT|TEXTAREA|SELECT)$/.test(event.target.tagName);
-      if (inField || event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey) return;
-      const onControl = event.target instanceof HTMLElement && event.target.closest('button,[role=button],a') !== null;
-      if (event.key === 'Enter') {
-        if (onControl || !latest.current.onEnter) return;
-        latest.current.onEnter();
-      } else {
-        if (event.key === ' ' && onControl) return;
-        const text = typeTapeKey(latest.current.value, event.key);
-        if (text === null) return;
-        latest.current.onChange(text);
-      }
-      event.preventDefault();
-    }
-    globalThis.addEventListener?.('keydown', onKey);
-    return () => globalThis.removeEventListener?.('keydown', onKey);
-  }, []);
 }

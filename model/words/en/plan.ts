@@ -43,6 +43,10 @@ export const plan = {
   details: 'Details',
   parts: 'Parts of the plan',
   side: 'Beside the plan',
+  wallBeside: 'Wall {{name}}, from outside',
+  poleTab: 'Pole',
+  sizes: 'Sizes',
+  fits: 'Fit',
 
   ledger: {
     pole: 'Pole {{letter}} · first course, below the level line',
@@ -237,6 +241,7 @@ export const plan = {
   inspector: {
     nothing: 'Tap a wall, a corner or an opening to see its sizes.',
     observer: 'Your role looks and does not change the drawing.',
+    pressDraw: 'Press Draw to change these.',
     kind: 'Kind',
     door: 'Door',
     window: 'Window',

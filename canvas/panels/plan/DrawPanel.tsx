@@ -1,0 +1,163 @@
+import { useState } from 'react';
+import { View } from 'react-native';
+import type { ActionContext } from '../../actions/action';
+import { finish } from '../../actions/historyActions';
+import { duplicate, flipHinge, openOtherWay, remove, turnRun } from '../../actions/thingActions';
+import { penDraws, snapping } from '../../actions/viewActions';
+import { Button } from '../../ui/Button';
+import { IconButton } from '../../ui/IconButton';
+import { Measurement } from '../../ui/Measurement';
+import { space } from '../../ui/tokens';
+import { useTheme } from '../../ui/theme';
+import { Txt } from '../../ui/Txt';
+import { useWords } from '../../ui/words';
+import { TapeKeypad } from '../keypad/TapeKeypad';
+import { useTapeTyping } from '../keypad/useTapeTyping';
+import { useDraft } from '../workspace/workspace';
+import { ActionButton } from './ActionButton';
+import { AngleDialog } from './AngleDialog';
+import { Ledger, type LedgerProps } from './Ledger';
+import { ToolRow } from './ToolRow';
+import type { RunEntry } from './useRunEntry';
+
+export interface DrawPanelProps extends LedgerProps {
+  readonly context: ActionContext;
+  readonly entry: RunEntry;
+  /** Keys are shown where a finger points; elsewhere the physical keyboard types. */
+  readonly keys: boolean;
+}
+
+/** Under the plan while drawing: the length being set, its keypad, the commands and the tools. */
+export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
+  const { colours, strokes } = useTheme();
+  const t = useWords();
+  const units = useDraft((state) => state.drawing.units);
+  const step = useDraft((state) => state.drawing.tapeStep);
+  const tool = useDraft((state) => state.tool);
+  const [keypad, setKeypad] = useState(false);
+  const shown = keys && keypad && entry.drawing;
+  const typing = { value: entry.text, onChange: entry.onChange, onEnter: entry.place };
+  useTapeTyping(entry.drawing && !shown ? typing : null);
+
+  return (
+    <View style={{ backgroundColor: colours.surface, borderTopWidth: strokes.hair, borderColor: colours.rule }}>
+      {entry.drawing ? (
+        <RunEntryRow context={context} entry={entry} keypad={shown} onKeypad={keys ? setKeypad : null} />
+      ) : tool === 'select' ? (
+        <Ledger {...ledger} />
+      ) : (
+        <Txt tone="soft" size="large" style={{ padding: space.l }}>
+          {t(`plan.toolTells.${tool}`)}
+        </Txt>
+      )}
+      {shown ? (
+        <TapeKeypad
+          compact
+          units={units}
+          step={step}
+          value={entry.text}
+          onChange={entry.onChange}
+          onEnter={entry.place}
+          enterLabel={t('plan.place')}
+        />
+      ) : (
+        <CommandRow context={context} />
+      )}
+      <ToolRow context={context} />
+    </View>
+  );
+}
+
+function CommandRow({ context }: { context: ActionContext }) {
+  const penSeen = useDraft((state) => state.pen !== 'unseen');
+  const kind = useDraft((state) => state.selection?.kind ?? null);
+  const isDoor = useDraft(
+    (state) =>
+      state.selection?.kind === 'opening' &&
+      state.drawing.openings.some((one) => one.id === state.selection?.id && one.kind === 'door'),
+  );
+  return (
+    <View
+      style={{
+        flexDirection: 'row',
+        alignItems: 'center',
+        gap: space.xs,
+        paddingHorizontal: space.s,
+        paddingBottom: space.xs,
+      }}
+    >
+      <ActionButton action={snapping} context={context} />
+      {penSeen ? <ActionButton action={penDraws} context={context} /> : null}
+      <View style={{ flex: 1 }} />
+      {isDoor ? <ActionButton action={flipHinge} context={context} /> : null}
+      {isDoor ? <ActionButton action={openOtherWay} context={context} /> : null}
+      {kind === 'opening' ? <ActionButton action={duplicate} context={context} /> : null}
+      {kind === 'run' ? <ActionButton action={turnRun} context={context} /> : null}
+      {kind ? <ActionButton action={remove} context={context} /> : null}
+    </View>
+  );
+}
+
+interface RunEntryRowProps {
+  readonly context: ActionContext;
+  readonly entry: RunEntry;
+  readonly keypad: boolean;
+  readonly onKeypad: ((open: boolean) => void) | null;
+}
+
+function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
+  const t = useWords();
+  const [angles, setAngles] = useState(false);
+  const units = useDraft((state) => state.drawing.units);
+  const step = useDraft((state) => state.drawing.tapeStep);
+  const run = useDraft((state) => state.preview?.run ?? null);
+  if (!run) return null;
+  const angle = run.heldAngle ?? run.angle;
+  const unread = entry.text !== '' && run.heldLength === null;
+  return (
+    <View
+      style={{
+        flexDirection: 'row',
+        alignItems: 'flex-end',
+        flexWrap: 'wrap',
+        gap: space.s,
+        padding: space.l,
+        paddingBottom: space.s,
+      }}
+    >
+      <View style={{ flexGrow: 1, flexShrink: 1, minWidth: 130 }}>
+        <Txt tone="soft">{t('plan.length')}</Txt>
+        {unread ? (
+          <Txt numeric size="ledger" weight="semibold" numberOfLines={1}>
+            {entry.text}
+          </Txt>
+        ) : (
+          <Measurement length={run.length} units={units} step={step} size="ledger" form="feet" />
+        )}
+      </View>
+      <Button
+        label={angle === null ? t('plan.angle') : t('plan.degrees', { value: Math.round(angle * 10) / 10 })}
+        spoken={t('plan.typeAngle')}
+        pressed={run.heldAngle !== null}
+        onPress={() => setAngles(true)}
+        style={{ paddingHorizontal: space.m }}
+      />
+      {onKeypad ? (
+        <IconButton
+          icon="ruler"
+          kind="outline"
+          label={keypad ? t('plan.hideKeypad') : t('plan.typeLength')}
+          pressed={keypad}
+          onPress={() => onKeypad(!keypad)}
+        />
+      ) : null}
+      {run.heldLength !== null && !keypad ? <Button label={t('plan.entry.set')} onPress={entry.place} /> : null}
+      <Button
+        label={t('plan.actions.finish')}
+        onPress={() => finish.run(context)}
+        style={{ paddingHorizontal: space.m }}
+      />
+      <AngleDialog open={angles} onClose={() => setAngles(false)} onChoose={entry.holdAngle} />
+    </View>
+  );
+}

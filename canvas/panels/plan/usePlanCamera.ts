@@ -1,0 +1,83 @@
+import { useCallback, useRef, useState } from 'react';
+import { planFigure } from '../../../model/figures/plan';
+import { labelScale } from '../../figures/labelScale';
+import { clampCamera, zoomAbout, type Camera, type ViewSize } from '../../viewport/camera';
+import { fitPlan, groundBox } from '../../viewport/fitPlan';
+import type { Solved } from '../../store/solver';
+import { useWorkspace } from '../workspace/workspace';
+
+const PADDING = { left: 20, top: 20, right: 20, bottom: 20 };
+const NO_SIZE: ViewSize = { width: 0, height: 0 };
+
+export interface PlanCamera {
+  /** Null until the view has a size. */
+  readonly camera: Camera | null;
+  readonly size: ViewSize;
+  readonly onSize: (size: ViewSize) => void;
+  readonly setCamera: (camera: Camera) => void;
+  readonly fit: () => void;
+  readonly zoomBy: (factor: number) => void;
+}
+
+/** Fits the whole plan into a view. */
+export function fitSolved({ drawing, setOut }: Solved, size: ViewSize): Camera {
+  return fitPlan({
+    drawing,
+    setOut,
+    size,
+    padding: PADDING,
+    labelScale,
+    figureAt: (scale) => planFigure(drawing, setOut, { selection: null, scale, dimensions: true }),
+  });
+}
+
+/** The camera over the plan: fitted when the view first has a size, and kept on what it shows as the view changes. */
+export function usePlanCamera(): PlanCamera {
+  const { solver } = useWorkspace();
+  const [state, setState] = useState<{ camera: Camera | null; size: ViewSize }>({ camera: null, size: NO_SIZE });
+  /** True until the person has moved the paper: then a change of the view's size fits it anew. */
+  const fitted = useRef(true);
+
+  const onSize = useCallback(
+    (size: ViewSize) => {
+      setState((before) => {
+        if (size.width <= 0 || size.height <= 0) return before;
+        const { solved } = solver.get();
+        if (solved && (before.camera === null || fitted.current)) return { camera: fitSolved(solved, size), size };
+        return { ...before, size };
+      });
+    },
+    [solver],
+  );
+
+  const setCamera = useCallback(
+    (camera: Camera) => {
+      fitted.current = false;
+      setState((before) => {
+        const { solved } = solver.get();
+        const box = solved && groundBox(solved.drawing, solved.setOut);
+        return { ...before, camera: box ? clampCamera(camera, box, before.size) : { ...camera } };
+      });
+    },
+    [solver],
+  );
+
+  const fit = useCallback(() => {
+    fitted.current = true;
+    setState((before) => {
+      const { solved } = solver.get();
+      return solved && before.size.width > 0 ? { ...before, camera: fitSolved(solved, before.size) } : before;
+    });
+  }, [solver]);
+
+  const zoomBy = useCallback((factor: number) => {
+    fitted.current = false;
+    setState((before) => {
+      const { camera, size } = before;
+      const middle = { x: size.width / 2, y: size.height / 2 };
+      return camera ? { ...before, camera: zoomAbout(camera, size, middle, factor) } : before;
+    });
+  }, []);
+
+  return { ...state, onSize, setCamera, fit, zoomBy };
+}
