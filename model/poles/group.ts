@@ -1,9 +1,13 @@
 /** The cheapest placing of a group of poles whose braces compete for the same ground. */
-import { bracesConflict, type BraceLine } from './clearance';
-import { bestWith, pairsUpTo, type Pair, type PoleBraces } from './pairs';
+import type { Candidate } from './candidates';
+import { bracesConflict } from './clearance';
+import { bestWith, pairOf, type Pair, type PoleBraces } from './pairs';
 
-/** Which of a pole's two braces have met another pole's: only those need keep clear of one another, until more do. */
-export type Relevant = readonly [boolean, boolean];
+/**
+ * When each of a pole's two braces first met another pole's, counted in rounds; null where it never did. Only braces that
+ * have met need keep clear of one another, until more do.
+ */
+export type Relevant = readonly [number | null, number | null];
 
 export interface Member {
   /** Place in the list of all poles. */
@@ -21,11 +25,11 @@ export interface Part {
 }
 
 export interface SearchBound {
-  /** Most steps (options made and pairs of options compared) for one group before it settles for less than the best. */
+  /** Most steps (candidates looked at) for one group before it settles for less than the best. */
   readonly most: number;
 }
 
-export const USUAL_BOUND: SearchBound = { most: 1_000_000 };
+export const USUAL_BOUND: SearchBound = { most: 3_000_000 };
 
 export interface Solved {
   readonly pairs: ReadonlyMap<number, Pair>;
@@ -36,151 +40,203 @@ export interface Solved {
 }
 
 /** Dearer than any pair: a pole is left without braces only where the others leave it no way at all. */
-export const UNBRACED = 1_000_000;
+const UNBRACED = 1_000_000;
 /** Slack over the lower bound within which a group is first searched; it grows until an answer lies within it. */
 const FIRST_SLACK = 16;
 const SLACK_GROWS = 4;
 
-interface Option {
-  readonly pair: Pair | null;
-  readonly cost: number;
-  readonly lines: readonly BraceLine[];
-}
-
 type Spend = () => boolean;
 
-/**
- * The options of one pole that cost no more than `most`, cheapest first. With one brace relevant there is one option for
- * each place of that brace, with the best partner: another partner would cost more and change nothing that is looked at.
- */
-function optionsOf({ pole, own, relevant }: Member, most: number, spend: Spend): Option[] {
-  const option = (pair: Pair): Option => ({
-    pair,
-    cost: pair.cost,
-    lines: pair.braces.flatMap((brace, which) => (relevant[which] ? [{ from: pole.at, foot: brace.foot }] : [])),
-  });
-  if (relevant[0] && relevant[1]) return pairsUpTo(pole, most, spend).map(option);
-  if (!relevant[0] && !relevant[1]) return [option(own)];
-  const which = relevant[0] ? 0 : 1;
-  const found: Option[] = [];
-  for (const candidate of pole.lists()[which]) {
+/** One relevant brace whose place is to be chosen. */
+interface Choice {
+  readonly member: Member;
+  readonly which: 0 | 1;
+  readonly part: number;
+  /** Where among the choices the member's other brace is chosen, when it is chosen before this one. */
+  readonly after: number | null;
+  /** Each candidate that may serve, with the best pair it can be part of, cheapest first. */
+  readonly ranked: readonly Ranked[];
+}
+
+interface Ranked {
+  readonly candidate: Candidate;
+  readonly pair: Pair;
+}
+
+function rank(member: Member, which: 0 | 1, most: number, spend: Spend): Ranked[] {
+  const found: Ranked[] = [];
+  for (const candidate of member.pole.lists()[which]) {
     if (candidate.cost > most || !spend()) break;
-    const pair = bestWith(pole, candidate, which, most);
-    if (pair) found.push(option(pair));
+    const pair = bestWith(member.pole, candidate, which, most);
+    if (pair) found.push({ candidate, pair });
   }
-  return found.sort((a, b) => a.cost - b.cost);
+  return found.sort((a, b) => a.pair.cost - b.pair.cost);
 }
 
-function areClear(a: Option, b: Option, clearance: number): boolean {
-  return !a.lines.some((line) => b.lines.some((other) => bracesConflict(line, other, clearance)));
-}
-
-interface Best {
-  cost: number;
-  chosen: readonly Option[] | null;
-}
-
-/**
- * Depth first through the options, part by part. A branch ends when what is placed, and the least that the rest can cost,
- * reach the best found: the rest of a part costs at least its members' own optima, and the part at least its lower bound.
- */
-function descend(
-  parts: readonly Part[],
-  options: ReadonlyMap<Member, readonly Option[]>,
-  best: Best,
-  clearance: number,
-  spend: Spend,
-): void {
-  const order = parts.flatMap((part, p) =>
-    part.members.map((member, m) => ({ member, p, left: ownSum(part.members.slice(m + 1)) })),
+/** The relevant braces in the order in which they met, so that those in each other's way are chosen one after another. */
+function choicesOf(parts: readonly Part[], slack: number, spend: Spend): Choice[] {
+  const wanted = parts.flatMap(({ members, lower }, part) =>
+    members.flatMap((member) => {
+      const most = Math.min(UNBRACED - 1, slack + lower - (ownSum(members) - member.own.cost));
+      return ([0, 1] as const).flatMap((which) => {
+        const round = member.relevant[which];
+        return round === null ? [] : [{ member, which, part, most, round }];
+      });
+    }),
   );
-  const later = parts.map((_, p) => parts.slice(p + 1).reduce((sum, part) => sum + part.lower, 0));
-  const chosen: Option[] = [];
-  const step = (depth: number, closed: number, within: number): void => {
-    const at = order[depth];
-    if (!at) {
-      best.cost = closed + within;
-      best.chosen = [...chosen];
-      return;
-    }
-    const starts = order[depth - 1]?.p !== at.p;
-    const before = starts ? closed + within : closed;
-    const so = starts ? 0 : within;
-    const lower = parts[at.p]?.lower ?? 0;
-    for (const option of options.get(at.member) ?? []) {
-      const part = Math.max(so + option.cost + at.left, lower);
-      if (before + part + (later[at.p] ?? 0) >= best.cost) {
-        if (so + option.cost + at.left >= lower) return;
-        continue;
-      }
-      if (!spend()) return;
-      if (!chosen.every((other) => areClear(option, other, clearance))) continue;
-      chosen.push(option);
-      step(depth + 1, before, so + option.cost);
-      chosen.pop();
-    }
-  };
-  step(0, 0, 0);
+  wanted.sort((a, b) => a.round - b.round);
+  const firsts = new Map<Member, number>();
+  return wanted.map(({ member, which, part, most }, i) => {
+    const after = firsts.get(member) ?? null;
+    if (after === null) firsts.set(member, i);
+    return { member, which, part, after, ranked: rank(member, which, most, spend) };
+  });
 }
 
 function ownSum(members: readonly Member[]): number {
   return members.reduce((sum, member) => sum + member.own.cost, 0);
 }
 
+/** Whether two candidates conflict, worked out once for each two. */
+function conflictTable(clearance: number): (a: Member, p: Candidate, b: Member, q: Candidate) => boolean {
+  const known = new Map<Candidate, Map<Candidate, boolean>>();
+  return (a, p, b, q) => {
+    let row = known.get(p);
+    if (!row) known.set(p, (row = new Map()));
+    let answer = row.get(q);
+    if (answer === undefined) {
+      answer = bracesConflict({ from: a.pole.at, foot: p.foot }, { from: b.pole.at, foot: q.foot }, clearance);
+      row.set(q, answer);
+    }
+    return answer;
+  };
+}
+
+interface Best {
+  cost: number;
+  pairs: ReadonlyMap<Member, Pair | null> | null;
+}
+
+interface Descent {
+  readonly parts: readonly Part[];
+  readonly choices: readonly Choice[];
+  readonly mayLeave: boolean;
+  readonly conflict: ReturnType<typeof conflictTable>;
+  readonly spend: Spend;
+}
+
 /**
- * The cheapest placing of a group. Within a slack over the lower bound each member has finitely many options, since the
- * others cost at least their own parts of that bound. An answer within the slack is the least there is; none widens the
- * slack, and at last a pole may go unbraced. Where the bound on steps is reached, the best found so far is kept, or one
- * pole after another takes what is free.
+ * Depth first, one brace at a time. A branch ends when the least that its whole placing can cost reaches the best found:
+ * each pole costs at least the best pair that keeps what is chosen of it, and each part at least its lower bound.
+ */
+function descend({ parts, choices, mayLeave, conflict, spend }: Descent, best: Best): void {
+  const sums = parts.map(({ members }) => ownSum(members));
+  const pairs = new Map<Member, Pair | null>(
+    parts.flatMap(({ members }) => members.map((member) => [member, member.own])),
+  );
+  const chosen: (Candidate | null)[] = [];
+  const total = (part: number, change: number): number =>
+    parts.reduce((sum, { lower }, p) => sum + Math.max(lower, (sums[p] ?? 0) + (p === part ? change : 0)), 0);
+  const costOf = (pair: Pair | null | undefined) => (pair ? pair.cost : UNBRACED);
+  const isClear = (depth: number, choice: Choice, candidate: Candidate): boolean =>
+    chosen.every((other, n) => {
+      const earlier = choices[n];
+      return (
+        !other ||
+        !earlier ||
+        n >= depth ||
+        earlier.member === choice.member ||
+        !conflict(earlier.member, other, choice.member, candidate)
+      );
+    });
+  const take = (depth: number, choice: Choice, candidate: Candidate | null, pair: Pair | null): void => {
+    const before = pairs.get(choice.member) ?? null;
+    const change = costOf(pair) - costOf(before);
+    sums[choice.part] = (sums[choice.part] ?? 0) + change;
+    pairs.set(choice.member, pair);
+    chosen[depth] = candidate;
+    step(depth + 1);
+    chosen.length = depth;
+    pairs.set(choice.member, before);
+    sums[choice.part] = (sums[choice.part] ?? 0) - change;
+  };
+  const step = (depth: number): void => {
+    const choice = choices[depth];
+    if (!choice) {
+      const cost = total(-1, 0);
+      if (cost < best.cost) {
+        best.cost = cost;
+        best.pairs = new Map(pairs);
+      }
+      return;
+    }
+    const held = pairs.get(choice.member) ?? null;
+    if (choice.after !== null && !held) return take(depth, choice, null, null);
+    const first = choice.after === null ? null : (chosen[choice.after] ?? null);
+    for (const { candidate, pair: own } of choice.ranked) {
+      if (total(choice.part, own.cost - costOf(held)) >= best.cost) break;
+      if (!spend()) return;
+      if (!isClear(depth, choice, candidate)) continue;
+      const pair = first ? pairOf(choice.member.pole, first, candidate, choice.which) : own;
+      if (!pair || total(choice.part, pair.cost - costOf(held)) >= best.cost) continue;
+      take(depth, choice, candidate, pair);
+    }
+    if (mayLeave && choice.after === null && total(choice.part, UNBRACED - costOf(held)) < best.cost)
+      take(depth, choice, null, null);
+  };
+  step(0);
+}
+
+/**
+ * The cheapest placing of a group. Within a slack over the lower bound each pole has finitely many pairs, since the others
+ * cost at least their own parts of that bound. An answer within the slack is the least there is; none widens the slack, and
+ * at last a pole may go unbraced. Where the bound on steps is reached, the best found so far is kept, or one pole after
+ * another takes what is free.
  */
 export function solveGroup(parts: readonly Part[], clearance: number, bound: SearchBound): Solved {
   const floor = parts.reduce((sum, part) => sum + part.lower, 0);
+  const conflict = conflictTable(clearance);
   let spent = 0;
   const spend = () => (spent += 1) <= bound.most;
   for (let slack = FIRST_SLACK; ; slack *= SLACK_GROWS) {
-    const last = slack >= UNBRACED || floor >= UNBRACED;
-    const options = new Map<Member, readonly Option[]>();
-    for (const part of parts)
-      for (const member of part.members) {
-        const most = slack + part.lower - (ownSum(part.members) - member.own.cost);
-        const list = optionsOf(member, Math.min(most, UNBRACED - 1), spend);
-        if (last) list.push({ pair: null, cost: UNBRACED, lines: [] });
-        options.set(member, list);
-      }
-    const best: Best = { cost: last ? Infinity : floor + slack + 1, chosen: null };
-    descend(parts, options, best, clearance, spend);
+    const mayLeave = slack >= UNBRACED || floor >= UNBRACED;
+    const choices = choicesOf(parts, mayLeave ? UNBRACED : slack, spend);
+    const best: Best = { cost: mayLeave ? Infinity : floor + slack + 1, pairs: null };
+    descend({ parts, choices, mayLeave, conflict, spend }, best);
     const exact = spent <= bound.most;
-    if (best.chosen) return solved(parts, best.chosen, best.cost, exact);
-    if (!exact || last) return settle(parts, clearance);
+    if (best.pairs) return solved(best.pairs, best.cost, exact);
+    if (!exact || mayLeave) return settle(parts, conflict);
   }
 }
 
-function solved(parts: readonly Part[], chosen: readonly Option[], cost: number, exact: boolean): Solved {
-  const pairs = new Map<number, Pair>();
-  parts
-    .flatMap((part) => part.members)
-    .forEach((member, i) => {
-      const pair = chosen[i]?.pair;
-      if (pair) pairs.set(member.index, pair);
-    });
-  return { pairs, cost, exact };
+function solved(pairs: ReadonlyMap<Member, Pair | null>, cost: number, exact: boolean): Solved {
+  const byIndex = new Map<number, Pair>();
+  for (const [member, pair] of pairs) if (pair) byIndex.set(member.index, pair);
+  return { pairs: byIndex, cost, exact };
 }
 
 /** Steps that one pole may take when poles are settled one after another. */
-const SETTLE_STEPS = 20_000;
+const SETTLE_STEPS = 50_000;
 
-function settle(parts: readonly Part[], clearance: number): Solved {
-  const pairs = new Map<number, Pair>();
-  const placed: Option[] = [];
-  let cost = 0;
+/** One pole after another, each as if the earlier ones could not be moved. */
+function settle(parts: readonly Part[], conflict: Descent['conflict']): Solved {
+  const placed = new Map<Member, Pair | null>();
   for (const member of parts.flatMap((part) => part.members)) {
     let steps = 0;
-    const options = optionsOf(member, UNBRACED - 1, () => (steps += 1) <= SETTLE_STEPS);
-    const free = options.find((option) => placed.every((other) => areClear(option, other, clearance)));
-    cost += free?.cost ?? UNBRACED;
-    if (!free?.pair) continue;
-    placed.push(free);
-    pairs.set(member.index, free.pair);
+    const spend = () => (steps += 1) <= SETTLE_STEPS;
+    const alone: Part = { members: [member], lower: member.own.cost };
+    const isFree = (choice: Choice, candidate: Candidate) =>
+      [...placed].every(
+        ([other, pair]) => !pair?.braces.some((brace) => conflict(other, brace, choice.member, candidate)),
+      );
+    const choices = choicesOf([alone], UNBRACED, spend).map((choice) => ({
+      ...choice,
+      ranked: choice.ranked.filter(({ candidate }) => isFree(choice, candidate)),
+    }));
+    const best: Best = { cost: Infinity, pairs: null };
+    descend({ parts: [alone], choices, mayLeave: true, conflict, spend }, best);
+    placed.set(member, best.pairs?.get(member) ?? null);
   }
-  return { pairs, cost, exact: false };
+  const cost = [...placed.values()].reduce((sum, pair) => sum + (pair ? pair.cost : UNBRACED), 0);
+  return solved(placed, cost, false);
 }

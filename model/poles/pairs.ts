@@ -120,25 +120,13 @@ export function cheapestPair(braces: PoleBraces): Pair | null {
   return best;
 }
 
-/** Every pair that costs no more than `most`, cheapest first; `spend` is called for each pair looked at and may end it. */
-export function pairsUpTo(braces: PoleBraces, most: number, spend: () => boolean): Pair[] {
-  const [first, second] = braces.lists();
-  const leastSecond = second[0]?.cost ?? Infinity;
-  const found: Pair[] = [];
-  for (const a of first) {
-    if (a.cost + leastSecond > most) break;
-    const costA = fullCost(braces, a);
-    if (costA === null) continue;
-    for (const b of second) {
-      if (costA + b.cost > most) break;
-      if (!spend()) return found.sort((p, q) => p.cost - q.cost);
-      const angle = angleCost(a, b, braces.limits);
-      if (angle === null || costA + b.cost + angle > most) continue;
-      const costB = fullCost(braces, b);
-      if (costB !== null && costA + costB + angle <= most) found.push({ cost: costA + costB + angle, braces: [a, b] });
-    }
-  }
-  return found.sort((p, q) => p.cost - q.cost);
+/** The pair of two candidates, `second` being brace `which` of the pole; null where either can't stand or the angle is out. */
+export function pairOf(braces: PoleBraces, first: Candidate, second: Candidate, which: 0 | 1): Pair | null {
+  const angle = angleCost(first, second, braces.limits);
+  const costs = angle === null ? null : [fullCost(braces, first), fullCost(braces, second)];
+  const [a, b] = costs ?? [];
+  if (angle === null || a == null || b == null) return null;
+  return { cost: a + b + angle, braces: which === 0 ? [second, first] : [first, second] };
 }
 
 /** The cheapest pair with one brace given, within `most`; null where it can't stand or finds no partner. */

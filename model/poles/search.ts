@@ -117,17 +117,17 @@ class Groups {
 export function placeBraces(poles: readonly PoleBraces[], clearance: number, bound: SearchBound): Placed {
   const own = poles.map((pole) => cheapestPair(pole));
   const pairs: (Pair | null)[] = [...own];
-  const relevant = poles.map((): [boolean, boolean] => [false, false]);
+  const relevant = poles.map((): [number | null, number | null] => [null, null]);
   const groups = new Groups(own);
   const member = (index: number): Member[] => {
     const [pole, pair, which] = [poles[index], own[index], relevant[index]];
     return pole && pair && which ? [{ index, pole, own: pair, relevant: which }] : [];
   };
-  for (;;) {
+  for (let round = 0; ; round += 1) {
     for (const [a, b] of conflicts(poles, pairs, clearance)) {
       for (const { pole, which } of [a, b]) {
         const marks = relevant[pole];
-        if (marks) marks[which] = true;
+        if (marks && marks[which] === null) marks[which] = round;
       }
       groups.join(a.pole, b.pole);
     }
