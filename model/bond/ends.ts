@@ -59,21 +59,43 @@ export function endByKind(kind: EndKind, width: number, goesThrough: Parity, ste
   }
 }
 
-/** An end of a real run, measured from that corner into the run; the arriving run goes through in odd courses. */
-export function endOfRun(walls: Walls, run: RunGeometry, which: 0 | 1): EndPair {
+/** How a run meets the other run at a corner of two: whether it counts there as the one that arrives. */
+export function arrivesAt(walls: Walls, run: RunGeometry, which: 0 | 1): boolean {
   const end = run.ends[which];
-  const other = end.others.length > 0 ? walls.runById.get(end.others[0]!) : undefined;
-  const corner = walls.cornerById.get(end.cornerId);
-  const width = other ? skewWidth(other.thickness, corner?.angle ?? null) : 0;
-  const otherArrives = other ? other.ends[1].cornerId === end.cornerId : false;
-  const arrives = which === 1 && !(otherArrives && other!.runId < run.runId);
-  const leavesFirst = which === 0 && !otherArrives && other !== undefined && run.runId < other.runId;
-  const corners = end.others.length === 1 ? end.kind : end.kind === 'free' ? 'free' : 'teeStem';
-  const kind = end.kind === 'outside' || end.kind === 'reentrant' ? corners : end.kind;
-  return endByKind(kind, width, arrives || leavesFirst ? 0 : 1, stemDistance(run, which));
+  const other = walls.runById.get(end.others[0] ?? '');
+  if (!other) return which === 1;
+  const otherArrives = other.ends[1].cornerId === end.cornerId;
+  // Where both arrive or both leave, the one with the lower id counts as arriving.
+  if (which === 1) return !otherArrives || run.runId < other.runId;
+  return !otherArrives && run.runId < other.runId;
 }
 
-/** From the corner along the run to where its outside face starts: the near face of the bar that a stem butts into. */
+/** Whether the end is a corner where this run and one other lap each other in alternation. */
+export function isLappedEnd(run: RunGeometry, which: 0 | 1): boolean {
+  const { kind, others } = run.ends[which];
+  return (kind === 'outside' || kind === 'reentrant') && others.length === 1;
+}
+
+/**
+ * An end of a real run, measured from that corner into the run. `arriverFirst` says in which parity the run that arrives
+ * at that corner goes through; the one that leaves goes through in the other.
+ */
+export function endOfRun(walls: Walls, run: RunGeometry, which: 0 | 1, arriverFirst: Parity): EndPair {
+  const end = run.ends[which];
+  const isCorner = end.kind === 'outside' || end.kind === 'reentrant';
+  const kind = isCorner && !isLappedEnd(run, which) ? 'teeStem' : end.kind;
+  const other = walls.runById.get(end.others[0] ?? '');
+  const width = other ? skewWidth(other.thickness, walls.cornerById.get(end.cornerId)?.angle ?? null) : 0;
+  const through: Parity = arrivesAt(walls, run, which) ? arriverFirst : arriverFirst === 0 ? 1 : 0;
+  return endByKind(kind, width, through, stemDistance(run, which));
+}
+
+/** From an end's corner into the run: where its outside face can start, past the bar that a stem butts into. */
+export function faceDistance(run: RunGeometry, which: 0 | 1): number {
+  const { kind } = run.ends[which];
+  return kind === 'teeStem' || kind === 'cross' ? stemDistance(run, which) : 0;
+}
+
 function stemDistance(run: RunGeometry, which: 0 | 1): number {
   const face = run.outside[which];
   const corner = which === 0 ? run.start : run.end;

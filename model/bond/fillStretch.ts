@@ -195,9 +195,9 @@ function fillBoth(task: StretchTask, limits: BondLimits, mostCuts: number, broke
   return best;
 }
 
-/** Whether a stretch fills with at most so many cuts in its two courses and no rule broken. */
-export function fillsWithCuts(spans: StretchTask['spans'], mostCuts: number, limits: BondLimits): boolean {
-  return fillBoth({ spans, first: 0, both: true, below: null, whole: null }, limits, mostCuts, false) !== null;
+/** The fewest cuts, up to `mostCuts`, with which the two courses of a stretch break no rule; null where it takes more. */
+export function fewestCuts(spans: StretchTask['spans'], mostCuts: number, limits: BondLimits): number | null {
+  return fillBoth({ spans, first: 0, both: true, below: null, whole: null }, limits, mostCuts, false)?.cost[1] ?? null;
 }
 
 /**

@@ -5,9 +5,9 @@ import type { Reason } from '../reasons';
 import type { Walls } from '../walls/types';
 import { chainRuns } from './chains';
 import { layChain } from './layChain';
-import type { FillMemo } from './layZones';
 import { bondLimits } from './limits';
 import { openingHeights } from './stretches';
+import { turnCorners, type BondKit } from './turnCorners';
 import type { Bond, RunBond } from './types';
 
 /**
@@ -18,14 +18,16 @@ export function layBond(drawing: Drawing, walls: Walls, coursing: Coursing): Bon
   const openings = new Map(drawing.openings.map((opening) => [opening.id, opening]));
   const heights = openingHeights(coursing);
   const kits = new Map(
-    drawing.wallTypes.map((type) => [type.id, { limits: bondLimits(type), memo: new Map() as FillMemo }]),
+    drawing.wallTypes.map((type): [string, BondKit] => [type.id, { limits: bondLimits(type), memo: new Map() }]),
   );
   const byRun = new Map<string, RunBond>();
   const reasons: Reason[] = [];
-  for (const chain of chainRuns(walls)) {
+  const chains = chainRuns(walls);
+  const turns = turnCorners(chains, walls, kits);
+  for (const chain of chains) {
     const kit = kits.get(chain.runs[0]!.run.wallTypeId);
     if (!kit) continue;
-    const laid = layChain({ chain, walls, openings, heights, coursing, ...kit });
+    const laid = layChain({ chain, walls, openings, heights, coursing, turns, ...kit });
     for (const run of laid.runs) byRun.set(run.runId, run);
     reasons.push(...laid.reasons);
   }

@@ -7,9 +7,9 @@ import type { Walls } from '../walls/types';
 import type { Chain } from './chains';
 import { checkChain } from './checkChain';
 import { spanLength, type BondLimits } from './courseFill';
-import { endOfRun, type EndPair } from './ends';
+import { endOfRun, type EndPair, type Parity } from './ends';
 import { layZones, type FillMemo } from './layZones';
-import { farEnd, noCutBetween, type NoCut } from './noCut';
+import { farEnd, noCutEitherWay, type NoCut } from './noCut';
 import { shareChain } from './shareChain';
 import { blocksOf, zonesOf } from './stretches';
 import type { RunBond } from './types';
@@ -22,6 +22,8 @@ export interface ChainTask {
   readonly coursing: Coursing;
   readonly limits: BondLimits;
   readonly memo: FillMemo;
+  /** In which parity the arriving run goes through, by corner. */
+  readonly turns: ReadonlyMap<string, Parity>;
 }
 
 function hasSpan(start: EndPair, end: EndPair): boolean {
@@ -30,16 +32,16 @@ function hasSpan(start: EndPair, end: EndPair): boolean {
 
 /** Lays a chain and gives each of its runs the pieces that are its own. */
 export function layChain(task: ChainTask): { runs: RunBond[]; reasons: Reason[] } {
-  const { chain, walls, coursing, limits, memo } = task;
+  const { chain, walls, coursing, limits, memo, turns } = task;
   const firstRun = chain.runs[0]!.run;
   const lastRun = chain.runs[chain.runs.length - 1]!.run;
-  const start = endOfRun(walls, firstRun, 0);
-  const endInto = endOfRun(walls, lastRun, 1);
+  const start = endOfRun(walls, firstRun, 0, turns.get(firstRun.ends[0].cornerId) ?? 0);
+  const endInto = endOfRun(walls, lastRun, 1, turns.get(lastRun.ends[1].cornerId) ?? 0);
   const end = farEnd(endInto, chain.length);
   const blocks = chain.length > 0 ? blocksOf(chain, walls, task.openings, task.heights, coursing) : [];
   const zones = chain.length > 0 && hasSpan(start, end) ? zonesOf(start, end, blocks, coursing) : [];
   const laid = layZones(zones, { start, end }, limits, memo);
-  const noCut = chain.length > 0 ? noCutBetween(start, endInto, chain.length, limits) : { below: null, above: null };
+  const noCut = chain.length > 0 ? noCutEitherWay(start, endInto, chain.length, limits) : { below: null, above: null };
   const noCutOf = (length: number): NoCut => {
     const shift = (value: Ticks | null): Ticks | null => {
       const moved = value === null ? 0 : value - chain.length + length;

@@ -18,7 +18,7 @@ export interface LaidZone {
   readonly stretches: readonly LaidStretch[];
 }
 
-function spansOf(stretch: Stretch): readonly [Span, Span] {
+export function spansOf(stretch: Stretch): readonly [Span, Span] {
   return [
     { from: stretch.start[0], to: stretch.end[0] },
     { from: stretch.start[1], to: stretch.end[1] },
@@ -29,7 +29,7 @@ function keyOfEnd(pair: EndPair, origin: number): string {
   return pair.map((end) => `${end.at - origin}${end.joint ? (end.lapped ? 'j' : 'b') : 'n'}`).join('/');
 }
 
-function keyOfStretch(stretch: Stretch, origin: number): string {
+export function keyOfStretch(stretch: Stretch, origin: number): string {
   return `${keyOfEnd(stretch.start, origin)}|${keyOfEnd(stretch.end, origin)}`;
 }
 
@@ -91,7 +91,7 @@ export function parityOf(course: number): Parity {
 }
 
 /** The bond of the chain from end to end, as if nothing interrupted it. */
-function layWhole(full: Stretch, limits: BondLimits, memo: FillMemo): FillPair {
+export function layWhole(full: Stretch, limits: BondLimits, memo: FillMemo): FillPair {
   const spans = spansOf(full);
   const origin = Math.min(spans[0].from.at, spans[1].from.at);
   const task: StretchTask = { spans, first: 0, both: true, below: null, whole: null };

@@ -4,7 +4,7 @@ import { ticks, type Ticks } from '../length/ticks';
 import type { EndKind } from '../walls/types';
 import type { BondLimits, Span } from './courseFill';
 import { endByKind, type CourseEnd, type EndPair, type Parity } from './ends';
-import { fillsWithCuts } from './fillStretch';
+import { fewestCuts } from './fillStretch';
 import { bondLimits } from './limits';
 import { unitSize } from './unitSize';
 
@@ -47,7 +47,7 @@ export function noCutBetween(start: EndPair, end: EndPair, near: number, limits:
   /** The widest joint that still leaves the least lap where the courses start `apart`. */
   const apart = Math.abs(start[0].at - start[1].at);
   const lapJoint = Math.min(joint.most, Math.max(joint.least, unit - apart - limits.leastLap));
-  const fits = (length: number) => length > 0 && fillsWithCuts(spansAt(start, end, length), plain, limits);
+  const fits = (length: number) => length > 0 && fewestCuts(spansAt(start, end, length), plain, limits) !== null;
 
   /** Lengths that `count` units of one parity reach, inside what the other parity reaches when no end is plain. */
   const reach = (p: Parity, count: number): [number, number][] => {
@@ -89,6 +89,24 @@ export function noCutBetween(start: EndPair, end: EndPair, near: number, limits:
 /** Counts of units tried to each side of the nearest; a module each, so the nearest length is always among them. */
 const MOST_STEPS = 4;
 
+/** The same end with odd and even courses exchanged. */
+export function exchanged(pair: EndPair): EndPair {
+  return [pair[1], pair[0]];
+}
+
+/**
+ * The nearest lengths that need no cutting whichever way the corners are turned: the run passing through at one end in
+ * odd courses and at the other in even ones, or at both ends in the same courses.
+ */
+export function noCutEitherWay(start: EndPair, end: EndPair, near: number, limits: BondLimits): NoCut {
+  const one = noCutBetween(start, end, near, limits);
+  if (isPlain(start) || isPlain(end) || (one.below === near && one.above === near)) return one;
+  const other = noCutBetween(start, exchanged(end), near, limits);
+  const pick = (a: Ticks | null, b: Ticks | null, way: -1 | 1) =>
+    a === null ? b : b === null ? a : way * (a - b) < 0 ? a : b;
+  return { below: pick(one.below, other.below, -1), above: pick(one.above, other.above, 1) };
+}
+
 /**
  * Lengths for a run still being drawn, by its kind of ends, beside a wall of its own type at right angles: what a length
  * snaps to. Where `near` itself needs no cutting both are `near`.
@@ -97,5 +115,5 @@ export function noCutLengths(wallType: WallType, endKinds: readonly [EndKind, En
   const { thickness } = unitSize(wallType);
   const start = endByKind(endKinds[0], thickness, 1, 0);
   const end = endByKind(endKinds[1], thickness, 0, 0);
-  return noCutBetween(start, end, near, bondLimits(wallType));
+  return noCutEitherWay(start, end, near, bondLimits(wallType));
 }

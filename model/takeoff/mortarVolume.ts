@@ -1,5 +1,5 @@
 /** Mortar by kind: under the first course, in the bed joints, and in the head joints. */
-import { endOfRun, type Parity } from '../bond/ends';
+import { faceDistance } from '../bond/ends';
 import type { BondPattern } from '../bond/types';
 import { unitSize } from '../bond/unitSize';
 import type { Bond } from '../bond/types';
@@ -24,27 +24,27 @@ interface CourseShape {
 const PER_CUBIC_MM = TICKS_PER_MM ** 3;
 
 /** The masonry of a course: pieces nearer than the widest head joint are joined, what is wider is an opening or a lintel. */
-function shapeOf(pattern: BondPattern, run: RunGeometry, walls: Walls, parity: Parity, mostJoint: number): CourseShape {
+function shapeOf(pattern: BondPattern, run: RunGeometry, mostJoint: number): CourseShape {
   const laid: number[] = [];
   let headJoints = 0;
-  const start = endOfRun(walls, run, 0)[parity];
-  const end = endOfRun(walls, run, 1)[parity];
-  let reached = start.joint ? start.at : -Infinity;
+  // What a course butts against at a reentrant corner or a bar is not among its pieces.
+  let reached = faceDistance(run, 0);
   const isJoint = (gap: number) => gap > 0 && gap <= mostJoint + 1;
   for (const piece of pattern.pieces) {
+    const joined = isJoint(piece.start - reached);
+    if (joined) headJoints += piece.start - reached;
     if (piece.kind === 'return') {
+      if (joined && laid.length > 0) laid[laid.length - 1] = piece.start;
       reached = Math.max(reached, piece.end);
       continue;
     }
-    const joined = isJoint(piece.start - reached);
-    if (joined) headJoints += piece.start - reached;
     const from = joined ? reached : piece.start;
     if (laid.length > 0 && laid[laid.length - 1] === from) laid[laid.length - 1] = piece.end;
     else laid.push(from, piece.end);
     reached = piece.end;
   }
-  const last = run.length - end.at - reached;
-  if (end.joint && laid.length > 0 && isJoint(last)) {
+  const last = run.length - faceDistance(run, 1) - reached;
+  if (laid.length > 0 && isJoint(last)) {
     headJoints += last;
     laid[laid.length - 1] = reached + last;
   }
@@ -74,9 +74,9 @@ function addRun(
   mortar: Mortar,
   run: RunGeometry,
   wallType: WallType,
-  parts: { walls: Walls; ground: Ground; coursing: Coursing; bond: Bond },
+  parts: { ground: Ground; coursing: Coursing; bond: Bond },
 ): void {
-  const { walls, ground, coursing, bond } = parts;
+  const { ground, coursing, bond } = parts;
   const laid = bond.byRun.get(run.runId);
   if (!laid) return;
   const { thickness, height } = unitSize(wallType);
@@ -85,8 +85,7 @@ function addRun(
     const index = laid.patternByCourse[i] ?? -1;
     const pattern = laid.patterns[index];
     if (!pattern) return;
-    const parity: Parity = i % 2 === 0 ? 0 : 1;
-    const shape = shapes.get(index) ?? shapeOf(pattern, run, walls, parity, wallType.headJoint.most);
+    const shape = shapes.get(index) ?? shapeOf(pattern, run, wallType.headJoint.most);
     shapes.set(index, shape);
     mortar.head += shape.headJoints * thickness * height;
     if (i > 0) mortar.bed += shape.laidLength * thickness * course.joint;

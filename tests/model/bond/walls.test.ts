@@ -112,7 +112,7 @@ describe('A laid bond', () => {
     expect(lay(moved).bond).toEqual(lay(drawing).bond);
   });
 
-  it('turns odd courses into even ones, read backwards, where the building is mirrored', () => {
+  it('lays as many units, closers and returns where the building is mirrored', () => {
     // Mirrored about the y axis, each run is drawn the other way so that its body stays inside.
     const mirrored: Drawing = {
       ...drawing,
@@ -125,7 +125,8 @@ describe('A laid bond', () => {
       const other = after.bond.byRun.get(run.runId)!;
       const count = (of: RunBond, kind: string) =>
         [0, 1].map((c) => of.patterns[of.patternByCourse[c]!]!.pieces.filter((piece) => piece.kind === kind).length);
-      expect(count(other, 'return')).toEqual(count(run, 'return').reverse());
+      // Which of the two courses a return falls in depends on the run that a corner starts with.
+      expect(count(other, 'return').sort()).toEqual(count(run, 'return').sort());
       expect(count(other, 'unit').reduce((a, b) => a + b)).toBe(count(run, 'unit').reduce((a, b) => a + b));
       expect(other.closersPerCoursePair).toBe(run.closersPerCoursePair);
       expect(other.noCut).toEqual(run.noCut);
