@@ -75,11 +75,11 @@ export function defaultTapeStep(units: Units): Ticks {
 }
 
 /** The wall type that a new drawing starts with; its id is `wall`. */
-export function defaultWallType(units: Units): WallType {
+function defaultWallType(units: Units): WallType {
   return units === 'imperial' ? IMPERIAL_WALL : METRIC_WALL;
 }
 
-export function defaultPoleKit(units: Units): PoleKit {
+function defaultPoleKit(units: Units): PoleKit {
   return units === 'imperial' ? IMPERIAL_KIT : METRIC_KIT;
 }
 

@@ -47,10 +47,6 @@ export function boxesMeet(a: Box, b: Box): boolean {
   return a.minX <= b.maxX && b.minX <= a.maxX && a.minY <= b.maxY && b.minY <= a.maxY;
 }
 
-export function boxContains(box: Box, point: Vec): boolean {
-  return point.x >= box.minX && point.x <= box.maxX && point.y >= box.minY && point.y <= box.maxY;
-}
-
 /** The box round both. */
 export function joinBoxes(a: Box, b: Box): Box {
   return {

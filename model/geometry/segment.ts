@@ -76,7 +76,7 @@ export function partAlong(a: Vec, b: Vec, point: Vec): number {
 }
 
 /** The point of the segment nearest to `point`. */
-export function nearestOnSegment(a: Vec, b: Vec, point: Vec): Vec {
+function nearestOnSegment(a: Vec, b: Vec, point: Vec): Vec {
   return between(a, b, Math.min(1, Math.max(0, partAlong(a, b, point))));
 }
 

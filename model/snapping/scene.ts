@@ -23,7 +23,7 @@ export interface SnapScene {
 }
 
 /** Multiples of one unit and its head joint on either side of a length: the fallback where the bond has no say. */
-export function wholeUnitLengths(module: Ticks): GoodLengths {
+function wholeUnitLengths(module: Ticks): GoodLengths {
   return (near) => {
     const below = Math.floor(near / module);
     return [below, below + 1].filter((count) => count > 0).map((count) => ticks(count * module));

@@ -1,6 +1,6 @@
 /** The faces and body of each run, from how its two ends meet their neighbours. */
-import type { Vec } from '../geometry/point';
-import { add, along, between, dot, scale, toPoint } from '../geometry/vec';
+import type { PlanPoint, Vec } from '../geometry/point';
+import { add, along, dot, scale, toPoint } from '../geometry/vec';
 import { roundTicks, type Ticks } from '../length/ticks';
 import type { RayEnd } from './meetings';
 import type { ReadyRun } from './runs';
@@ -28,7 +28,7 @@ function sidesOf(ready: ReadyRun, start: RayEnd, end: RayEnd): Sides {
   const insideStart = dot(start.left, direction);
   const outsideEnd = length + dot(end.left, direction);
   const insideEnd = length + dot(end.right, direction);
-  const place = (along_: number, across: number): Vec => add(along(from, direction, along_), scale(inward, across));
+  const place = (at: number, across: number): Vec => add(along(from, direction, at), scale(inward, across));
   const outsideLength = outsideEnd - outsideStart;
   const insideLength = insideEnd - insideStart;
   if (outsideLength > 0 && insideLength > 0) {
@@ -54,7 +54,7 @@ function sidesOf(ready: ReadyRun, start: RayEnd, end: RayEnd): Sides {
     : { outside: [tip, tip], inside: [place(insideStart, thickness), place(insideEnd, thickness)], shortBy };
 }
 
-function withoutRepeats(ring: readonly Vec[]): readonly Vec[] {
+function withoutRepeats(ring: readonly PlanPoint[]): readonly PlanPoint[] {
   return ring.filter((point, i) => {
     const before = ring[(i + ring.length - 1) % ring.length];
     return !before || before.x !== point.x || before.y !== point.y;
@@ -69,7 +69,7 @@ export function faceRun(ready: ReadyRun, start: RayEnd, end: RayEnd, ends: reado
   const outside = faceLength(sides.outside);
   const inside = faceLength(sides.inside);
   const whole = sides.shortBy === 0;
-  const middle = (at: Vec, end_: RayEnd): Vec[] => (end_.middle && whole ? [add(at, end_.middle)] : []);
+  const middle = (at: Vec, meeting: RayEnd): Vec[] => (meeting.middle && whole ? [add(at, meeting.middle)] : []);
   const ring = [
     sides.outside[0],
     sides.outside[1],
@@ -92,13 +92,8 @@ export function faceRun(ready: ReadyRun, start: RayEnd, end: RayEnd, ends: reado
     centreLength: roundTicks((outside + inside) / 2),
     outside: [toPoint(sides.outside[0]), toPoint(sides.outside[1])],
     inside: [toPoint(sides.inside[0]), toPoint(sides.inside[1])],
-    body: withoutRepeats(ring.map(toPoint)) as RunGeometry['body'],
+    body: withoutRepeats(ring.map(toPoint)),
     ends,
   };
   return { geometry, clear: [start.clear, length - end.clear], shortBy: roundTicks(sides.shortBy) };
-}
-
-/** The middle of a run's body between its two faces. */
-export function middleOf(run: RunGeometry): Vec {
-  return between(between(run.outside[0], run.outside[1], 0.5), between(run.inside[0], run.inside[1], 0.5), 0.5);
 }

@@ -112,28 +112,36 @@ function bodyAngle(a: Ray, b: Ray): number {
   return Math.min(turn, 360 - turn);
 }
 
+interface Bar {
+  readonly pair: readonly [Ray, Ray];
+  readonly straight: number;
+  readonly thickness: number;
+  readonly id: string;
+}
+
 /** The two rays nearest to one line that the others stop against: the thicker pair, then the lower id, where two pairs are. */
-function findBar(rays: readonly Ray[]): readonly [Ray, Ray] | null {
-  let best: { pair: [Ray, Ray]; straight: number; thickness: number; id: string } | null = null;
-  rays.forEach((a, i) => {
+function findBar(rays: readonly Ray[]): Bar | null {
+  let best: Bar | null = null;
+  for (const [i, a] of rays.entries()) {
     for (const b of rays.slice(i + 1)) {
       const facing = dot(a.direction, b.direction);
       if (facing > BAR) continue;
-      const one = {
-        pair: [a, b] as [Ray, Ray],
+      const bar: Bar = {
+        pair: [a, b],
+        // Within the tick's reach two pairs are equally straight.
         straight: facing < STRAIGHT ? -1 : facing,
         thickness: a.ready.thickness + b.ready.thickness,
         id: a.ready.run.id < b.ready.run.id ? a.ready.run.id : b.ready.run.id,
       };
-      const before =
-        !best ||
-        one.straight < best.straight ||
-        (one.straight === best.straight &&
-          (one.thickness > best.thickness || (one.thickness === best.thickness && one.id < best.id)));
-      if (before) best = one;
+      if (!best || isBetterBar(bar, best)) best = bar;
     }
-  });
-  return best === null ? null : (best as { pair: [Ray, Ray] }).pair;
+  }
+  return best;
+}
+
+function isBetterBar(a: Bar, b: Bar): boolean {
+  if (a.straight !== b.straight) return a.straight < b.straight;
+  return a.thickness !== b.thickness ? a.thickness > b.thickness : a.id < b.id;
 }
 
 function meetTwo(a: Ray, b: Ray): CornerMeeting {
@@ -158,7 +166,7 @@ function meetTwo(a: Ray, b: Ray): CornerMeeting {
 }
 
 function meetMany(rays: readonly Ray[]): CornerMeeting {
-  const bar = findBar(rays);
+  const bar = findBar(rays)?.pair ?? null;
   const lefts = new Map<Ray, Vec>();
   const rights = new Map<Ray, Vec>();
   let tooSharp = false;

@@ -27,7 +27,7 @@ interface Settled {
 }
 
 /** Adds a corner with the next free letter; the corner that is there already, where there is one. */
-export function addCorner(drawing: Drawing, point: PlanPoint, newId: NewId): Settled | null {
+function addCorner(drawing: Drawing, point: PlanPoint, newId: NewId): Settled | null {
   const there = drawing.corners.find((corner) => samePoint(corner, point));
   if (there) return { drawing, cornerId: there.id };
   if (!isOnPlan(point) || drawing.corners.length >= MOST_THINGS) return null;
