@@ -29,7 +29,7 @@ export async function migrateDatabase(url: string): Promise<void> {
 
 /** `npm run db:migrate`: the same from the command line. */
 if (process.argv[1] === fileURLToPath(import.meta.url)) {
-  const url = process.env['DATABASE_URL'];
+  const url = process.env.DATABASE_URL;
   if (url === undefined) {
     process.stderr.write('DATABASE_URL: the address of the database is needed, postgres://…\n');
     process.exit(1);

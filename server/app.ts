@@ -11,6 +11,7 @@ import { limitTries } from './http/limits';
 import { describeApi } from './http/openApi';
 import { refuseOtherOrigins } from './http/origin';
 import { protect } from './http/protect';
+import { readJson } from './http/readJson';
 import { answerErrors, answerNoSuchPath } from './http/respond';
 import { routes } from './routes';
 
@@ -22,7 +23,7 @@ function mountAuth(app: Express, deps: Deps): void {
   const limit = limitTries(deps.env, AUTH_TRIES);
   app.use('/api/auth', (req, res, next) => (req.method === 'GET' ? next() : limit(req, res, next)));
   // Read here, so that a body that is too long or not JSON is refused in our own words; better-auth takes it as read.
-  app.all('/api/auth/{*any}', express.json({ limit: AUTH_BODY_LIMIT }), handleAuth(deps.auth));
+  app.all('/api/auth/{*any}', readJson(AUTH_BODY_LIMIT), handleAuth(deps.auth));
 }
 
 function mountApi(app: Express, deps: Deps): void {

@@ -1,6 +1,7 @@
 /** Starts the server: reads the environment, brings the database up to date, listens, and stops cleanly when told to. */
 import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { connect } from '../db/connect';
 import { migrateDatabase } from '../db/migrate';
 import { forgetAnswers } from '../db/queries/writes';
 import { buildApp } from './app';
@@ -13,7 +14,8 @@ const STOP_AT_MOST_MS = 8000;
 
 async function start(env: Env): Promise<void> {
   await migrateDatabase(env.DATABASE_URL);
-  const parts = await openParts({ env });
+  const database = connect(env.DATABASE_URL);
+  const parts = await openParts({ env, db: database.db });
   const kept = ANSWERS_KEPT_DAYS * 24 * 60 * 60 * 1000;
   await forgetAnswers(parts.deps.db, new Date(Date.now() - kept));
   const server = createServer(buildApp(parts.deps));
@@ -29,6 +31,7 @@ async function start(env: Env): Promise<void> {
       server.closeIdleConnections();
     });
     await parts.close();
+    await database.close();
   };
   process.on('SIGTERM', () => void stop());
   process.on('SIGINT', () => void stop());

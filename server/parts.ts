@@ -1,6 +1,6 @@
-/** What the server is made of, opened together and closed together. */
+/** What the server is made of besides its database, opened together and closed together. */
 import { pino, type Logger } from 'pino';
-import { connect, type Connection } from '../db/connect';
+import type { Db } from '../db/queries/db';
 import { createAuth } from './auth/auth';
 import type { Env } from './config/env';
 import type { Deps } from './http/deps';
@@ -14,29 +14,22 @@ export interface Parts {
 
 export interface PartsOptions {
   readonly env: Env;
+  /** It stays the caller's to close. */
+  readonly db: Db;
   readonly log?: Logger;
   readonly now?: () => Date;
-  /** A connection that stays the caller's to close. */
-  readonly connection?: Connection;
 }
 
-export async function openParts({
-  env,
-  log = makeLog(env),
-  now = () => new Date(),
-  connection,
-}: PartsOptions): Promise<Parts> {
-  const database = connection ?? connect(env.DATABASE_URL);
+export async function openParts({ env, db, log = makeLog(env), now = () => new Date() }: PartsOptions): Promise<Parts> {
   const mailbox = env.LOCAL_MAIL ? await openLocalMailbox() : null;
   const mailer = createMailer({ url: mailbox?.url ?? env.SMTP_URL ?? '', from: env.MAIL_FROM, log });
-  const auth = createAuth({ env, db: database.db, mailer });
+  const auth = createAuth({ env, db, mailer });
 
   async function close(): Promise<void> {
     await mailer.close();
     await mailbox?.close();
-    if (connection === undefined) await database.close();
   }
-  return { deps: { env, db: database.db, auth, mailer, mailbox, log, now }, close };
+  return { deps: { env, db, auth, mailer, mailbox, log, now }, close };
 }
 
 /** Warnings and worse on this machine, every request where a log is collected; nothing in tests. */

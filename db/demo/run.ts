@@ -31,7 +31,7 @@ async function run(url: string): Promise<void> {
   }
 }
 
-const url = process.env['DATABASE_URL'];
+const url = process.env.DATABASE_URL;
 if (url === undefined || url === '') {
   process.stderr.write('DATABASE_URL: the address of the database is needed, postgres://…\n');
   process.exit(1);

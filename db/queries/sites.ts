@@ -1,5 +1,6 @@
 /** Sites and the role that a person holds on each. */
 import { and, count, desc, eq, max, sql } from 'drizzle-orm';
+import { alias } from 'drizzle-orm/pg-core';
 import type { Role } from '../../model/contracts/common';
 import type { Drawing } from '../../model/drawing/schema';
 import { EMPTY_SURVEY } from '../../model/drawing/surveySchema';
@@ -27,24 +28,20 @@ export interface SiteInList extends SiteRow {
 
 /** The sites that a person works on, the one changed last first. */
 export async function listSites(db: Db, userId: string): Promise<SiteInList[]> {
-  const people = db
-    .select({ siteId: memberships.siteId, people: count().as('people') })
-    .from(memberships)
-    .groupBy(memberships.siteId)
-    .as('people');
+  const crew = alias(memberships, 'crew');
+  const people = db.select({ many: count() }).from(crew).where(eq(crew.siteId, sites.id));
   const last = db
-    .select({ siteId: revisions.siteId, number: max(revisions.number).as('number') })
+    .select({ number: max(revisions.number) })
     .from(revisions)
-    .groupBy(revisions.siteId)
-    .as('last');
+    .where(eq(revisions.siteId, sites.id));
   return db
     .select({
       id: sites.id,
       name: sites.name,
       role: memberships.role,
       createdAt: sites.createdAt,
-      people: people.people,
-      lastRevision: last.number,
+      people: sql<number>`(${people})`.mapWith(Number),
+      lastRevision: sql<number | null>`(${last})`,
       draftChanged: drafts.changedSince,
       outline: drafts.outline,
       changedAt: drafts.changedAt,
@@ -52,8 +49,6 @@ export async function listSites(db: Db, userId: string): Promise<SiteInList[]> {
     .from(memberships)
     .innerJoin(sites, eq(sites.id, memberships.siteId))
     .innerJoin(drafts, eq(drafts.siteId, sites.id))
-    .innerJoin(people, eq(people.siteId, sites.id))
-    .leftJoin(last, eq(last.siteId, sites.id))
     .where(eq(memberships.userId, userId))
     .orderBy(desc(drafts.changedAt), sites.id);
 }

@@ -26,7 +26,10 @@ async function sendSheets(res: Response, input: SheetsInput, name: string): Prom
   const sheets = printSheets(input);
   res.type('application/pdf');
   res.setHeader('content-disposition', `inline; filename*=UTF-8''${encodeURIComponent(name)}`);
-  await pipeline(sheets, res);
+  await pipeline(sheets, res).catch((error: NodeJS.ErrnoException) => {
+    // Whoever asked went away: nothing is wrong here.
+    if (error.code !== 'ERR_STREAM_PREMATURE_CLOSE') throw error;
+  });
 }
 
 export const sheetRoutes: readonly Route[] = [
@@ -38,7 +41,7 @@ export const sheetRoutes: readonly Route[] = [
     query: sheetQuery,
     answer: 'application/pdf',
     refusals: [400, 413, 429],
-    before: ({ env }) => limitTries(env, { most: 120, minutes: 5 }),
+    before: ({ env }) => limitTries(env, { most: 60, minutes: 5 }),
     handle: async ({ deps, site, query, res }) => {
       const draft = await getDraft(deps.db, site.id);
       if (draft === null) throw new Failure('notFound', word('server.notFound'));
@@ -59,7 +62,7 @@ export const sheetRoutes: readonly Route[] = [
     query: sheetQuery,
     answer: 'application/pdf',
     refusals: [400, 413, 429],
-    before: ({ env }) => limitTries(env, { most: 120, minutes: 5 }),
+    before: ({ env }) => limitTries(env, { most: 60, minutes: 5 }),
     handle: async ({ deps, site, params, query, res }) => {
       const { number, note, savedBy, savedAt, drawing, survey } = await needRevision(deps, site, params.number);
       const revision = { number, note, savedBy, savedAt: savedAt.toISOString() };

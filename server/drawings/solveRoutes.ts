@@ -14,7 +14,7 @@ export const solveRoutes: readonly Route[] = [
     body: solveRequestSchema,
     answer: setOutSchema,
     refusals: [413, 429],
-    before: ({ env }) => limitTries(env, { most: 120, minutes: 5 }),
+    before: ({ env }) => limitTries(env, { most: 60, minutes: 5 }),
     handle: async ({ body }) => {
       needSolvable(body.drawing);
       return toPlain(solve(body.drawing, body.survey)) as SetOutAnswer;

@@ -1,5 +1,5 @@
 import type { Logger } from 'pino';
-import type { Db } from '../../db/connect';
+import type { Db } from '../../db/queries/db';
 import type { Auth } from '../auth/auth';
 import type { Env } from '../config/env';
 import type { LocalMailbox } from '../mail/localMailbox';

@@ -2,7 +2,7 @@
  * A route says what it takes, what it answers and who may use it; everything else follows from that: the checks in
  * front of its handler, the check of what it answers, and its description in OpenAPI.
  */
-import express, { type Request, type RequestHandler, type Response, type Router } from 'express';
+import { type Request, type RequestHandler, type Response, type Router } from 'express';
 import { z } from 'zod';
 import { may, siteIdSchema, type Permission, type Role } from '../../model/contracts/common';
 import { findSite } from '../../db/queries/sites';
@@ -10,6 +10,7 @@ import { needPerson, type Person } from '../auth/person';
 import { word } from '../words';
 import type { Deps } from './deps';
 import { Failure } from './failure';
+import { readJson } from './readJson';
 import { validateBody } from './validate';
 
 /** `everyone`: signed in or not. `signedIn`: any account. Otherwise what must be allowed on the site in the path. */
@@ -132,7 +133,7 @@ export function route<
   B extends z.ZodType | undefined = undefined,
 >(options: RouteOptions<P, Q, B, A, R>): Route {
   const { before, handle, ...description } = options;
-  const parseJson = express.json({ limit: BODY_LIMIT, strict: false });
+  const parseBody = description.body ? readJson(BODY_LIMIT) : [];
 
   function mount(router: Router, deps: Deps): void {
     const checkAccess: RequestHandler = async (req, res, next) => {
@@ -163,7 +164,7 @@ export function route<
       } as unknown as Asked<Read<P>, Read<Q>, Read<B>, A>;
       send(res, description, await handle(asked));
     };
-    const chain = [...(before ? [before(deps)] : []), checkAccess, ...(description.body ? [parseJson] : []), answer];
+    const chain = [...(before ? [before(deps)] : []), checkAccess, ...parseBody, answer];
     router[description.method](description.path, ...chain);
   }
   return { ...description, mount };

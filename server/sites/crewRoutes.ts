@@ -8,7 +8,7 @@ import { route, type Route } from '../http/route';
 import { word } from '../words';
 import { invitationAnswer } from './invitationAnswer';
 
-const memberParams = z.object({ userId: z.string().min(1).max(64) });
+const memberParams = z.object({ userId: z.string().regex(/^[\w-]{1,64}$/) });
 
 function needDone(change: CrewChange): void {
   if (change === 'notThere') throw new Failure('notFound', word('server.notFound'));

@@ -45,7 +45,7 @@ export const invitationRoutes: readonly Route[] = [
     body: inviteSchema,
     answer: invitationSchema,
     status: 201,
-    refusals: [409, 429],
+    refusals: [409, 429, 503],
     before: ({ env }) => limitTries(env, { most: 60, minutes: 60 }),
     handle: async ({ deps, site, person, body }) => {
       const { email, role } = body;
@@ -59,16 +59,12 @@ export const invitationRoutes: readonly Route[] = [
       const invited = { siteId: site.id, email, role, tokenHash, invitedBy: person.id, createdAt, expiresAt };
       const id = await putInvitation(deps.db, invited);
       const link = `${deps.env.APP_URL}/invitation/${token}`;
-      deps.mailer.sendLater(
-        writeInvitationMail({
-          to: email,
-          invitedBy: person.name,
-          siteName: site.name,
-          role,
-          link,
-          days: INVITATION_DAYS,
-        }),
-      );
+      const about = { to: email, invitedBy: person.name, siteName: site.name, role, link, days: INVITATION_DAYS };
+      await deps.mailer.send(writeInvitationMail(about)).catch(async (error: unknown) => {
+        deps.log.error({ err: error }, 'an invitation could not be mailed');
+        await revokeInvitation(deps.db, site.id, id);
+        throw new Failure('unavailable', word('server.notMailed'));
+      });
       return invitationAnswer({ id, email, role, invitedBy: person.name, createdAt, expiresAt });
     },
   }),

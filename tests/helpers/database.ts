@@ -23,7 +23,7 @@ interface Server {
 }
 
 async function findServer(): Promise<Server> {
-  const given = process.env['TEST_DATABASE_URL'];
+  const given = process.env.TEST_DATABASE_URL;
   if (given !== undefined && given !== '') {
     const urlOf = (database: string) => {
       const url = new URL(given);

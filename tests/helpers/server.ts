@@ -88,7 +88,7 @@ export async function openTestServer(changes: Readonly<Record<string, string>> =
     ...changes,
   });
   const clock = { now: new Date() };
-  const parts = await openParts({ env, connection: database, now: () => clock.now });
+  const parts = await openParts({ env, db: database.db, now: () => clock.now });
   const app = buildApp(parts.deps);
 
   async function signUp(name: string): Promise<Caller> {

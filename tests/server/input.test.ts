@@ -91,6 +91,30 @@ describe('input that is not right', () => {
     expect(answer.body.error.field).toBe('drawing.corners.0.x');
   });
 
+  it.each([
+    ['a NUL character', '\\u0000'],
+    ['half a surrogate pair', '\\ud83d'],
+  ])('is refused when it holds what no database can keep: %s', async (_what, escape) => {
+    const named = { ...drawing, wallTypes: [{ ...drawing.wallTypes[0], name: 'HERE' }] };
+    const body = JSON.stringify({ writeId: newWriteId(), baseVersion: 0, drawing: named }).replace('HERE', escape);
+    const answer = await saveText(body);
+    expect(answer.status).toBe(400);
+    expect(answer.body.error).toMatchObject({ code: 'badInput', field: 'drawing.wallTypes.0.name' });
+    const account = `{"name":"${escape}","email":"nul@site.example","password":"long-enough-word"}`;
+    const headers = { 'content-type': 'application/json' };
+    const refused = await server.stranger().call('post', '/api/auth/sign-up/email', account, headers);
+    expect(refused.status).toBe(400);
+    expect(refused.body.error.field).toBe('name');
+    expect((await lead.delete(`/api/sites/${siteId}/members/${encodeURIComponent('\0')}`)).status).toBe(404);
+  });
+
+  it('is kept letter for letter, whatever the script', async () => {
+    const name = 'Łódź 東 \u{1F9F1} "quoted" \\u0000 as typed';
+    const own = await server.makeSite(lead);
+    expect((await lead.patch(`/api/sites/${own}`, { name })).status).toBe(200);
+    expect((await lead.get(`/api/sites/${own}`)).body.name).toBe(name);
+  });
+
   it('is refused when it is not sent as JSON, for a form needs no one’s leave to cross origins', async () => {
     for (const type of ['text/plain', 'application/x-www-form-urlencoded']) {
       const answer = await saveText(JSON.stringify({ writeId: newWriteId(), baseVersion: 0, drawing }), type);

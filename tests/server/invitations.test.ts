@@ -124,6 +124,20 @@ describe('an invitation', () => {
     expect(wrong.body.error.field).toBe('email');
   });
 
+  it('is not made when it can’t be mailed, and that is said', async () => {
+    const silent = await openTestServer({ LOCAL_MAIL: '0', SMTP_URL: 'smtp://127.0.0.1:9' });
+    try {
+      const alone = await silent.signUp('Lead Unheard');
+      const siteId = await silent.makeSite(alone);
+      const answer = await alone.post(`/api/sites/${siteId}/invitations`, { email: 'far@site.example', role: 'mason' });
+      expect(answer.status).toBe(503);
+      expect(answer.body.error.code).toBe('unavailable');
+      expect((await alone.get(`/api/sites/${siteId}/crew`)).body.invitations).toEqual([]);
+    } finally {
+      await silent.close();
+    }
+  });
+
   it('leaves only its hash in the database', async () => {
     const siteId = await server.makeSite(lead);
     await invite(siteId, 'hashed@site.example');

@@ -19,8 +19,9 @@ interface Running {
 }
 
 function start(program: string, changes: Record<string, string | undefined> = {}): Running {
-  const env = {
-    PATH: process.env['PATH'],
+  const env: NodeJS.ProcessEnv = {
+    NODE_ENV: 'production',
+    PATH: process.env.PATH,
     DATABASE_URL: database.url,
     APP_URL: 'http://localhost:4600',
     AUTH_SECRET: 'a secret for tests only, of enough characters',
@@ -28,7 +29,7 @@ function start(program: string, changes: Record<string, string | undefined> = {}
     PORT: '0',
     ...changes,
   };
-  const child = spawn(process.execPath, ['--import', 'tsx', program], { cwd: ROOT, env: env as NodeJS.ProcessEnv });
+  const child = spawn(process.execPath, ['--import', 'tsx', program], { cwd: ROOT, env });
   let words = '';
   child.stdout.on('data', (data) => (words += data));
   child.stderr.on('data', (data) => (words += data));
