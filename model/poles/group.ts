@@ -1,7 +1,8 @@
 /** The cheapest placing of a group of poles whose braces compete for the same ground. */
+import { distance } from '../geometry/vec';
 import type { Candidate } from './candidates';
-import { bracesConflict } from './clearance';
-import { bestWith, pairOf, type Pair, type PoleBraces } from './pairs';
+import { bracesConflict, type BraceLine } from './clearance';
+import { bestWith, cheapestPair, pairOf, type Pair, type PoleBraces } from './pairs';
 
 /**
  * When each of a pole's two braces first met another pole's, counted in rounds; null where it never did. Only braces that
@@ -27,9 +28,11 @@ export interface Part {
 export interface SearchBound {
   /** Most steps (candidates looked at) for one group before it settles for less than the best. */
   readonly most: number;
+  /** Most steps for the whole site: after them the poles still in conflict are placed one after another. */
+  readonly inAll: number;
 }
 
-export const USUAL_BOUND: SearchBound = { most: 3_000_000 };
+export const USUAL_BOUND: SearchBound = { most: 3_000_000, inAll: 20_000_000 };
 
 export interface Solved {
   readonly pairs: ReadonlyMap<number, Pair>;
@@ -37,6 +40,7 @@ export interface Solved {
   readonly cost: number;
   /** False where the bound was reached. */
   readonly exact: boolean;
+  readonly spent: number;
 }
 
 /** Dearer than any pair: a pole is left without braces only where the others leave it no way at all. */
@@ -204,39 +208,53 @@ export function solveGroup(parts: readonly Part[], clearance: number, bound: Sea
     const best: Best = { cost: mayLeave ? Infinity : floor + slack + 1, pairs: null };
     descend({ parts, choices, mayLeave, conflict, spend }, best);
     const exact = spent <= bound.most;
-    if (best.pairs) return solved(best.pairs, best.cost, exact);
-    if (!exact || mayLeave) return settle(parts, conflict);
+    if (best.pairs) return solved(best.pairs, best.cost, exact, spent);
+    if (!exact || mayLeave) return settle(parts, clearance, spent);
   }
 }
 
-function solved(pairs: ReadonlyMap<Member, Pair | null>, cost: number, exact: boolean): Solved {
+function solved(pairs: ReadonlyMap<Member, Pair | null>, cost: number, exact: boolean, spent: number): Solved {
   const byIndex = new Map<number, Pair>();
   for (const [member, pair] of pairs) if (pair) byIndex.set(member.index, pair);
-  return { pairs: byIndex, cost, exact };
+  return { pairs: byIndex, cost, exact, spent };
 }
 
-/** Steps that one pole may take when poles are settled one after another. */
-const SETTLE_STEPS = 50_000;
+/** One pole after another, each with the cheapest pair that keeps clear of those already placed. */
+function settle(parts: readonly Part[], clearance: number, spent: number): Solved {
+  const members = parts.flatMap((part) => part.members);
+  const found = placeInTurn(
+    members.map((member) => member.pole),
+    [],
+    clearance,
+  );
+  const pairs = new Map<number, Pair>();
+  let cost = 0;
+  members.forEach((member, i) => {
+    const pair = found[i];
+    cost += pair ? pair.cost : UNBRACED;
+    if (pair) pairs.set(member.index, pair);
+  });
+  return { pairs, cost, exact: false, spent };
+}
 
-/** One pole after another, each as if the earlier ones could not be moved. */
-function settle(parts: readonly Part[], conflict: Descent['conflict']): Solved {
-  const placed = new Map<Member, Pair | null>();
-  for (const member of parts.flatMap((part) => part.members)) {
-    let steps = 0;
-    const spend = () => (steps += 1) <= SETTLE_STEPS;
-    const alone: Part = { members: [member], lower: member.own.cost };
-    const isFree = (choice: Choice, candidate: Candidate) =>
-      [...placed].every(
-        ([other, pair]) => !pair?.braces.some((brace) => conflict(other, brace, choice.member, candidate)),
-      );
-    const choices = choicesOf([alone], UNBRACED, spend).map((choice) => ({
-      ...choice,
-      ranked: choice.ranked.filter(({ candidate }) => isFree(choice, candidate)),
-    }));
-    const best: Best = { cost: Infinity, pairs: null };
-    descend({ parts: [alone], choices, mayLeave: true, conflict, spend }, best);
-    placed.set(member, best.pairs?.get(member) ?? null);
-  }
-  const cost = [...placed.values()].reduce((sum, pair) => sum + (pair ? pair.cost : UNBRACED), 0);
-  return solved(placed, cost, false);
+/** Pairs for poles in turn, each the cheapest that keeps clear of `fixed` and of those before it; null where none does. */
+export function placeInTurn(
+  poles: readonly PoleBraces[],
+  fixed: readonly BraceLine[],
+  clearance: number,
+): readonly (Pair | null)[] {
+  const placed = [...fixed];
+  return poles.map((pole) => {
+    const longest = pole.lists().reduce((most, list) => Math.max(most, ...list.map((each) => each.reach)), 0);
+    const near = placed.filter(
+      ({ from, foot }) => distance(from, pole.at) <= distance(from, foot) + longest + clearance + 1,
+    );
+    const over = (candidate: Candidate) => {
+      const line = { from: pole.at, foot: candidate.foot };
+      return near.some((other) => bracesConflict(line, other, clearance)) ? null : pole.over(candidate);
+    };
+    const pair = cheapestPair({ ...pole, over });
+    if (pair) placed.push(...pair.braces.map((brace) => ({ from: pole.at, foot: brace.foot })));
+    return pair;
+  });
 }

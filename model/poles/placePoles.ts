@@ -1,7 +1,7 @@
 /** Story poles and their braces, placed clear of everything on the site. */
 import type { Drawing } from '../drawing/schema';
 import type { PlanPoint } from '../geometry/point';
-import { bearing } from '../geometry/vec';
+import { bearing, length } from '../geometry/vec';
 import { roundTicks } from '../length/ticks';
 import type { Reason } from '../reasons';
 import { ruleValue } from '../rules/registry';
@@ -79,15 +79,17 @@ function braceOf(
   const { fixing } = site.kit.brace;
   const from = site.at;
   const away = { x: candidate.foot.x - from.x, y: candidate.foot.y - from.y };
+  // Measured to the foot as it was rounded, as a tape would.
+  const reach = length(away);
   return {
     id: `${site.poleId}.${which + 1}`,
     poleId: site.poleId,
     foot: candidate.foot,
     bearing: bearing(away),
-    reach: candidate.reach,
+    reach: roundTicks(reach),
     fixing,
-    leg: roundTicks(Math.hypot(fixing, candidate.reach)),
-    slope: (Math.atan2(fixing, candidate.reach) * 180) / Math.PI,
+    leg: roundTicks(Math.hypot(fixing, reach)),
+    slope: (Math.atan2(fixing, reach) * 180) / Math.PI,
     inLineWith: candidate.runId,
     turned: candidate.turned,
     turnedFor: turnedFor(site, candidate, which, ground),

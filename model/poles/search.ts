@@ -14,7 +14,7 @@
 import { boxOfSegment, inflate } from '../geometry/box';
 import { gridOf } from '../geometry/grid';
 import { bracesConflict, type BraceLine } from './clearance';
-import { solveGroup, type Member, type Part, type SearchBound, type Solved } from './group';
+import { placeInTurn, solveGroup, type Member, type Part, type SearchBound, type Solved } from './group';
 import { cheapestPair, type Pair, type PoleBraces } from './pairs';
 
 export interface Placed {
@@ -113,6 +113,21 @@ class Groups {
   }
 }
 
+/** Places the poles of the groups still open one after another, clear of all others: the search ends here. */
+function finish(poles: readonly PoleBraces[], pairs: (Pair | null)[], groups: Groups, clearance: number): void {
+  for (const [group, joined] of groups.opened()) {
+    const indices = joined.flatMap((part) => part.poles);
+    for (const i of indices) pairs[i] = null;
+    const fixed = poles.flatMap((pole, i) =>
+      (pairs[i]?.braces ?? []).map((brace): BraceLine => ({ from: pole.at, foot: brace.foot })),
+    );
+    const open = indices.flatMap((i) => poles[i] ?? []);
+    const found = placeInTurn(open, fixed, clearance);
+    indices.forEach((i, n) => (pairs[i] = found[n] ?? null));
+    groups.close(group, indices, { pairs: new Map(), cost: 0, exact: false, spent: 0 });
+  }
+}
+
 /** Places the braces of every pole; `poles` in an order that does not depend on the drawing's. */
 export function placeBraces(poles: readonly PoleBraces[], clearance: number, bound: SearchBound): Placed {
   const own = poles.map((pole) => cheapestPair(pole));
@@ -123,6 +138,7 @@ export function placeBraces(poles: readonly PoleBraces[], clearance: number, bou
     const [pole, pair, which] = [poles[index], own[index], relevant[index]];
     return pole && pair && which ? [{ index, pole, own: pair, relevant: which }] : [];
   };
+  let spent = 0;
   for (let round = 0; ; round += 1) {
     for (const [a, b] of conflicts(poles, pairs, clearance)) {
       for (const { pole, which } of [a, b]) {
@@ -133,6 +149,10 @@ export function placeBraces(poles: readonly PoleBraces[], clearance: number, bou
     }
     const opened = groups.opened();
     if (opened.length === 0) break;
+    if (spent > bound.inAll) {
+      finish(poles, pairs, groups, clearance);
+      break;
+    }
     for (const [group, joined] of opened) {
       // A group that reached its bound may cost more than its least: its poles' own optima are the bound that holds.
       const parts = joined.flatMap(({ poles: indices, cost, exact }): Part[] => {
@@ -142,6 +162,7 @@ export function placeBraces(poles: readonly PoleBraces[], clearance: number, bou
       });
       const indices = joined.flatMap((part) => part.poles);
       const solved = solveGroup(parts, clearance, bound);
+      spent += solved.spent;
       for (const i of indices) pairs[i] = solved.pairs.get(i) ?? null;
       groups.close(group, indices, solved);
     }

@@ -35,6 +35,9 @@ const FLAT_WITHIN = 30;
 /** Within this of a straight angle, in degrees, a line runs on through a corner. */
 const STRAIGHT_WITHIN = 1;
 
+/** More runs than this at one corner can't be built, and have a reason of their own. */
+const ARMS_MOST = 8;
+
 interface Arm {
   readonly run: RunGeometry;
   readonly away: Vec;
@@ -119,6 +122,7 @@ export function seatsAtCorners(walls: Walls): Seat[] {
   const seats: Seat[] = [];
   for (const corner of walls.corners) {
     const arms = armsAt(corner.cornerId, corner.runIds, walls);
+    if (arms.length > ARMS_MOST) continue;
     const only = arms.length === 1 ? arms[0] : undefined;
     const sectors = only ? [freeEnd(corner.at, only)] : sectorsAt(corner.at, arms);
     sectors.sort((a, b) => b.lines - a.lines);
@@ -190,8 +194,7 @@ function freePlace(
     at + wide + clear <= run.length &&
     jambs.every(([a, b]) => at + wide + clear <= a || at - clear >= b);
   const tries = [wanted, ...jambs.flatMap(([a, b]) => [a - clear - wide, b + clear]), clear, run.length - wide - clear];
-  const free = tries.filter(isFree).sort((a, b) => Math.abs(a - wanted) - Math.abs(b - wanted) || a - b);
-  return free[0] ?? null;
+  return tries.sort((a, b) => Math.abs(a - wanted) - Math.abs(b - wanted) || a - b).find(isFree) ?? null;
 }
 
 export interface RunSeats {

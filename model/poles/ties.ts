@@ -8,6 +8,9 @@ import type { Tie } from './types';
 /** Two tapes fix a foot well where they cross at 30° or more: below that a small slip of either moves it far. */
 const GOOD_SINE = 0.5;
 
+/** Corners tried for one foot; a usual corner has four within two runs. */
+const CORNERS_MOST = 24;
+
 /** Corners one and two runs away from a pole's own runs: those a crew would hold the tape on. */
 export function cornersAround(runIds: readonly string[], walls: Walls): string[] {
   const found = new Set<string>();
@@ -21,7 +24,7 @@ export function cornersAround(runIds: readonly string[], walls: Walls): string[]
       }
     edge = next;
   }
-  return [...found];
+  return [...found].slice(0, CORNERS_MOST);
 }
 
 /**

@@ -35,7 +35,7 @@ const rectangleAt = (x: number, y: number, width: number, height: number): Place
 /** Two small rectangles a lane apart, a door and two areas to keep clear, all at random. */
 const sites: fc.Arbitrary<Drawing> = fc
   .record({
-    lane: fc.integer({ min: 40, max: 130 }),
+    lane: fc.integer({ min: 48, max: 130 }),
     shift: fc.integer({ min: -60, max: 60 }),
     doorAt: fc.integer({ min: 12, max: 70 }),
     out: fc.boolean(),
