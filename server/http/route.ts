@@ -105,17 +105,13 @@ function needJson(req: Request): void {
   }
 }
 
-/** The sheets and the mail page write their own answer. */
-function isFile(answer: RouteDescription['answer']): answer is string & RouteDescription['answer'] {
-  return typeof answer === 'string';
-}
-
 function send(res: Response, route: RouteDescription, answer: unknown): void {
   if (answer instanceof OtherAnswer) {
     const schema = route.refusalBodies?.[answer.status];
     if (schema === undefined) throw new Error(`${route.path} does not describe an answer with status ${answer.status}`);
     res.status(answer.status).json(schema.parse(answer.body));
-  } else if (isFile(route.answer)) {
+  } else if (typeof route.answer === 'string') {
+    // The sheets and the mail page were written by their handlers.
     return;
   } else if (route.answer === null) {
     res.status(204).end();
