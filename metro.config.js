@@ -8,31 +8,29 @@ const config = getDefaultConfig(__dirname);
 // A cache of this checkout's own: the default is a shared temporary folder that a second user cannot write to.
 config.cacheStores = [new FileStore({ root: path.join(__dirname, 'node_modules/.cache/metro') })];
 
-// zod ships about 400 kB of locales; English alone is enough, because people read our own words.
-const zodLocales = /zod[\\/]v4[\\/](core[\\/]\.\.[\\/])?/;
+// What packages bring along and nothing of ours calls, by who asks for it: zod's locales (about 400 kB; people read our own
+// words), its JSON Schemas and its compiler (the content security policy forbids it), and the router's tab bars.
+const standIns = [
+  { from: /[\\/]zod[\\/]v4[\\/]/, name: /locales\/index\.c?js$/, file: 'canvas/client/zodEnglish.ts' },
+  {
+    from: /[\\/]zod[\\/]v4[\\/]/,
+    name: /\/(?:json-schema-processors|json-schema-generator|to-json-schema|from-json-schema|compile|deep-partial)\.c?js$/,
+    file: 'canvas/client/zodWithout.ts',
+  },
+  {
+    from: /[\\/]expo-router[\\/]build[\\/](?:exports|views[\\/]ErrorBoundary|views[\\/]Toast)\.js$/,
+    name: /\/(?:layouts\/Tabs|layouts\/experimental-stack|react-navigation\/bottom-tabs)$/,
+    file: 'canvas/client/routerWithout.ts',
+  },
+];
 config.resolver.resolveRequest = (context, moduleName, platform) => {
-  if (/locales\/index\.c?js$/.test(moduleName) && zodLocales.test(context.originModulePath)) {
-    return { type: 'sourceFile', filePath: path.join(__dirname, 'canvas/client/zodEnglish.ts') };
-  }
+  const standIn = standIns.find(({ from, name }) => from.test(context.originModulePath) && name.test(moduleName));
+  if (standIn) return { type: 'sourceFile', filePath: path.join(__dirname, standIn.file) };
   return context.resolveRequest(context, moduleName, platform);
 };
 
-// In development the API answers at the page's own origin.
-const apiPort = process.env.API_PORT;
-if (apiPort) {
-  config.server.enhanceMiddleware = (metro) => (request, response, next) => {
-    if (!request.url?.startsWith('/api/')) return metro(request, response, next);
-    const { method, headers, url } = request;
-    const onward = http.request({ host: '127.0.0.1', port: Number(apiPort), method, headers, path: url }, (answer) => {
-      response.writeHead(answer.statusCode ?? 502, answer.headers);
-      answer.pipe(response);
-    });
-    onward.once('error', () => response.writeHead(502).end());
-    request.pipe(onward);
-  };
-}
-
-// Only what the client uses is watched.
-config.resolver.blockList = [/[\\/]\.state[\\/].*/, /[\\/]dist[\\/].*/];
+// Our own build and state folders are not watched; packages keep their dist folders, where their code lies.
+const own = (folder) => new RegExp('^' + path.join(__dirname, folder).replace(/[^A-Za-z0-9]/g, '\\$&') + '[\\\\/].*');
+config.resolver.blockList = [own('.state'), own('dist')];
 
 module.exports = config;

@@ -1,4 +1,4 @@
-import { useId, useState, type Ref } from 'react';
+import { useId, type Ref } from 'react';
 import { TextInput, View, type TextInputProps } from 'react-native';
 import { Icon } from './Icon';
 import { fonts, radius, space, textSize } from './tokens';
@@ -17,7 +17,6 @@ export interface FieldProps extends Omit<TextInputProps, 'style' | 'value' | 'on
 /** A line of text with its label above and what is wrong with it below. */
 export function Field({ label, hint, error, ref, multiline, ...input }: FieldProps) {
   const { colours } = useTheme();
-  const [focused, setFocused] = useState(false);
   const id = useId();
   const below = error ?? hint;
   const described = { 'aria-invalid': error ? true : undefined, 'aria-describedby': below ? `${id}-below` : undefined };
@@ -32,23 +31,15 @@ export function Field({ label, hint, error, ref, multiline, ...input }: FieldPro
         ref={ref}
         multiline={multiline}
         aria-labelledby={`${id}-label`}
-        onFocus={(event) => {
-          setFocused(true);
-          input.onFocus?.(event);
-        }}
-        onBlur={(event) => {
-          setFocused(false);
-          input.onBlur?.(event);
-        }}
         style={{
           minHeight: multiline ? 96 : 52,
           paddingHorizontal: space.m,
           paddingVertical: space.m,
           borderRadius: radius,
-          borderWidth: focused || error ? 2 : 1,
-          // The thicker edge must not push the text about.
-          margin: focused || error ? 0 : 1,
-          borderColor: error ? colours.caution : focused ? colours.earthDeep : colours.edge,
+          borderWidth: error ? 2 : 1,
+          // The thicker edge must not push the text about; the focus has its own ring.
+          margin: error ? 0 : 1,
+          borderColor: error ? colours.caution : colours.edge,
           backgroundColor: colours.surface,
           color: colours.ink,
           fontFamily: fonts.text,

@@ -1,5 +1,8 @@
 import i18next, { type TFunction } from 'i18next';
-import { en } from '../../model/words/en';
+import type { en } from '../../model/words/en';
+import { auth } from '../../model/words/en/auth';
+import { common } from '../../model/words/en/common';
+import { sites } from '../../model/words/en/sites';
 import type { Say } from '../../model/words/say';
 
 declare module 'i18next' {
@@ -14,10 +17,16 @@ void i18next.init({
   lng: 'en',
   fallbackLng: 'en',
   initAsync: false,
-  resources: { en: { translation: en } },
+  // What the first pages say; the rest comes with the screens that say it.
+  resources: { en: { translation: { common, auth, sites } } },
   // React escapes what it renders.
   interpolation: { escapeValue: false },
 });
+
+/** Takes in more of the dictionary, by namespaces at its top: called by the chunk whose screens say them. */
+export function addWords(words: Partial<typeof en>): void {
+  i18next.addResourceBundle('en', 'translation', words, true, true);
+}
 
 export type Words = TFunction<'translation'>;
 

@@ -1,11 +1,11 @@
 import { useState } from 'react';
-import { Controller, useForm } from 'react-hook-form';
 import { View } from 'react-native';
 import { requestReset } from '../../client/session';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
 import { Field } from '../../ui/Field';
 import { Txt } from '../../ui/Txt';
+import { useForm } from '../../ui/useForm';
 import { useWords } from '../../ui/words';
 import { AuthFrame } from './AuthFrame';
 import { checkEmail } from './checks';
@@ -18,16 +18,21 @@ export function ForgotScreen() {
   const problem = useAuthProblem();
   const [refused, setRefused] = useState<string | null>(null);
   const [sentTo, setSentTo] = useState<string | null>(null);
-  const { control, handleSubmit, formState } = useForm({ defaultValues: { email: '' } });
 
-  const submit = handleSubmit(async ({ email }) => {
-    setRefused(null);
-    try {
-      await requestReset(email);
-      setSentTo(email.trim());
-    } catch (error) {
-      setRefused(problem(error));
-    }
+  const form = useForm({
+    initial: { email: '' },
+    checks: {
+      email: (value) => checkEmail(t, value),
+    },
+    onSubmit: async ({ email }) => {
+      setRefused(null);
+      try {
+        await requestReset(email);
+        setSentTo(email.trim());
+      } catch (error) {
+        setRefused(problem(error));
+      }
+    },
   });
 
   if (sentTo !== null)
@@ -46,36 +51,19 @@ export function ForgotScreen() {
       <Txt size="large" tone="soft">
         {t('auth.forgot.text')}
       </Txt>
-      <Controller
-        control={control}
-        name="email"
-        rules={{ validate: (value) => checkEmail(t, value) }}
-        render={({ field, fieldState }) => (
-          <Field
-            ref={field.ref}
-            label={t('auth.fields.email')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            error={fieldState.error?.message}
-            inputMode="email"
-            autoComplete="email"
-            autoCapitalize="none"
-            onSubmitEditing={() => void submit()}
-          />
-        )}
+      <Field
+        {...form.field('email')}
+        label={t('auth.fields.email')}
+        inputMode="email"
+        autoComplete="email"
+        autoCapitalize="none"
       />
       {refused ? (
         <View role="alert">
           <Caution text={refused} />
         </View>
       ) : null}
-      <Button
-        kind="filled"
-        label={t('auth.forgot.action')}
-        busy={formState.isSubmitting}
-        onPress={() => void submit()}
-      />
+      <Button kind="filled" label={t('auth.forgot.action')} busy={form.busy} onPress={form.submit} />
       <TextLink href="/sign-in" label={t('auth.forgot.back')} />
     </AuthFrame>
   );

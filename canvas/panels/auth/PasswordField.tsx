@@ -16,7 +16,7 @@ export function PasswordField(props: Omit<FieldProps, 'secureTextEntry'>) {
         size="body"
         label={shown ? t('auth.fields.hide') : t('auth.fields.show')}
         onPress={() => setShown(!shown)}
-        style={{ alignSelf: 'flex-start', paddingHorizontal: 4 }}
+        style={{ alignSelf: 'flex-start', paddingHorizontal: 0 }}
       />
     </View>
   );

@@ -1,12 +1,12 @@
 import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useState } from 'react';
-import { Controller, useForm } from 'react-hook-form';
 import { View } from 'react-native';
 import { AuthError, resetPassword } from '../../client/session';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
 import { toast } from '../../ui/toasts';
 import { Txt } from '../../ui/Txt';
+import { useForm } from '../../ui/useForm';
 import { useWords } from '../../ui/words';
 import { AuthFrame } from './AuthFrame';
 import { checkNewPassword } from './checks';
@@ -22,18 +22,23 @@ export function ResetScreen() {
   const { token, error } = useLocalSearchParams<{ token?: string; error?: string }>();
   const [refused, setRefused] = useState<string | null>(null);
   const [old, setOld] = useState(false);
-  const { control, handleSubmit, formState } = useForm({ defaultValues: { password: '' } });
 
-  const submit = handleSubmit(async ({ password }) => {
-    setRefused(null);
-    try {
-      await resetPassword(token ?? '', password);
-      toast(t('auth.reset.done'));
-      router.replace('/sign-in');
-    } catch (failure) {
-      if (failure instanceof AuthError && failure.problem === 'oldLink') setOld(true);
-      else setRefused(problem(failure));
-    }
+  const form = useForm({
+    initial: { password: '' },
+    checks: {
+      password: (value) => checkNewPassword(t, value),
+    },
+    onSubmit: async ({ password }) => {
+      setRefused(null);
+      try {
+        await resetPassword(token ?? '', password);
+        toast(t('auth.reset.done'));
+        router.replace('/sign-in');
+      } catch (failure) {
+        if (failure instanceof AuthError && failure.problem === 'oldLink') setOld(true);
+        else setRefused(problem(failure));
+      }
+    },
   });
 
   if (old || error !== undefined || token === undefined)
@@ -46,35 +51,18 @@ export function ResetScreen() {
 
   return (
     <AuthFrame title={t('auth.reset.title')}>
-      <Controller
-        control={control}
-        name="password"
-        rules={{ validate: (value) => checkNewPassword(t, value) }}
-        render={({ field, fieldState }) => (
-          <PasswordField
-            ref={field.ref}
-            label={t('auth.fields.newPassword')}
-            hint={t('auth.fields.passwordHint')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            error={fieldState.error?.message}
-            autoComplete="new-password"
-            onSubmitEditing={() => void submit()}
-          />
-        )}
+      <PasswordField
+        {...form.field('password')}
+        label={t('auth.fields.newPassword')}
+        hint={t('auth.fields.passwordHint')}
+        autoComplete="new-password"
       />
       {refused ? (
         <View role="alert">
           <Caution text={refused} />
         </View>
       ) : null}
-      <Button
-        kind="filled"
-        label={t('auth.reset.action')}
-        busy={formState.isSubmitting}
-        onPress={() => void submit()}
-      />
+      <Button kind="filled" label={t('auth.reset.action')} busy={form.busy} onPress={form.submit} />
     </AuthFrame>
   );
 }

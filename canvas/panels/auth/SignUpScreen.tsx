@@ -1,5 +1,4 @@
 import { useState } from 'react';
-import { Controller, useForm } from 'react-hook-form';
 import { View } from 'react-native';
 import { signUp } from '../../client/session';
 import { Button } from '../../ui/Button';
@@ -7,6 +6,7 @@ import { Caution } from '../../ui/Caution';
 import { Field } from '../../ui/Field';
 import { space } from '../../ui/tokens';
 import { Txt } from '../../ui/Txt';
+import { useForm } from '../../ui/useForm';
 import { useWords } from '../../ui/words';
 import { AuthFrame } from './AuthFrame';
 import { checkEmail, checkNewPassword } from './checks';
@@ -18,86 +18,52 @@ export function SignUpScreen() {
   const t = useWords();
   const problem = useAuthProblem();
   const [refused, setRefused] = useState<string | null>(null);
-  const { control, handleSubmit, formState } = useForm({ defaultValues: { name: '', email: '', password: '' } });
 
-  const submit = handleSubmit(async ({ name, email, password }) => {
-    setRefused(null);
-    try {
-      await signUp(name, email, password);
-    } catch (error) {
-      setRefused(problem(error));
-    }
+  const form = useForm({
+    initial: { name: '', email: '', password: '' },
+    checks: {
+      name: (value) => value.trim() !== '' || t('auth.problems.nameNeeded'),
+      email: (value) => checkEmail(t, value),
+      password: (value) => checkNewPassword(t, value),
+    },
+    onSubmit: async ({ name, email, password }) => {
+      setRefused(null);
+      try {
+        await signUp(name, email, password);
+      } catch (error) {
+        setRefused(problem(error));
+      }
+    },
   });
 
   return (
     <AuthFrame title={t('auth.signUp.title')}>
-      <Controller
-        control={control}
-        name="name"
-        rules={{ validate: (value) => value.trim() !== '' || t('auth.problems.nameNeeded') }}
-        render={({ field, fieldState }) => (
-          <Field
-            ref={field.ref}
-            label={t('auth.fields.name')}
-            hint={t('auth.fields.nameHint')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            error={fieldState.error?.message}
-            autoComplete="name"
-            maxLength={80}
-            onSubmitEditing={() => void submit()}
-          />
-        )}
+      <Field
+        {...form.field('name')}
+        label={t('auth.fields.name')}
+        hint={t('auth.fields.nameHint')}
+        autoComplete="name"
+        maxLength={80}
       />
-      <Controller
-        control={control}
-        name="email"
-        rules={{ validate: (value) => checkEmail(t, value) }}
-        render={({ field, fieldState }) => (
-          <Field
-            ref={field.ref}
-            label={t('auth.fields.email')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            error={fieldState.error?.message}
-            inputMode="email"
-            autoComplete="email"
-            autoCapitalize="none"
-            onSubmitEditing={() => void submit()}
-          />
-        )}
+      <Field
+        {...form.field('email')}
+        label={t('auth.fields.email')}
+        inputMode="email"
+        autoComplete="email"
+        autoCapitalize="none"
       />
-      <Controller
-        control={control}
-        name="password"
-        rules={{ validate: (value) => checkNewPassword(t, value) }}
-        render={({ field, fieldState }) => (
-          <PasswordField
-            ref={field.ref}
-            label={t('auth.fields.password')}
-            hint={t('auth.fields.passwordHint')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            error={fieldState.error?.message}
-            autoComplete="new-password"
-            onSubmitEditing={() => void submit()}
-          />
-        )}
+      <PasswordField
+        {...form.field('password')}
+        label={t('auth.fields.password')}
+        hint={t('auth.fields.passwordHint')}
+        autoComplete="new-password"
       />
       {refused ? (
         <View role="alert">
           <Caution text={refused} />
         </View>
       ) : null}
-      <Button
-        kind="filled"
-        label={t('auth.signUp.action')}
-        busy={formState.isSubmitting}
-        onPress={() => void submit()}
-      />
+      <Button kind="filled" label={t('auth.signUp.action')} busy={form.busy} onPress={form.submit} />
       <View style={{ flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', columnGap: space.s }}>
         <Txt tone="soft" size="large">
           {t('auth.signUp.haveAccount')}

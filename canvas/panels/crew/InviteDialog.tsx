@@ -1,4 +1,3 @@
-import { Controller, useForm } from 'react-hook-form';
 import { ROLES, type Role } from '../../../model/contracts/common';
 import { ApiError } from '../../client/api';
 import { errorWords } from '../../client/errorWords';
@@ -9,6 +8,7 @@ import { Dialog } from '../../ui/Dialog';
 import { Field } from '../../ui/Field';
 import { toast } from '../../ui/toasts';
 import { Txt } from '../../ui/Txt';
+import { useForm } from '../../ui/useForm';
 import { useWords } from '../../ui/words';
 import { checkEmail } from '../auth/checks';
 import { RoleList } from './RoleList';
@@ -17,20 +17,22 @@ import { RoleList } from './RoleList';
 export function InviteDialog({ siteId, onClose }: { siteId: string; onClose: () => void }) {
   const t = useWords();
   const invite = useInvite(siteId);
-  const { control, handleSubmit } = useForm<{ email: string; role: Role }>({
-    defaultValues: { email: '', role: 'mason' },
-  });
 
-  const submit = handleSubmit(({ email, role }) =>
-    invite
-      .mutateAsync({ email: email.trim(), role })
-      .then(() => {
-        toast(t('crew.sent', { email: email.trim() }));
-        onClose();
-      })
-      // Shown below, from the mutation.
-      .catch(() => {}),
-  );
+  const form = useForm<{ email: string; role: Role }>({
+    initial: { email: '', role: 'mason' },
+    checks: {
+      email: (value) => checkEmail(t, value),
+    },
+    onSubmit: ({ email, role }) =>
+      invite
+        .mutateAsync({ email: email.trim(), role })
+        .then(() => {
+          toast(t('crew.sent', { email: email.trim() }));
+          onClose();
+        })
+        // Shown below, from the mutation.
+        .catch(() => {}),
+  });
 
   const already = invite.error instanceof ApiError && invite.error.code === 'alreadyThere';
   return (
@@ -41,37 +43,24 @@ export function InviteDialog({ siteId, onClose }: { siteId: string; onClose: () 
       actions={
         <>
           <Button label={t('common.cancel')} onPress={onClose} />
-          <Button kind="filled" label={t('crew.send')} busy={invite.isPending} onPress={() => void submit()} />
+          <Button kind="filled" label={t('crew.send')} busy={invite.isPending} onPress={form.submit} />
         </>
       }
     >
       <Txt tone="soft">{t('crew.inviteText')}</Txt>
-      <Controller
-        control={control}
-        name="email"
-        rules={{ validate: (value) => checkEmail(t, value) }}
-        render={({ field, fieldState }) => (
-          <Field
-            ref={field.ref}
-            label={t('crew.email')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            error={fieldState.error?.message}
-            inputMode="email"
-            autoComplete="off"
-            autoCapitalize="none"
-            autoFocus
-            onSubmitEditing={() => void submit()}
-          />
-        )}
+      <Field
+        {...form.field('email')}
+        label={t('crew.email')}
+        inputMode="email"
+        autoComplete="off"
+        autoCapitalize="none"
+        autoFocus
       />
-      <Controller
-        control={control}
-        name="role"
-        render={({ field }) => (
-          <RoleList label={t('crew.role')} roles={ROLES} value={field.value} onChange={field.onChange} />
-        )}
+      <RoleList
+        label={t('crew.role')}
+        roles={ROLES}
+        value={form.values.role}
+        onChange={(role) => form.set('role', role)}
       />
       {invite.isError ? <Caution text={already ? t('crew.already') : errorWords(t, invite.error)} /> : null}
     </Dialog>

@@ -22,6 +22,9 @@ import { withoutReadings } from './readings';
 import { StationList } from './StationList';
 import { listStations, nextUnread, stationKey, type StationEntry } from './stations';
 
+/** Below this height, px, a phone's keypad takes the profile's room. */
+const SHORT = 700;
+
 /** The level book: every station measured down from the level line, with what that makes of the bedding. */
 export function LevelsScreen({ siteId }: { siteId: string }) {
   const t = useWords();
@@ -126,7 +129,7 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
   );
   const profile = (
     <View style={{ backgroundColor: colours.surface, borderBottomWidth: strokes.hair, borderColor: colours.rule }}>
-      <ProfileView readingId={selected.reading?.id ?? null} height={phone ? 132 : 220} />
+      <ProfileView readingId={selected.reading?.id ?? null} height={phone ? 128 : 220} />
     </View>
   );
   const pad = (
@@ -135,7 +138,7 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
       entry={selected}
       survey={survey}
       last={nextUnread(entries, selected.key) === null}
-      compact={phone && layout.height < 800}
+      compact={layout.height < 800}
       onSet={(next) => set(next, selected)}
       onClear={(readingId) => {
         editSurvey((now) => withoutReadings(now, [readingId]));
@@ -164,10 +167,10 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
       />
       {phone ? (
         editable && !listed ? (
-          <ScrollView style={{ flex: 1 }} contentContainerStyle={{ flexGrow: 1 }}>
-            {profile}
+          <View style={{ flex: 1, minHeight: 0 }}>
+            {layout.height < SHORT ? null : profile}
             {pad}
-          </ScrollView>
+          </View>
         ) : (
           <ScrollView style={{ flex: 1 }}>
             {profile}
@@ -191,18 +194,16 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
             {list}
           </ScrollView>
           {editable ? (
-            <ScrollView
+            <View
               style={{
-                flexGrow: 0,
-                flexBasis: layout.name === 'wide' ? 460 : 400,
+                width: layout.name === 'wide' ? 460 : 400,
                 backgroundColor: colours.surface,
                 borderLeftWidth: strokes.hair,
                 borderColor: colours.rule,
               }}
-              contentContainerStyle={{ flexGrow: 1 }}
             >
               {pad}
-            </ScrollView>
+            </View>
           ) : null}
         </View>
       )}

@@ -1,8 +1,8 @@
 import { useState } from 'react';
-import { View } from 'react-native';
+import { ScrollView, View } from 'react-native';
 import type { Survey } from '../../../model/drawing/surveySchema';
 import { readLength } from '../../../model/length/read';
-import type { Ticks } from '../../../model/length/ticks';
+import { ticks, type Ticks } from '../../../model/length/ticks';
 import { writeLength } from '../../../model/length/write';
 import { levelGround } from '../../../model/survey/levelGround';
 import { newWriteId } from '../../client/writeId';
@@ -58,8 +58,11 @@ export function ReadingPad({ entry, survey, last, compact, onSet, onClear, onSte
   }
 
   return (
-    <View style={{ flexGrow: 1, justifyContent: 'space-between' }}>
-      <View style={{ padding: space.l, gap: space.s }}>
+    <View style={{ flex: 1, minHeight: 0 }}>
+      <ScrollView
+        style={{ flex: 1 }}
+        contentContainerStyle={{ paddingHorizontal: space.l, paddingVertical: space.s, gap: space.xs }}
+      >
         <View style={{ flexDirection: 'row', alignItems: 'center', gap: space.xs }}>
           <IconButton icon="back" label={t('levels.previous')} onPress={() => onStep(-1)} />
           <View style={{ flex: 1 }}>
@@ -72,25 +75,18 @@ export function ReadingPad({ entry, survey, last, compact, onSet, onClear, onSte
           </View>
           <IconButton icon="forward" label={t('levels.next')} onPress={() => onStep(1)} />
         </View>
-        <View
-          role="status"
-          style={{
-            flexDirection: compact ? 'row' : 'column',
-            flexWrap: 'wrap',
-            alignItems: compact ? 'flex-end' : 'flex-start',
-            justifyContent: 'space-between',
-            gap: space.s,
-          }}
-        >
-          {down === null ? (
-            <Txt numeric size="screen" weight="semibold" tone="soft">
-              {text === '' ? '–' : text}
-            </Txt>
-          ) : (
-            <Measurement length={down} units={units} step={step} size="screen" />
-          )}
+        <View role="status" style={{ flexDirection: 'row', flexWrap: 'wrap', alignItems: 'flex-end', gap: space.s }}>
+          <View style={{ flexGrow: 1 }}>
+            {down === null ? (
+              <Txt numeric size="screen" weight="semibold" tone="soft">
+                {text === '' ? '–' : text}
+              </Txt>
+            ) : (
+              <Measurement length={down} units={units} step={step} size="screen" />
+            )}
+          </View>
           {here ? (
-            <View style={{ flexDirection: 'row', alignItems: 'baseline', gap: space.s, paddingBottom: space.s }}>
+            <View style={{ alignItems: 'flex-end', paddingBottom: space.s }}>
               <Txt tone="soft">{t(text === '' ? 'levels.bedding' : 'levels.beddingWill')}</Txt>
               <Measurement length={here.bedding} units={units} step={step} size="row" />
             </View>
@@ -98,7 +94,7 @@ export function ReadingPad({ entry, survey, last, compact, onSet, onClear, onSte
         </View>
         {here && here.over > 0 ? <Caution bare text={t('levels.over', { by: write(here.over) })} /> : null}
         {text !== '' && lower > 0 ? (
-          <Caution bare weight="note" text={t('levels.newHighPoint', { by: write(lower as Ticks) })} />
+          <Caution bare weight="note" text={t('levels.newHighPoint', { by: write(ticks(lower)) })} />
         ) : null}
         {error ? <Caution bare text={error} /> : null}
         {entry.reading && text === '' ? (
@@ -107,10 +103,10 @@ export function ReadingPad({ entry, survey, last, compact, onSet, onClear, onSte
             size="body"
             label={entry.along ? t('levels.removeStation') : t('levels.clear')}
             onPress={() => entry.reading && onClear(entry.reading.id)}
-            style={{ alignSelf: 'flex-start', paddingHorizontal: space.xs }}
+            style={{ alignSelf: 'flex-start', paddingHorizontal: 0 }}
           />
         ) : null}
-      </View>
+      </ScrollView>
       <TapeKeypad
         units={units}
         step={step}

@@ -1,4 +1,3 @@
-import { Controller, useForm } from 'react-hook-form';
 import type { Site } from '../../../model/contracts/sites';
 import { errorWords } from '../../client/errorWords';
 import { useRenameSite } from '../../client/sites';
@@ -7,24 +6,29 @@ import { Caution } from '../../ui/Caution';
 import { Dialog } from '../../ui/Dialog';
 import { Field } from '../../ui/Field';
 import { toast } from '../../ui/toasts';
+import { useForm } from '../../ui/useForm';
 import { useWords } from '../../ui/words';
 import { checkSiteName } from '../sites/checkSiteName';
 
 export function RenameSiteDialog({ site, onClose }: { site: Site; onClose: () => void }) {
   const t = useWords();
   const rename = useRenameSite(site.id);
-  const { control, handleSubmit } = useForm({ defaultValues: { name: site.name } });
 
-  const submit = handleSubmit(({ name }) =>
-    rename
-      .mutateAsync({ name: name.trim() })
-      .then(() => {
-        toast(t('sites.rename.done', { name: name.trim() }));
-        onClose();
-      })
-      // Shown below, from the mutation.
-      .catch(() => {}),
-  );
+  const form = useForm({
+    initial: { name: site.name },
+    checks: {
+      name: (value) => checkSiteName(t, value),
+    },
+    onSubmit: ({ name }) =>
+      rename
+        .mutateAsync({ name: name.trim() })
+        .then(() => {
+          toast(t('sites.rename.done', { name: name.trim() }));
+          onClose();
+        })
+        // Shown below, from the mutation.
+        .catch(() => {}),
+  });
 
   return (
     <Dialog
@@ -34,33 +38,11 @@ export function RenameSiteDialog({ site, onClose }: { site: Site; onClose: () =>
       actions={
         <>
           <Button label={t('common.cancel')} onPress={onClose} />
-          <Button
-            kind="filled"
-            label={t('sites.rename.action')}
-            busy={rename.isPending}
-            onPress={() => void submit()}
-          />
+          <Button kind="filled" label={t('sites.rename.action')} busy={rename.isPending} onPress={form.submit} />
         </>
       }
     >
-      <Controller
-        control={control}
-        name="name"
-        rules={{ validate: (value) => checkSiteName(t, value) }}
-        render={({ field, fieldState }) => (
-          <Field
-            ref={field.ref}
-            label={t('sites.newSite.name')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            error={fieldState.error?.message}
-            autoFocus
-            maxLength={80}
-            onSubmitEditing={() => void submit()}
-          />
-        )}
-      />
+      <Field {...form.field('name')} label={t('sites.newSite.name')} autoFocus maxLength={80} />
       {rename.isError ? <Caution text={errorWords(t, rename.error)} /> : null}
     </Dialog>
   );

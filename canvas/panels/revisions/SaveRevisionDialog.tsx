@@ -1,5 +1,4 @@
 import { useState } from 'react';
-import { Controller, useForm } from 'react-hook-form';
 import { ApiError } from '../../client/api';
 import { useSaveRevision } from '../../client/revisions';
 import { newWriteId } from '../../client/writeId';
@@ -9,6 +8,7 @@ import { Dialog } from '../../ui/Dialog';
 import { Field } from '../../ui/Field';
 import { toast } from '../../ui/toasts';
 import { Txt } from '../../ui/Txt';
+import { useForm } from '../../ui/useForm';
 import { useWords } from '../../ui/words';
 import { useDraftActions, useSetOut } from '../workspace/workspace';
 
@@ -22,24 +22,26 @@ export function SaveRevisionDialog(props: { siteId: string; number: number; onCl
   const [refused, setRefused] = useState<string | null>(null);
   // One write however often it is pressed: the server answers the second try as it did the first.
   const [writeId] = useState(newWriteId);
-  const { control, handleSubmit, formState } = useForm({ defaultValues: { note: '' } });
   const wrong = reasons.filter(({ weight }) => weight !== 'note').length;
 
-  const submit = handleSubmit(async ({ note }) => {
-    setRefused(null);
-    if ((await flush()) !== 'saved') {
-      setRefused(t('revisions.save.unsaved'));
-      return;
-    }
-    const { drawing, survey } = versions();
-    try {
-      await save.mutateAsync({ writeId, note: note.trim(), drawingVersion: drawing, surveyVersion: survey });
-      toast(t('revisions.save.saved', { number }));
-      onClose();
-    } catch (error) {
-      const stale = error instanceof ApiError && error.code === 'stale';
-      setRefused(stale ? t('revisions.save.stale') : t('revisions.save.failed'));
-    }
+  const form = useForm({
+    initial: { note: '' },
+    onSubmit: async ({ note }) => {
+      setRefused(null);
+      if ((await flush()) !== 'saved') {
+        setRefused(t('revisions.save.unsaved'));
+        return;
+      }
+      const { drawing, survey } = versions();
+      try {
+        await save.mutateAsync({ writeId, note: note.trim(), drawingVersion: drawing, surveyVersion: survey });
+        toast(t('revisions.save.saved', { number }));
+        onClose();
+      } catch (error) {
+        const stale = error instanceof ApiError && error.code === 'stale';
+        setRefused(stale ? t('revisions.save.stale') : t('revisions.save.failed'));
+      }
+    },
   });
 
   return (
@@ -53,29 +55,19 @@ export function SaveRevisionDialog(props: { siteId: string; number: number; onCl
           <Button
             kind="filled"
             label={t('revisions.save.confirm', { number })}
-            busy={formState.isSubmitting}
-            onPress={() => void submit()}
+            busy={form.busy}
+            onPress={form.submit}
           />
         </>
       }
     >
       <Txt tone="soft">{t('revisions.save.text')}</Txt>
-      <Controller
-        control={control}
-        name="note"
-        render={({ field }) => (
-          <Field
-            ref={field.ref}
-            label={t('revisions.save.note')}
-            placeholder={t('revisions.save.notePlaceholder')}
-            value={field.value}
-            onChangeText={field.onChange}
-            onBlur={field.onBlur}
-            maxLength={500}
-            autoFocus
-            onSubmitEditing={() => void submit()}
-          />
-        )}
+      <Field
+        {...form.field('note')}
+        label={t('revisions.save.note')}
+        placeholder={t('revisions.save.notePlaceholder')}
+        maxLength={500}
+        autoFocus
       />
       {wrong > 0 ? <Caution text={t('revisions.save.reasons', { count: wrong })} /> : null}
       {refused ? <Caution text={refused} /> : null}

@@ -76,7 +76,7 @@ export function SitesScreen() {
       ) : (
         <Loading />
       )}
-      <NewSiteDialog open={open === 'new'} onClose={() => setOpen('none')} />
+      {open === 'new' ? <NewSiteDialog onClose={() => setOpen('none')} /> : null}
       <AccountDialog open={open === 'account'} onClose={() => setOpen('none')} />
     </Paper>
   );

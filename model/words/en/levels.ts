@@ -1,6 +1,6 @@
 export const levels = {
   title: 'Levels',
-  subtitle: 'Measured down from the level line · {{done}} of {{all}} stations',
+  subtitle: '{{done}} of {{all}} stations read',
   station: 'Station {{name}}',
   corner: 'Corner {{letter}}',
   onRun: '{{run}}, {{at}} from {{letter}}',

@@ -1,14 +1,14 @@
 import { Slot, useLocalSearchParams } from 'expo-router';
 import { SiteFrame } from '../../../../canvas/panels/shell/SiteFrame';
-import { DraftProvider } from '../../../../canvas/panels/workspace/DraftProvider';
+import { DraftWhenDrawn } from '../../../../canvas/panels/shell/DraftWhenDrawn';
 
 export default function SiteLayout() {
   const { siteId } = useLocalSearchParams<{ siteId: string }>();
   return (
     <SiteFrame siteId={siteId}>
-      <DraftProvider siteId={siteId}>
+      <DraftWhenDrawn siteId={siteId}>
         <Slot />
-      </DraftProvider>
+      </DraftWhenDrawn>
     </SiteFrame>
   );
 }

@@ -1,5 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
-import { CrewScreen } from '../../../../canvas/panels/crew/CrewScreen';
+import { CrewScreen } from '../../../../canvas/panels/shell/lazyScreens';
 
 export default function CrewRoute() {
   const { siteId } = useLocalSearchParams<{ siteId: string }>();

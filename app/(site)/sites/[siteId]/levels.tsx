@@ -1,5 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
-import { LevelsScreen } from '../../../../canvas/panels/levels/LevelsScreen';
+import { LevelsScreen } from '../../../../canvas/panels/shell/lazyScreens';
 
 export default function LevelsRoute() {
   const { siteId } = useLocalSearchParams<{ siteId: string }>();

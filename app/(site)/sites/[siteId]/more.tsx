@@ -1,5 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
-import { MoreScreen } from '../../../../canvas/panels/more/MoreScreen';
+import { MoreScreen } from '../../../../canvas/panels/shell/lazyScreens';
 
 export default function MoreRoute() {
   const { siteId } = useLocalSearchParams<{ siteId: string }>();

@@ -1,5 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
-import { RevisionsScreen } from '../../../../../canvas/panels/revisions/RevisionsScreen';
+import { RevisionsScreen } from '../../../../../canvas/panels/shell/lazyScreens';
 
 export default function RevisionsRoute() {
   const { siteId } = useLocalSearchParams<{ siteId: string }>();
