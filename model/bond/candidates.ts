@@ -12,6 +12,9 @@ import {
 /** Stretches of up to this many pieces try a closer in every place; longer ones in a few. */
 const EVERY_PLACE = 8;
 
+/** Where joints may vary so much that more counts of units fit, only those with joints nearest to nominal are tried. */
+const MOST_COUNTS = 6;
+
 interface Counted {
   readonly count: number;
   /** Joints between which the sum of the closers stays inside its limits. */
@@ -29,7 +32,7 @@ function countsFor(span: Span, closers: number, leastSum: number, mostSum: numbe
   const length = spanLength(span);
   const ends = endJoints(span);
   const counted: Counted[] = [];
-  const wholes = Math.floor((length + joint.most) / (unit + joint.least));
+  const wholes = Math.min(Math.floor((length + joint.most) / (unit + joint.least)), Math.floor(length / unit));
   for (let whole = Math.max(0, wholes + 1); whole >= 0; whole -= 1) {
     const count = whole + closers;
     if (count < 1) break;
@@ -41,7 +44,8 @@ function countsFor(span: Span, closers: number, leastSum: number, mostSum: numbe
     const most = jointCount > 0 ? Math.min(joint.most, (left - leastSum) / jointCount) : joint.nominal;
     if (least <= most) counted.push({ count, least, most, jointCount });
   }
-  return counted;
+  const off = ({ least, most }: Counted) => Math.abs(clamp(joint.nominal, least, most) - joint.nominal);
+  return counted.length > MOST_COUNTS ? counted.sort((a, b) => off(a) - off(b)).slice(0, MOST_COUNTS) : counted;
 }
 
 function clamp(value: number, least: number, most: number): number {
@@ -64,7 +68,7 @@ function fittingClosers(apart: number, joint: number, limits: BondLimits): numbe
   for (const phase of [0, apart, -apart])
     for (const wanted of [enough, module - enough, limits.offset * module, (1 - limits.offset) * module]) {
       const size = (((phase - wanted - joint) % module) + module) % module;
-      sizes.push(Math.ceil(size), Math.floor(size));
+      sizes.push(Math.round(size));
     }
   return sizes;
 }

@@ -28,7 +28,7 @@ function plainEnd(at: number, quoin = false): CourseEnd {
 }
 
 /** How wide a wall of `thickness` shows where it is cut by another face at `angle` degrees. */
-export function skewWidth(thickness: number, angle: number | null): number {
+function skewWidth(thickness: number, angle: number | null): number {
   const sine = Math.abs(Math.sin(((angle ?? 90) * Math.PI) / 180));
   return Math.round(thickness * Math.min(MOST_SKEW, sine > 0 ? 1 / sine : MOST_SKEW));
 }
@@ -60,7 +60,7 @@ export function endByKind(kind: EndKind, width: number, goesThrough: Parity, ste
 }
 
 /** How a run meets the other run at a corner of two: whether it counts there as the one that arrives. */
-export function arrivesAt(walls: Walls, run: RunGeometry, which: 0 | 1): boolean {
+function arrivesAt(walls: Walls, run: RunGeometry, which: 0 | 1): boolean {
   const end = run.ends[which];
   const other = walls.runById.get(end.others[0] ?? '');
   if (!other) return which === 1;

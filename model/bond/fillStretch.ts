@@ -185,7 +185,7 @@ function fillBoth(task: StretchTask, limits: BondLimits, mostCuts: number, broke
   const candidates = candidatesOf(task, limits, true);
   const inCourse = mostInCourse(task);
   for (let cuts = 0; cuts <= mostCuts; cuts += 1)
-    for (const from of [quick, candidates]) {
+    for (const from of cuts === 0 ? [quick] : [quick, candidates]) {
       const whole = bestWithCuts(from, cuts, { breaks: 0, inCourse }, limits, null);
       if (whole) return whole;
     }

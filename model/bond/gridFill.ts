@@ -6,16 +6,16 @@ type Closing = readonly number[];
 
 /**
  * Ways to close `room` (clear of the joint at the bond's first piece): with one piece, or with that and the next unit
- * made into two. `joint` is the bond's own.
+ * made into two. `fitsAlready` where the bond's first piece needs nothing beside it.
  */
 function closingsFor(
   room: number,
-  joint: number,
+  fitsAlready: boolean,
   limits: BondLimits,
 ): { readonly pieces: Closing; readonly taken: number }[] {
   const { unit, leastPiece } = limits;
   const closings: { pieces: Closing; taken: number }[] = [];
-  if (room === -joint) closings.push({ pieces: [], taken: 0 });
+  if (fitsAlready) closings.push({ pieces: [], taken: 0 });
   if (room >= leastPiece && room <= unit) closings.push({ pieces: [room], taken: 0 });
   const two = room + unit;
   const least = Math.min(leastPiece, unit);
@@ -25,6 +25,11 @@ function closingsFor(
       closings.push({ pieces: [first, second], taken: 1 });
   }
   return closings;
+}
+
+/** Whether a piece that far from a jamb or a lintel's end needs nothing between: no gap, or a joint inside its limits. */
+function fitsBeside(gap: number, joint: boolean, limits: BondLimits): boolean {
+  return joint ? gap >= limits.joint.least && gap <= limits.joint.most : gap === 0;
 }
 
 /**
@@ -49,8 +54,20 @@ export function gridFills(
   const jointBefore = first >= 2 ? course[first]! - course[first - 1]! : limits.joint.nominal;
   const jointAfter = last + 2 < course.length ? course[last + 2]! - course[last + 1]! : limits.joint.nominal;
   const none = [{ pieces: [] as Closing, taken: 0 }];
-  const starts = atStart ? none : closingsFor(course[first]! - jointBefore - from, jointBefore, limits);
-  const ends = atEnd ? none : closingsFor(to - course[last + 1]! - jointAfter, jointAfter, limits);
+  const starts = atStart
+    ? none
+    : closingsFor(
+        course[first]! - jointBefore - from,
+        fitsBeside(course[first]! - span.from.at, span.from.joint, limits),
+        limits,
+      );
+  const ends = atEnd
+    ? none
+    : closingsFor(
+        to - course[last + 1]! - jointAfter,
+        fitsBeside(span.to.at - course[last + 1]!, span.to.joint, limits),
+        limits,
+      );
   const fills: CourseFill[] = [];
   for (const start of starts)
     for (const end of ends) {

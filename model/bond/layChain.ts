@@ -8,6 +8,7 @@ import type { Chain } from './chains';
 import { checkChain } from './checkChain';
 import { spanLength, type BondLimits } from './courseFill';
 import { endOfRun, type EndPair, type Parity } from './ends';
+import { hasTooManyPieces } from './limits';
 import { layZones, type FillMemo } from './layZones';
 import { farEnd, noCutEitherWay, type NoCut } from './noCut';
 import { shareChain } from './shareChain';
@@ -39,7 +40,8 @@ export function layChain(task: ChainTask): { runs: RunBond[]; reasons: Reason[] 
   const endInto = endOfRun(walls, lastRun, 1, turns.get(lastRun.ends[1].cornerId) ?? 0);
   const end = farEnd(endInto, chain.length);
   const blocks = chain.length > 0 ? blocksOf(chain, walls, task.openings, task.heights, coursing) : [];
-  const zones = chain.length > 0 && hasSpan(start, end) ? zonesOf(start, end, blocks, coursing) : [];
+  const canLay = chain.length > 0 && !hasTooManyPieces(chain.length, limits) && hasSpan(start, end);
+  const zones = canLay ? zonesOf(start, end, blocks, coursing) : [];
   const laid = layZones(zones, { start, end }, limits, memo);
   const noCut = chain.length > 0 ? noCutEitherWay(start, endInto, chain.length, limits) : { below: null, above: null };
   const noCutOf = (length: number): NoCut => {

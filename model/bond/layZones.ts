@@ -29,7 +29,7 @@ function keyOfEnd(pair: EndPair, origin: number): string {
   return pair.map((end) => `${end.at - origin}${end.joint ? (end.lapped ? 'j' : 'b') : 'n'}`).join('/');
 }
 
-export function keyOfStretch(stretch: Stretch, origin: number): string {
+function keyOfStretch(stretch: Stretch, origin: number): string {
   return `${keyOfEnd(stretch.start, origin)}|${keyOfEnd(stretch.end, origin)}`;
 }
 

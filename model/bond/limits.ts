@@ -11,3 +11,11 @@ export function bondLimits(wallType: WallType): BondLimits {
   const wantedLap = Math.max(leastLap, Math.floor(offset * (unit + headJoint.nominal)) - headJoint.nominal);
   return { unit, joint: headJoint, leastLap, leastPiece, wantedLap, offset };
 }
+
+/** No wall has this many units in a course; a drawing that asks for more is not laid. */
+const MOST_PIECES = 20_000;
+
+/** Whether a course of this length would have more pieces than any wall has. */
+export function hasTooManyPieces(length: number, limits: BondLimits): boolean {
+  return length / (limits.unit + limits.joint.least) > MOST_PIECES;
+}

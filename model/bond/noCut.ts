@@ -5,7 +5,7 @@ import type { EndKind } from '../walls/types';
 import type { BondLimits, Span } from './courseFill';
 import { endByKind, type CourseEnd, type EndPair, type Parity } from './ends';
 import { fewestCuts } from './fillStretch';
-import { bondLimits } from './limits';
+import { bondLimits, hasTooManyPieces } from './limits';
 import { unitSize } from './unitSize';
 
 export interface NoCut {
@@ -38,7 +38,8 @@ function isPlain(pair: EndPair): boolean {
  * reach the same length, and their laps to hold. A free end or a stem takes a closer in alternate courses at any
  * length: that one is not counted, and the other courses are whole.
  */
-export function noCutBetween(start: EndPair, end: EndPair, near: number, limits: BondLimits): NoCut {
+function noCutBetween(start: EndPair, end: EndPair, near: number, limits: BondLimits): NoCut {
+  if (!(near > 0) || hasTooManyPieces(near, limits)) return { below: null, above: null };
   const plain = (isPlain(start) ? 1 : 0) + (isPlain(end) ? 1 : 0);
   const { unit, joint } = limits;
   const fixed = (p: Parity) => start[p].at + end[p].at;

@@ -5,6 +5,7 @@ import { spanLength, type BondLimits } from './courseFill';
 import { endOfRun, isLappedEnd, type EndPair, type Parity } from './ends';
 import { fewestCuts } from './fillStretch';
 import { lapsBetween } from './laps';
+import { hasTooManyPieces } from './limits';
 import { layWhole, spansOf, type FillMemo } from './layZones';
 import { exchanged, farEnd } from './noCut';
 
@@ -41,7 +42,13 @@ const MOST_CUTS = 4;
 function linkOf(chain: Chain, walls: Walls, kit: BondKit): Link | null {
   const first = chain.runs[0]!.run;
   const last = chain.runs[chain.runs.length - 1]!.run;
-  if (chain.length <= 0 || !isLappedEnd(first, 0) || !isLappedEnd(last, 1)) return null;
+  if (
+    chain.length <= 0 ||
+    hasTooManyPieces(chain.length, kit.limits) ||
+    !isLappedEnd(first, 0) ||
+    !isLappedEnd(last, 1)
+  )
+    return null;
   const start = endOfRun(walls, first, 0, 0);
   const end = farEnd(endOfRun(walls, last, 1, 0), chain.length);
   const alike = cutsOf(start, end, kit);

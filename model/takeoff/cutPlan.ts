@@ -7,7 +7,7 @@ export interface CutStock {
 }
 
 /** Up to this many cuts are planned exactly; beyond, first fit by falling length. */
-export const EXACT_CUTS = 14;
+const EXACT_CUTS = 14;
 
 /**
  * Takes a cut off what is left of a length. A cut that leaves nothing needs no saw beyond it, and one that leaves less

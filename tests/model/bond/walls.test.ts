@@ -195,3 +195,26 @@ describe('A laid bond', () => {
     expect(bond.runs.every((run) => run.patternByCourse.length === 0)).toBe(true);
   });
 });
+
+describe('A bond of sizes that no wall has', () => {
+  it('is refused where a course would have more units than can be laid, and bounded where joints may be anything', () => {
+    const dust = earthBlock({
+      unit: { length: ticks(1), width: ticks(1), height: ticks(1) },
+      headJoint: { nominal: ticks(0), least: ticks(0), most: ticks(0) },
+      leastLap: ticks(0),
+      leastPiece: ticks(0),
+    });
+    const { bond } = lay(freeWall(5000, dust));
+    expect(bond.reasons.map((reason) => reason.code)).toEqual(['runDoesNotBond']);
+
+    const anyJoint = earthBlock({ headJoint: { nominal: inches(0.5), least: ticks(0), most: inches(7000) } });
+    const wide = lay(freeWall(5000, anyJoint)).bond;
+    expect(wide.runs[0]!.closersPerCoursePair).toBe(2);
+    expect(wide.reasons).toEqual([]);
+  });
+
+  it('says so where a single piece is all that fits', () => {
+    const { bond } = lay(freeWall(2));
+    expect(bond.reasons.map((reason) => [reason.code, reason.amount])).toEqual([['pieceUnderLeast', inches(1.5)]]);
+  });
+});
