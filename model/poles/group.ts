@@ -2,7 +2,7 @@
 import { distance } from '../geometry/vec';
 import type { Candidate } from './candidates';
 import { bracesConflict, type BraceLine } from './clearance';
-import { bestWith, cheapestPair, pairOf, type Pair, type PoleBraces } from './pairs';
+import { bestWith, cheapestPair, pairsWith, type Pair, type PoleBraces, type Ranked } from './pairs';
 
 /**
  * When each of a pole's two braces first met another pole's, counted in rounds; null where it never did. Only braces that
@@ -47,7 +47,7 @@ export interface Solved {
 const UNBRACED = 1_000_000;
 /** Slack over the lower bound within which a group is first searched; it grows until an answer lies within it. */
 const FIRST_SLACK = 16;
-const SLACK_GROWS = 4;
+const SLACK_GROWS = 2;
 
 type Spend = () => boolean;
 
@@ -60,11 +60,8 @@ interface Choice {
   readonly after: number | null;
   /** Each candidate that may serve, with the best pair it can be part of, cheapest first. */
   readonly ranked: readonly Ranked[];
-}
-
-interface Ranked {
-  readonly candidate: Candidate;
-  readonly pair: Pair;
+  /** The same, given where the member's other brace is: cheapest pair with it first. */
+  readonly beside: (first: Candidate) => readonly Ranked[];
 }
 
 function rank(member: Member, which: 0 | 1, most: number, spend: Spend): Ranked[] {
@@ -75,6 +72,16 @@ function rank(member: Member, which: 0 | 1, most: number, spend: Spend): Ranked[
     if (pair) found.push({ candidate, pair });
   }
   return found.sort((a, b) => a.pair.cost - b.pair.cost);
+}
+
+/** Partners of each first candidate, listed once when first asked for. */
+function partners(member: Member, which: 0 | 1, most: number): Choice['beside'] {
+  const known = new Map<Candidate, readonly Ranked[]>();
+  return (first) => {
+    let list = known.get(first);
+    if (!list) known.set(first, (list = pairsWith(member.pole, first, which, most)));
+    return list;
+  };
 }
 
 /** The relevant braces in the order in which they met, so that those in each other's way are chosen one after another. */
@@ -93,7 +100,8 @@ function choicesOf(parts: readonly Part[], slack: number, spend: Spend): Choice[
   return wanted.map(({ member, which, part, most }, i) => {
     const after = firsts.get(member) ?? null;
     if (after === null) firsts.set(member, i);
-    return { member, which, part, after, ranked: rank(member, which, most, spend) };
+    const ranked = rank(member, which, most, spend);
+    return { member, which, part, after, ranked, beside: partners(member, which, most) };
   });
 }
 
@@ -177,13 +185,10 @@ function descend({ parts, choices, mayLeave, conflict, spend }: Descent, best: B
     const held = pairs.get(choice.member) ?? null;
     if (choice.after !== null && !held) return take(depth, choice, null, null);
     const first = choice.after === null ? null : (chosen[choice.after] ?? null);
-    for (const { candidate, pair: own } of choice.ranked) {
-      if (total(choice.part, own.cost - costOf(held)) >= best.cost) break;
+    for (const { candidate, pair } of first ? choice.beside(first) : choice.ranked) {
+      if (total(choice.part, pair.cost - costOf(held)) >= best.cost) break;
       if (!spend()) return;
-      if (!isClear(depth, choice, candidate)) continue;
-      const pair = first ? pairOf(choice.member.pole, first, candidate, choice.which) : own;
-      if (!pair || total(choice.part, pair.cost - costOf(held)) >= best.cost) continue;
-      take(depth, choice, candidate, pair);
+      if (isClear(depth, choice, candidate)) take(depth, choice, candidate, pair);
     }
     if (mayLeave && choice.after === null && total(choice.part, UNBRACED - costOf(held)) < best.cost)
       take(depth, choice, null, null);

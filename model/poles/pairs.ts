@@ -120,13 +120,30 @@ export function cheapestPair(braces: PoleBraces): Pair | null {
   return best;
 }
 
-/** The pair of two candidates, `second` being brace `which` of the pole; null where either can't stand or the angle is out. */
-export function pairOf(braces: PoleBraces, first: Candidate, second: Candidate, which: 0 | 1): Pair | null {
-  const angle = angleCost(first, second, braces.limits);
-  const costs = angle === null ? null : [fullCost(braces, first), fullCost(braces, second)];
-  const [a, b] = costs ?? [];
-  if (angle === null || a == null || b == null) return null;
-  return { cost: a + b + angle, braces: which === 0 ? [second, first] : [first, second] };
+/** A candidate and the pair that it makes. */
+export interface Ranked {
+  readonly candidate: Candidate;
+  readonly pair: Pair;
+}
+
+/** Every pair that `first` makes with a candidate for brace `which`, of those that cost no more than `most`, cheapest first. */
+export function pairsWith(braces: PoleBraces, first: Candidate, which: 0 | 1, most: number): readonly Ranked[] {
+  const costFirst = fullCost(braces, first);
+  if (costFirst === null) return [];
+  const found: Ranked[] = [];
+  for (const candidate of braces.lists()[which]) {
+    if (costFirst + candidate.cost > most) break;
+    const angle = angleCost(first, candidate, braces.limits);
+    if (angle === null || costFirst + candidate.cost + angle > most) continue;
+    const costSecond = fullCost(braces, candidate);
+    if (costSecond === null || costFirst + costSecond + angle > most) continue;
+    const pair: Pair = {
+      cost: costFirst + costSecond + angle,
+      braces: which === 0 ? [candidate, first] : [first, candidate],
+    };
+    found.push({ candidate, pair });
+  }
+  return found.sort((a, b) => a.pair.cost - b.pair.cost);
 }
 
 /** The cheapest pair with one brace given, within `most`; null where it can't stand or finds no partner. */
