@@ -53,9 +53,20 @@ export function costAt(pieces: readonly Piece[], height: number): Cost | null {
 
 /** The piece cut to `lo`…`hi`, which lies within it. */
 export function cut(piece: Piece, lo: number, hi: number): Piece {
-  if (lo === piece.lo && hi === piece.hi) return piece;
-  const { hard, soft } = costOn(piece, lo);
-  return { ...piece, lo, hi, hard, soft };
+  return lo === piece.lo && hi === piece.hi ? piece : moved(piece, lo, hi, 0);
+}
+
+/** The part of a piece within `lo`…`hi`, moved up `by`. Written out field by field: the search lives on this. */
+function moved(piece: Piece, lo: number, hi: number, by: number): Piece {
+  const along = lo - piece.lo;
+  return {
+    lo: lo + by,
+    hi: hi + by,
+    hard: piece.hard + piece.hardSlope * along,
+    soft: piece.soft + piece.softSlope * along,
+    hardSlope: piece.hardSlope,
+    softSlope: piece.softSlope,
+  };
 }
 
 /** Adds a piece at the upper end, joined to the last one where it goes straight on. */
@@ -65,7 +76,7 @@ function append(pieces: Piece[], piece: Piece): void {
     const next = costOn(last, piece.lo);
     const slopes = last.hardSlope === piece.hardSlope && last.softSlope === piece.softSlope;
     if (next.hard === piece.hard && next.soft === piece.soft && (slopes || piece.lo === piece.hi)) {
-      pieces[pieces.length - 1] = { ...last, hi: piece.hi };
+      pieces[pieces.length - 1] = moved(last, last.lo, piece.hi, 0);
       return;
     }
   }
@@ -178,42 +189,49 @@ function slidePiece(piece: Piece, least: number, most: number): Piece[] {
   const { lo, hi, hardSlope, softSlope } = piece;
   const rising = hardSlope !== 0 ? hardSlope : softSlope;
   if (rising === 0 || lo === hi) return [flat(piece, lo + least, hi + most, lo)];
-  if (rising > 0) {
-    const parts = [flat(piece, lo + least, lo + most, lo)];
-    parts.push({ ...cut(piece, lo + 1, hi), lo: lo + most + 1, hi: hi + most });
-    return parts;
-  }
-  const parts: Piece[] = [{ ...cut(piece, lo, hi - 1), lo: lo + least, hi: hi - 1 + least }];
-  parts.push(flat(piece, hi + least, hi + most, hi));
-  return parts;
+  return rising > 0
+    ? [flat(piece, lo + least, lo + most, lo), moved(piece, lo + 1, hi, most)]
+    : [moved(piece, lo, hi - 1, least), flat(piece, hi + least, hi + most, hi)];
 }
 
 function flat(piece: Piece, lo: number, hi: number, from: number): Piece {
-  return { lo, hi, ...costOn(piece, from), hardSlope: 0, softSlope: 0 };
+  const along = from - piece.lo;
+  return {
+    lo,
+    hi,
+    hard: piece.hard + piece.hardSlope * along,
+    soft: piece.soft + piece.softSlope * along,
+    hardSlope: 0,
+    softSlope: 0,
+  };
 }
 
 function clip(pieces: readonly Piece[], lo: number, hi: number): Piece[] {
-  return pieces.flatMap((piece) => {
+  const kept: Piece[] = [];
+  for (const piece of pieces) {
     const from = Math.max(lo, piece.lo);
     const to = Math.min(hi, piece.hi);
-    return from <= to ? [cut(piece, from, to)] : [];
-  });
+    if (from <= to) kept.push(cut(piece, from, to));
+  }
+  return kept;
 }
 
 /** The same costs, `by` higher. */
 export function raise(pieces: readonly Piece[], by: number): Piece[] {
-  return pieces.map((piece) => ({ ...piece, lo: piece.lo + by, hi: piece.hi + by }));
+  return pieces.map((piece) => moved(piece, piece.lo, piece.hi, by));
 }
 
 /** The heights at which neither part of the cost is over its bound. */
 export function prune(pieces: readonly Piece[], bound: Cost): Piece[] {
-  return pieces.flatMap((piece) => {
+  const kept: Piece[] = [];
+  for (const piece of pieces) {
     const hard = under(piece.lo, piece.hi, piece.hard, piece.hardSlope, bound.hard);
     const soft = under(piece.lo, piece.hi, piece.soft, piece.softSlope, bound.soft);
     const lo = Math.max(hard.lo, soft.lo);
     const hi = Math.min(hard.hi, soft.hi);
-    return lo <= hi ? [cut(piece, lo, hi)] : [];
-  });
+    if (lo <= hi) kept.push(cut(piece, lo, hi));
+  }
+  return kept;
 }
 
 /** Where a straight cost stays within its bound; `lo` is over `hi` where it never does. */

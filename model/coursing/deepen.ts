@@ -1,40 +1,47 @@
-/** The cheapest plan without a bound given: bounds are tried from tight to loose, so that most searches are small. */
+/** The cheapest plan without its cost known: bounds are tried from tight to loose, so that most searches are small. */
 import { HARD_MISS, type Cost } from './costPieces';
-import type { JointLimits } from './fitInterval';
 import type { Problem } from './problem';
-import { cheapestWithin, type CountAllowed, type Plan } from './search';
+import { cheapestWithin, type Plan, type SearchHelp } from './search';
 
-/** Soft cost that the first try may have, and how much more each next try may: a thousandth of an inch, and fourfold. */
+/** How much soft cost over the least known the first bound allows: a thousandth of an inch; then three times as much each time. */
 const FIRST_SOFT = 16;
-const MORE_SOFT = 4;
-/** Over any soft cost: 40 stops of weight 200 000 missed by 200 m tenfold stay under it. */
-const ANY_SOFT = 2 ** 53;
+
+/** Over any soft cost: 26 stops of weight 200 000 missed by 200 m tenfold stay under it. */
+export const ANY_SOFT = 2 ** 53;
+
+export interface CostRange {
+  /** Hard heights that may be missed, at most. */
+  readonly missed: number;
+  /** A soft cost known to be no more than the answer's, and the most that is asked for. */
+  readonly leastSoft: number;
+  readonly mostSoft: number;
+}
 
 /**
- * The cheapest plan, or null where no counts fit. First the hard heights alone: the fewest that are missed and by how
- * little. Then the soft ones within that, the bound on their cost loosened until a plan is found; the first one found is the
- * cheapest of all, because its cost is within the bound. `atLeast` is a soft cost known to be no more than the answer's.
+ * The cheapest plan within a range, or null where there is none. First the hard heights alone: the fewest that are
+ * missed, and by how little. Then the soft ones within that, the bound on their cost loosened until a plan is found; the
+ * first one found is the cheapest of all, because its cost is within the bound.
  */
-export function cheapestPlan(problem: Problem, joint: JointLimits, allowed?: CountAllowed, atLeast = 0): Plan | null {
-  const hard = leastHard(problem, joint, allowed);
+export function cheapestPlan(problem: Problem, range: CostRange, help?: SearchHelp): Plan | null {
+  const hard = leastHard(problem, range.missed, help);
   if (hard === null) return null;
-  for (let more = 0; ; more = more === 0 ? FIRST_SOFT : more * MORE_SOFT) {
-    const soft = Math.min(ANY_SOFT, atLeast + more);
-    const plan = cheapestWithin(problem, joint, { hard, soft }, allowed);
-    if (plan || soft === ANY_SOFT) return plan;
+  for (let more = 0; ; more = more === 0 ? FIRST_SOFT : more * 3) {
+    const soft = Math.min(range.mostSoft, range.leastSoft + more);
+    const plan = cheapestWithin(problem, problem.joint, { hard, soft }, help);
+    if (plan || soft === range.mostSoft) return plan;
   }
 }
 
 /** Least cost of the hard heights, the soft ones left out of account; null where no counts fit at all. */
-function leastHard(problem: Problem, joint: JointLimits, allowed?: CountAllowed): number | null {
-  const count = problem.stops.filter((stop) => stop.hold === 'hard').length;
+function leastHard(problem: Problem, most: number, help?: SearchHelp): number | null {
   const hardOnly: Problem = {
     ...problem,
     stops: problem.stops.map((stop) => (stop.hold === 'hard' ? stop : { ...stop, weight: 0 })),
   };
-  for (let missed = 0; missed <= count; missed++) {
-    const bound: Cost = { hard: missed * HARD_MISS + HARD_MISS / 2, soft: 0 };
-    const plan = cheapestWithin(hardOnly, joint, missed === 0 ? { hard: 0, soft: 0 } : bound, allowed);
+  const free: SearchHelp = help?.allowed ? { allowed: help.allowed } : {};
+  for (let missed = 0; missed <= most; missed++) {
+    const bound: Cost = { hard: missed === 0 ? 0 : (missed + 0.5) * HARD_MISS, soft: 0 };
+    const plan = cheapestWithin(hardOnly, problem.joint, bound, free);
     if (plan) return plan.cost.hard;
   }
   return null;

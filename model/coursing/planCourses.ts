@@ -11,8 +11,8 @@ import { gatherControls, missCode, MOST_COURSES } from './controls';
 import { HARD_MISS } from './costPieces';
 import { checkLifts } from './lifts';
 import type { Control, Problem } from './problem';
-import { rankPlans } from './rankPlans';
 import { rate, type RatedPlan } from './refine';
+import { rankOnce } from './rememberRanking';
 import type { Coursing, CoursingAnswer } from './types';
 
 /** The best answer and this many others. */
@@ -37,14 +37,14 @@ export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Cou
   let openTop = gathered.openTop;
   const tallest = Math.max(openTop ?? 0, problem.stops[problem.stops.length - 1]?.height ?? 0);
   const fits = (tallest - problem.start) / (problem.unit + problem.joint.least) <= MOST_COURSES;
-  let ranking = fits ? rankPlans(problem, 1 + MOST_OTHERS) : { plans: [], complete: true };
+  let ranking = fits ? rankOnce(problem, 1 + MOST_OTHERS) : { plans: [], complete: true };
   if (ranking.plans.length === 0) {
     reasons.push({ code: 'noCoursesFit', weight: 'blocked', thing: { kind: 'wallType', id: type.id } });
     left = [...left, ...problem.stops.flatMap((stop) => stop.controls)];
     problem = { ...problem, stops: [] };
     const reach = problem.start + MOST_COURSES * (problem.unit + problem.joint.nominal);
     openTop = ticks(Math.min(tallest, reach));
-    ranking = rankPlans(problem, 1);
+    ranking = rankOnce(problem, 1);
   }
   const [best, ...rest] = ranking.plans;
   const chosen = best ?? rate(problem, { cost: { hard: 0, soft: 0 }, heights: [], counts: [] });

@@ -1,9 +1,10 @@
 /** The best few plans that differ in the count of some interval, in strict order of cost. */
-import { compareCosts } from './costPieces';
+import { costAhead } from './ahead';
+import { compareCosts, HARD_MISS, type Cost } from './costPieces';
+import { ANY_SOFT, cheapestPlan, type CostRange } from './deepen';
+import { BEYOND_TOLERANCE, type Problem } from './problem';
 import { compareRated, refine, type RatedPlan } from './refine';
-import { cheapestPlan } from './deepen';
 import type { CountAllowed, Plan } from './search';
-import type { Problem } from './problem';
 
 /** Counts already settled from the bottom up, and counts that the next stop may not have. */
 interface Branch {
@@ -13,8 +14,8 @@ interface Branch {
   readonly rated: RatedPlan | null;
 }
 
-/** Exact searches that the alternatives may cost, the best answer apart. */
-const MOST_SEARCHES = 150;
+/** Parts of the alternatives that may be searched or refined; the best answer is outside this bound. */
+const MOST_BRANCHES = 120;
 
 export interface Ranking {
   readonly plans: readonly RatedPlan[];
@@ -23,38 +24,53 @@ export interface Ranking {
 }
 
 /**
- * The `most` best plans, each with different counts: the plans without the best one's counts are parted by the first
- * stop where they differ, and each part is searched in the same exact way (Lawler's partition).
+ * Soft cost that an alternative may have: the best plan's, and half a course more beyond tolerance for the
+ * lightest height. What costs more moves a height to another course, and is no answer to the same drawing. Where hard
+ * heights are missed there is no bound: the alternatives are other ways of giving them up.
+ */
+export function mostSoftOfOthers(problem: Problem, best: Plan): number {
+  if (best.cost.hard > 0) return ANY_SOFT;
+  const weights = problem.stops.flatMap((stop) => (stop.hold === 'soft' ? [stop.weight] : []));
+  const lightest = weights.length > 0 ? Math.min(...weights) : 0;
+  return best.cost.soft + (lightest * BEYOND_TOLERANCE * (problem.unit + problem.joint.nominal)) / 2;
+}
+
+/**
+ * The best plan, and the next best ones up to `most`, each with different counts, that miss no more hard heights and
+ * are within `mostSoftOfOthers`. The plans without the best one's counts are parted by the first stop
+ * where they differ, and each part is searched in the same exact way (Lawler's partition).
  */
 export function rankPlans(problem: Problem, most: number): Ranking {
-  let searches = 0;
-  const branch = (settled: readonly number[], barred: ReadonlySet<number>): Branch | null => {
-    searches++;
-    const plan = cheapestPlan(problem, problem.joint, allowedBy(settled, barred));
-    return plan && { settled, barred, plan, rated: null };
-  };
-  const first = branch([], new Set());
+  const hardStops = problem.stops.filter((stop) => stop.hold === 'hard').length;
+  const first = cheapestPlan(problem, { missed: hardStops, leastSoft: 0, mostSoft: ANY_SOFT });
+  if (!first) return { plans: [], complete: true };
+  const missed = Math.floor(first.cost.hard / HARD_MISS);
+  const range: CostRange = { missed, leastSoft: first.cost.soft, mostSoft: mostSoftOfOthers(problem, first) };
+  const ahead: readonly Cost[] | undefined = missed === 0 ? costAhead(problem, range.mostSoft) : undefined;
+  const help = (allowed: CountAllowed) => (ahead ? { allowed, ahead } : { allowed });
+
   const plans: RatedPlan[] = [];
-  const open: Branch[] = first ? [first] : [];
+  const open: Branch[] = [{ settled: [], barred: new Set(), plan: first, rated: null }];
+  let branches = 0;
   while (open.length > 0 && plans.length < most) {
-    if (searches > MOST_SEARCHES && plans.length > 0) return { plans, complete: false };
+    if (branches > MOST_BRANCHES && plans.length > 0) return { plans, complete: false };
     const at = cheapestIndex(open);
     const best = open[at] as Branch;
     if (!best.rated) {
-      const allowed: CountAllowed = (stop, count) => {
-        searches += stop === 0 ? 0.2 : 0;
-        return allowedBy(best.settled, best.barred)(stop, count);
-      };
-      open[at] = { ...best, rated: refine(problem, best.plan, allowed) };
+      branches++;
+      open[at] = { ...best, rated: refine(problem, best.plan, help(allowedBy(best.settled, best.barred))) };
       continue;
     }
     open.splice(at, 1);
     plans.push(best.rated);
+    if (plans.length === most) break;
     for (let i = best.settled.length; i < best.rated.counts.length; i++) {
+      branches++;
+      const settled = best.rated.counts.slice(0, i);
       const barred = new Set(i === best.settled.length ? best.barred : []);
       barred.add(best.rated.counts[i] as number);
-      const next = branch(best.rated.counts.slice(0, i), barred);
-      if (next) open.push(next);
+      const plan = cheapestPlan(problem, range, help(allowedBy(settled, barred)));
+      if (plan) open.push({ settled, barred, plan, rated: null });
     }
   }
   return { plans, complete: true };

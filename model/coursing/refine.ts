@@ -1,6 +1,6 @@
 /** Among the plans of least cost, the one whose joints stay nearest the nominal, and then spread least. */
 import { compareCosts } from './costPieces';
-import { cheapestWithin, jointsOf, type CountAllowed, type Plan } from './search';
+import { cheapestWithin, jointsOf, type Plan, type SearchHelp } from './search';
 import type { JointLimits } from './fitInterval';
 import type { Problem } from './problem';
 
@@ -41,10 +41,10 @@ export function compareRated(a: RatedPlan, b: RatedPlan): number {
  * the least there is. Then narrows them from each side in turn: with the step fixed, one joint lies at it, so the
  * least spread is found by raising the lower limit or by lowering the upper. Each trial is a whole exact search.
  */
-export function refine(problem: Problem, plan: Plan, allowed?: CountAllowed): RatedPlan {
+export function refine(problem: Problem, plan: Plan, help?: SearchHelp): RatedPlan {
   const { nominal, least, most } = problem.joint;
   const within = (limits: JointLimits): RatedPlan | null => {
-    const found = cheapestWithin(problem, limits, plan.cost, allowed);
+    const found = cheapestWithin(problem, limits, plan.cost, help);
     return found && rate(problem, found);
   };
   const around = (step: number): JointLimits => ({

@@ -34,8 +34,14 @@ export interface Plan {
 /** Which counts a stop's interval may have. */
 export type CountAllowed = (stop: number, count: number) => boolean;
 
+export interface SearchHelp {
+  readonly allowed?: CountAllowed;
+  /** For each stop, a cost that the stops above it are known to add at least. */
+  readonly ahead?: readonly Cost[];
+}
+
 interface Stage {
-  /** Costs before this stop's own charge is added: with a course in this lift, and with none yet. */
+  /** Least cost of having come to each height, this stop's charge included: with a course in this lift, and with none yet. */
   readonly begun: readonly Piece[];
   readonly bare: readonly Piece[];
 }
@@ -51,7 +57,7 @@ export function cheapestWithin(
   problem: Problem,
   joint: JointLimits,
   bound: Cost,
-  allowed: CountAllowed = ANY_COUNT,
+  { allowed = ANY_COUNT, ahead }: SearchHelp = {},
 ): Plan | null {
   const stages: Stage[] = [
     {
@@ -60,11 +66,15 @@ export function cheapestWithin(
     },
   ];
   for (let i = 0; i < problem.stops.length; i++) {
-    const next = advance(problem, joint, stages[i] as Stage, i, allowed, bound);
+    const next = advance(problem, joint, stages[i] as Stage, i, allowed, lessCost(bound, ahead?.[i]));
     if (next.begun.length === 0 && next.bare.length === 0) return null;
     stages.push(next);
   }
   return retrace(problem, joint, stages, allowed);
+}
+
+function lessCost(bound: Cost, ahead: Cost | undefined): Cost {
+  return ahead ? { hard: bound.hard - ahead.hard, soft: bound.soft - ahead.soft } : bound;
 }
 
 function advance(

@@ -140,5 +140,5 @@ describe('the first parts of the cost, against HiGHS', () => {
       if (softly > 0.1 || missed > 0) missedSomewhere++;
     }
     expect(missedSomewhere).toBeGreaterThan(30);
-  });
+  }, 120_000);
 });
