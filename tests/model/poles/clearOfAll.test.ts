@@ -8,7 +8,7 @@ import { describe, expect, it } from 'vitest';
 import type { Drawing } from '../../../model/drawing/schema';
 import type { PlanPoint } from '../../../model/geometry/point';
 import { inches } from '../../../model/length/ticks';
-import { reachLimits, type CandidateOptions } from '../../../model/poles/candidates';
+import { reachLimits, USUAL_CANDIDATES, type CandidateOptions } from '../../../model/poles/candidates';
 import { groundOf, obstacleOf, obstaclesOf } from '../../../model/poles/obstacles';
 import { poleBraces, type PoleSite } from '../../../model/poles/pairs';
 import { placePoles } from '../../../model/poles/placePoles';
@@ -99,6 +99,37 @@ describe('braces on random sites', () => {
       }),
       { numRuns: 30 },
     );
+  });
+
+  it('keep clear even where the search stops at its bound, which is then said', () => {
+    // Twelve short walls 30 in apart in three columns: hardly room for a brace.
+    let drawing = emptySite();
+    for (let i = 0; i < 12; i += 1) {
+      const [x, y] = [(i % 3) * 150, Math.floor(i / 3) * 30];
+      drawing = withWalls(
+        drawing,
+        [
+          [x, y],
+          [x + 100, y],
+        ],
+        false,
+        `w${i}`,
+      );
+    }
+    const set = placePoles(drawing, layOutWalls(drawing), {
+      candidates: USUAL_CANDIDATES,
+      bound: { most: 4000, inAll: 12_000 },
+    });
+    expect(set.exact).toBe(false);
+    expect(set.reasons.map((reason) => reason.code)).toContain('searchBoundReached');
+    const braces = set.poles.flatMap((pole) => pole.braces.map((brace) => ({ pole, path: line(pole.at, brace.foot) })));
+    expect(braces.length).toBeGreaterThan(12);
+    for (const a of braces)
+      for (const b of braces)
+        if (a.pole !== b.pole) expect(apart(a.path, b.path)).toBeGreaterThanOrEqual(KIT.clearance - 1);
+    const unbraced = set.poles.filter((pole) => pole.braces.length < 2).map((pole) => pole.id);
+    const said = set.reasons.filter((reason) => reason.code === 'braceBlocked').map((reason) => reason.thing.id);
+    expect(said.sort()).toEqual(unbraced.sort());
   });
 
   it('cost no more than the cheapest of every possible placing', () => {
