@@ -2,9 +2,14 @@
 import { boxOf } from '../geometry/box';
 import type { Vec } from '../geometry/point';
 
+/** One number for a cell. Cells too far out to be told apart only bring more to look at, never less. */
+function keyOf(x: number, y: number): number {
+  return x * 67_108_864 + y;
+}
+
 /** Things in plan by the square cells that they touch, so that what lies near a place is found without asking all. */
 export class CellIndex<T> {
-  private readonly cells = new Map<string, Set<T>>();
+  private readonly cells = new Map<number, Set<T>>();
 
   /** @param cell side of a cell in ticks, above zero */
   constructor(private readonly cell: number) {}
@@ -28,12 +33,12 @@ export class CellIndex<T> {
     return found;
   }
 
-  private *keysOf(points: readonly Vec[]): Generator<string> {
+  private *keysOf(points: readonly Vec[]): Generator<number> {
     const box = boxOf(points);
     if (!box) return;
     const lastX = Math.floor(box.maxX / this.cell);
     const lastY = Math.floor(box.maxY / this.cell);
     for (let x = Math.floor(box.minX / this.cell); x <= lastX; x += 1)
-      for (let y = Math.floor(box.minY / this.cell); y <= lastY; y += 1) yield `${x},${y}`;
+      for (let y = Math.floor(box.minY / this.cell); y <= lastY; y += 1) yield keyOf(x, y);
   }
 }

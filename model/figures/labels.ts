@@ -84,24 +84,27 @@ export function placeLabels(labels: readonly Label[], field: LabelField): (Place
     for (const piece of piecesOf(obstacle, cell * PIECE_CELLS)) drawn.add(piece.points, piece);
   const standing = new CellIndex<Standing>(cell);
 
-  function priceOf(part: readonly Vec[], factor: number): number {
+  /** What covering the drawing costs; once it is over `most` it is no matter by how much. */
+  function priceOf(part: readonly Vec[], factor: number, most: number): number {
     let price = 0;
     for (const obstacle of drawn.near(part)) {
       const depth = overlapDepth(part, obstacle.points);
       if (depth > 0) price += obstacle.weight * factor * (0.4 + 0.6 * Math.min(1, depth / field.height));
+      if (price > most) break;
     }
     return price;
   }
-  // What the drawing itself costs a place never changes: it is worked out once, when first asked.
-  const fixedPrices = new Map<Place, number>();
-  function fixedPriceOf(label: Label, place: Place): number {
+  // What the drawing itself costs a place never changes: it is worked out once, as far as it was asked for.
+  const fixedPrices = new Map<Place, { readonly price: number; readonly whole: boolean }>();
+  function fixedPriceOf(label: Label, place: Place, most: number): number {
     const known = fixedPrices.get(place);
-    if (known !== undefined) return known;
-    let price = place.cost + priceOf(place.quad, 1);
-    for (const line of place.lines) price += priceOf(line, LINE_PART);
+    if (known && (known.whole || known.price > most)) return known.price;
+    let price = place.cost;
     const box = field.within;
     if (box && holds(box, label.anchor)) for (const point of place.quad) if (!holds(box, point)) price += LEAVES;
-    fixedPrices.set(place, price);
+    price += priceOf(place.quad, 1, most - price);
+    for (const line of place.lines) if (price <= most) price += priceOf(line, LINE_PART, most - price);
+    fixedPrices.set(place, { price, whole: price <= most });
     return price;
   }
   function priceAmongLabels(place: Place): number {
@@ -119,7 +122,7 @@ export function placeLabels(labels: readonly Label[], field: LabelField): (Place
     let least = Math.min(label.most, LABEL_ON_LABEL);
     for (const place of label.places) {
       if (place.cost >= least) continue;
-      const fixed = fixedPriceOf(label, place);
+      const fixed = fixedPriceOf(label, place, least);
       if (fixed >= least) continue;
       const price = fixed + priceAmongLabels(place);
       if (price < least) {

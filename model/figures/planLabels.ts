@@ -1,19 +1,16 @@
-/** The labels of the plan and every place where each could stand: corner letters, cautions, notes, dimensions. */
+/** The labels of the plan and every place where each could stand: corner letters, cautions, notes. */
 import type { PlanPoint, Vec } from '../geometry/point';
 import { toPoint } from '../geometry/vec';
 import type { ThingRef } from '../things';
-import type { RunGeometry } from '../walls/types';
-import type { DimensionShape, FigureText, Role, Shape, TextSize } from './figure';
+import type { FigureText, Role, Shape, TextSize } from './figure';
 import type { Label, Place } from './labels';
-import { onRun } from './onRun';
 import type { PlanContext } from './planContext';
 import { placeOfThing } from './placeOfThing';
-import { readableTurn, textBox, turnedQuad, type TextBox } from './text';
+import { lengthLabels, runningLabels } from './planDimensions';
+import { grown, textBox, turnedQuad, type TextBox } from './text';
 
 const DIRECTIONS = 16;
 const DISTANCES = [0.35, 0.8, 1.5, 2.4, 3.6];
-
-const grown = (box: TextBox, by: number): TextBox => ({ width: box.width + 2 * by, height: box.height + 2 * by });
 
 /** Places all round an anchor, nearer first; `liked` is a direction it would rather stand in. */
 function placesAround(
@@ -164,64 +161,12 @@ function textLabel(
   };
 }
 
-/** Distances of a dimension line off the face, as parts of its text's height. */
-const OFFSETS = [1.7, 2.6, 3.7, 5, 6.6, 8.5, 11, 14];
-const ALONG = [0.5, 0.36, 0.64, 0.22, 0.78];
-
-/** A run's length along its outside face, at any distance outside it; inside only where there is no room outside. */
-function dimensionLabel(context: PlanContext, run: RunGeometry): Label | null {
-  const { scale } = context.options;
-  const height = scale.textHeight.dimension;
-  const box = textBox({ kind: 'measure', length: run.length }, 'dimension', false, scale, context.tape);
-  if (run.length < box.width + 1.6 * height) return null;
-  const turn = readableTurn(run.direction);
-  const covered = grown(box, scale.clear);
-  const places = [
-    ...OFFSETS.map((offset) => -offset * height),
-    ...OFFSETS.slice(0, 3).map((o) => run.thickness + o * height),
-  ].flatMap((depth) =>
-    ALONG.flatMap((part) => {
-      const middle = run.length * part;
-      const half = covered.width / 2;
-      if (middle - half < 0.5 * height || middle + half > run.length - 0.5 * height) return [];
-      const textAt = onRun(run, middle, depth);
-      const from = onRun(run, 0, depth);
-      const to = onRun(run, run.length, depth);
-      const shape: DimensionShape = {
-        kind: 'dimension',
-        role: 'dimension',
-        thing: { kind: 'run', id: run.runId },
-        emphasis: context.emphasisOf('run', run.runId),
-        from,
-        to,
-        length: run.length,
-        textAt,
-        turn,
-      };
-      const lines = [
-        [from, onRun(run, middle - half, depth)],
-        [onRun(run, middle + half, depth), to],
-      ] as const;
-      const cost =
-        (Math.abs(depth < 0 ? depth : depth - run.thickness) / height) * 0.22 +
-        Math.abs(part - 0.5) * 3 +
-        (depth < 0 ? 0 : 3);
-      return [{ quad: turnedQuad(textAt, covered, turn), lines, cost, shapes: [shape] }];
-    }),
-  );
-  const selected = context.emphasisOf('run', run.runId) === 'selected';
-  return { priority: selected ? 2.5 : 4, anchor: onRun(run, run.length / 2, 0), places, most: selected ? 40 : 9 };
-}
-
 /** Every label of the plan with its places, in a fixed order. */
 export function labelsOfPlan(context: PlanContext): Label[] {
   const labels = [...letterLabels(context)];
   if (context.options.cautions !== false) labels.push(...cautionLabels(context));
   labels.push(...noteLabels(context));
-  if (context.options.dimensions)
-    for (const run of context.setOut.walls.runs) {
-      const label = dimensionLabel(context, run);
-      if (label) labels.push(label);
-    }
+  if (context.options.running) labels.push(...runningLabels(context));
+  if (context.options.dimensions) labels.push(...lengthLabels(context));
   return labels;
 }

@@ -44,6 +44,11 @@ export function textBox(text: FigureText, size: TextSize, framed: boolean, scale
   };
 }
 
+/** A box with so much room around it on every side. */
+export function grown(box: TextBox, by: number): TextBox {
+  return { width: box.width + 2 * by, height: box.height + 2 * by };
+}
+
 /** The corners of a box of that size around `middle`, turned counter-clockwise by `turn` degrees. */
 export function turnedQuad(middle: Vec, box: TextBox, turn: number): Vec[] {
   const angle = (turn * Math.PI) / 180;
