@@ -2,8 +2,7 @@
 import type { PoleKit } from '../drawing/schema';
 import { boxOfSegment, inflate } from '../geometry/box';
 import type { PlanPoint } from '../geometry/point';
-import { distanceToPolygon, edges, whereIs } from '../geometry/polygon';
-import { distanceSegmentToPolygon } from '../geometry/polygon';
+import { distanceSegmentToPolygon, distanceToPolygon, edges, whereIs } from '../geometry/polygon';
 import { distanceBetweenSegments } from '../geometry/segment';
 import { distance } from '../geometry/vec';
 import type { ThingRef } from '../things';
