@@ -5,7 +5,7 @@
 import type { EndPlace } from '../../model/drawing/edits/addRun';
 import type { PlanPoint, Vec } from '../../model/geometry/point';
 import { distance, samePoint, sub, unit } from '../../model/geometry/vec';
-import { roundTicks, type Ticks } from '../../model/length/ticks';
+import { roundTicks, ticks, type Ticks } from '../../model/length/ticks';
 import { DOUBLE_TAP_TIME, isDrag, type PointerKind, type StrokeEvent } from '../input/events';
 import { EMPTY_PREVIEW } from '../store/preview';
 import { cornerById, directionsAt, drawRun } from './edits';
@@ -29,6 +29,9 @@ type State =
       readonly pressed: StrokeEvent | null;
       readonly lastUp: StrokeEvent | null;
     };
+
+/** How far the next corner is taken to be while only its angle was said: about ten feet. */
+const UNSAID = 1_950_000;
 
 export function createRunTool(host: ToolHost): RunTool {
   const { draft } = host;
@@ -81,6 +84,12 @@ export function createRunTool(host: ToolHost): RunTool {
         heldAngle,
       },
     });
+  }
+
+  /** Between two corners: nothing is pointed at, but the next length can be typed. */
+  function showWaiting(chain: Chain): void {
+    const run = { from: chain.at, to: chain.at, length: ticks(0), angle: null, heldLength, heldAngle };
+    draft.setPreview({ ...EMPTY_PREVIEW, pointer: lastPointer, run });
   }
 
   function showStart(caught: Caught, pointer: PointerKind): void {
@@ -138,7 +147,7 @@ export function createRunTool(host: ToolHost): RunTool {
       lastUp: null,
     };
     draft.select({ kind: 'corner', id: at.id });
-    draft.setPreview(null);
+    showWaiting(state.chain);
   }
 
   function isDoubleTap(event: StrokeEvent): boolean {
@@ -151,6 +160,7 @@ export function createRunTool(host: ToolHost): RunTool {
     if (state.name === 'pointing') {
       state = { name: 'drawing', chain: state.chain, pressed: null, lastUp: event };
       draft.select(null);
+      showWaiting(state.chain);
       return;
     }
     if (state.name !== 'drawing' || !state.pressed) return;
@@ -187,7 +197,7 @@ export function createRunTool(host: ToolHost): RunTool {
       else if (state.name === 'drawing' && (state.chain.corners.length > 0 || state.lastUp)) {
         // The stroke is taken back, the chain is not: its last corner still waits for the next.
         state = { ...state, pressed: null };
-        draft.setPreview(null);
+        showWaiting(state.chain);
       } else end();
       return 'keep';
     },
@@ -202,6 +212,10 @@ export function createRunTool(host: ToolHost): RunTool {
       if (state.name === 'idle' || (state.name === 'drawing' && state.chain.corners.length > 1)) return false;
       end();
       return true;
+    },
+    refresh() {
+      keepUp();
+      if (state.name === 'drawing' && draft.get().preview === null) showWaiting(state.chain);
     },
     stateName: () => {
       keepUp();
@@ -229,7 +243,9 @@ export function createRunTool(host: ToolHost): RunTool {
   function showHeld(): void {
     if (state.name !== 'drawing') return;
     const { chain } = state;
-    const shown = draft.get().preview?.run?.to ?? firstAim(chain.at, beforeOf(chain), heldLength ?? 1000);
+    const pointed = draft.get().preview?.run?.to;
+    const shown =
+      pointed && !samePoint(pointed, chain.at) ? pointed : firstAim(chain.at, beforeOf(chain), heldLength ?? UNSAID);
     show(chain, { at: shown, cornerId: null, onRun: null, guides: [], word: null });
   }
 }

@@ -76,6 +76,8 @@ export interface Tool {
   finish(): boolean;
   /** Takes back the last point of what is being drawn; false when there is none, so that the drawing's own undo runs. */
   stepBack(): boolean;
+  /** The drawing changed under the tool: by undo, or by another's version. */
+  refresh?(): void;
   /** Name of the chart's state, for tests and for what the screen says. */
   stateName(): string;
 }

@@ -46,7 +46,7 @@ export function createToolDesk(host: ToolHost): ToolDesk {
     if (state.tool !== before.tool || state.mode !== before.mode) {
       const laidDown = before.mode === 'edit' ? tools[before.tool] : tools.select;
       if (laidDown.stateName() !== 'idle') laidDown.leave();
-    }
+    } else if (state.drawing !== before.drawing && state.gesture === null) inHand().refresh?.();
   });
 
   return {

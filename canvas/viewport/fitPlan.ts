@@ -17,7 +17,7 @@ export interface FitPlan {
 /** What is seen of nothing: thirty feet, where the first corner may go. */
 const EMPTY_HALF = 2_900_000;
 
-/** The walls, their poles and braces, and areas: all that has a size on the ground. */
+/** The walls with their poles and braces: what must be seen. Areas may lie far off. */
 export function groundBox(drawing: Drawing, setOut: SetOut): Box | null {
   let left = Infinity;
   let bottom = Infinity;
@@ -31,7 +31,7 @@ export function groundBox(drawing: Drawing, setOut: SetOut): Box | null {
   };
   drawing.corners.forEach(take);
   setOut.poles.poles.forEach((pole) => pole.braces.forEach((brace) => take(brace.foot)));
-  drawing.keepClears.forEach((area) => area.points.forEach(take));
+  if (drawing.corners.length === 0) drawing.keepClears.forEach((area) => area.points.forEach(take));
   return left > right ? null : { left: ticks(left), bottom: ticks(bottom), right: ticks(right), top: ticks(top) };
 }
 

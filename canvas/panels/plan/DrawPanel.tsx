@@ -1,9 +1,9 @@
 import { useState } from 'react';
 import { View } from 'react-native';
 import type { ActionContext } from '../../actions/action';
-import { finish } from '../../actions/historyActions';
+import { finish, redo, undo } from '../../actions/historyActions';
 import { duplicate, flipHinge, openOtherWay, remove, turnRun } from '../../actions/thingActions';
-import { penDraws, snapping } from '../../actions/viewActions';
+import { fit, penDraws, snapping } from '../../actions/viewActions';
 import { Button } from '../../ui/Button';
 import { IconButton } from '../../ui/IconButton';
 import { Measurement } from '../../ui/Measurement';
@@ -16,7 +16,7 @@ import { useTapeTyping } from '../keypad/useTapeTyping';
 import { useDraft } from '../workspace/workspace';
 import { ActionButton } from './ActionButton';
 import { AngleDialog } from './AngleDialog';
-import { Ledger, type LedgerProps } from './Ledger';
+import { EDIT_HEIGHT, Ledger, type LedgerProps } from './Ledger';
 import { ToolRow } from './ToolRow';
 import type { RunEntry } from './useRunEntry';
 
@@ -46,7 +46,7 @@ export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
       ) : tool === 'select' ? (
         <Ledger {...ledger} />
       ) : (
-        <Txt tone="soft" size="large" style={{ padding: space.l }}>
+        <Txt tone="soft" size="large" style={{ padding: space.l, height: EDIT_HEIGHT }}>
           {t(`plan.toolTells.${tool}`)}
         </Txt>
       )}
@@ -86,6 +86,9 @@ function CommandRow({ context }: { context: ActionContext }) {
         paddingBottom: space.xs,
       }}
     >
+      <ActionButton action={undo} context={context} />
+      <ActionButton action={redo} context={context} />
+      <ActionButton action={fit} context={context} />
       <ActionButton action={snapping} context={context} />
       {penSeen ? <ActionButton action={penDraws} context={context} /> : null}
       <View style={{ flex: 1 }} />
@@ -119,14 +122,16 @@ function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
       style={{
         flexDirection: 'row',
         alignItems: 'flex-end',
-        flexWrap: 'wrap',
         gap: space.s,
-        padding: space.l,
-        paddingBottom: space.s,
+        height: EDIT_HEIGHT,
+        paddingHorizontal: space.l,
+        paddingBottom: space.l,
       }}
     >
-      <View style={{ flexGrow: 1, flexShrink: 1, minWidth: 130 }}>
-        <Txt tone="soft">{t('plan.length')}</Txt>
+      <View style={{ flex: 1, minWidth: 0 }}>
+        <Txt tone="soft" numberOfLines={1}>
+          {run.length === 0 ? t('plan.toolTells.runNext') : t('plan.length')}
+        </Txt>
         {unread ? (
           <Txt numeric size="ledger" weight="semibold" numberOfLines={1}>
             {entry.text}
@@ -151,12 +156,10 @@ function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
           onPress={() => onKeypad(!keypad)}
         />
       ) : null}
-      {run.heldLength !== null && !keypad ? <Button label={t('plan.entry.set')} onPress={entry.place} /> : null}
-      <Button
-        label={t('plan.actions.finish')}
-        onPress={() => finish.run(context)}
-        style={{ paddingHorizontal: space.m }}
-      />
+      {run.heldLength !== null && !keypad ? (
+        <Button label={t('plan.entry.set')} onPress={entry.place} style={{ paddingHorizontal: space.m }} />
+      ) : null}
+      <IconButton icon="check" kind="outline" label={t('plan.actions.finish')} onPress={() => finish.run(context)} />
       <AngleDialog open={angles} onClose={() => setAngles(false)} onChoose={entry.holdAngle} />
     </View>
   );

@@ -1,13 +1,18 @@
-import { View } from 'react-native';
+import { ScrollView } from 'react-native';
 import type { ThingRef } from '../../../model/things';
 import { space } from '../../ui/tokens';
 import { useTheme } from '../../ui/theme';
+import { useLayout } from '../../ui/useLayout';
 import { useDraft } from '../workspace/workspace';
 import { OpeningLedger } from './OpeningLedger';
 import { PoleLedger } from './PoleLedger';
 import { RunLedger } from './RunLedger';
 import { KeepClearLedger, SiteLedger } from './SiteLedger';
 import { ThingReasons } from './ThingReasons';
+
+const PHONE_HEIGHT = 196;
+const SIDE_HEIGHT = 150;
+export const EDIT_HEIGHT = 128;
 
 export interface LedgerProps {
   readonly onDetails: () => void;
@@ -18,21 +23,25 @@ export interface LedgerProps {
 /** The one thing that is selected, its one number that matters, and what the solver has to say of it. */
 export function Ledger(props: LedgerProps) {
   const { colours, strokes } = useTheme();
+  const phone = useLayout().name === 'phone';
   const selection = useDraft((state) => state.selection);
+  const editing = useDraft((state) => state.mode === 'edit');
+  // Of one height whatever is selected: the drawing must not jump under the finger.
+  const height = editing ? EDIT_HEIGHT : phone ? PHONE_HEIGHT : SIDE_HEIGHT;
   return (
-    <View
-      role="region"
+    <ScrollView
       style={{
-        padding: space.l,
-        gap: space.s,
+        height,
+        flexGrow: 0,
         backgroundColor: colours.surface,
-        borderTopWidth: strokes.hair,
+        borderTopWidth: editing ? 0 : strokes.hair,
         borderColor: colours.rule,
       }}
+      contentContainerStyle={{ paddingHorizontal: space.l, paddingVertical: space.m, gap: space.s }}
     >
       <Inside selection={selection} {...props} />
       {selection ? <ThingReasons thing={selection} /> : null}
-    </View>
+    </ScrollView>
   );
 }
 

@@ -3,7 +3,6 @@ import { View } from 'react-native';
 import { may } from '../../../model/contracts/common';
 import { setRunLength } from '../../../model/drawing/edits/runLength';
 import type { ThingRef } from '../../../model/things';
-import { undo, redo } from '../../actions/historyActions';
 import { fit } from '../../actions/viewActions';
 import { useOnline } from '../../client/online';
 import { Button } from '../../ui/Button';
@@ -35,7 +34,8 @@ import { useRunEntry } from './useRunEntry';
 export function PlanScreen(_props: { siteId?: string }) {
   const t = useWords();
   const { colours } = useTheme();
-  const phone = useLayout().name === 'phone';
+  const layout = useLayout().name;
+  const phone = layout === 'phone';
   const coarse = useCoarsePointer();
   const workspace = useWorkspace();
   const actions = useDraftActions();
@@ -64,7 +64,9 @@ export function PlanScreen(_props: { siteId?: string }) {
   useWithoutNav(editing);
   useEffect(() => () => workspace.draft.setMode('view'), [workspace.draft]);
 
-  const open = (what: 'details' | 'reasons' | 'building') => (phone ? setSheet(what) : setTab(what));
+  const open = (what: 'details' | 'reasons' | 'building') =>
+    // The column beside a tablet's plan has no room for the building's many numbers.
+    phone || (layout === 'tablet' && what === 'building') ? setSheet(what) : setTab(what);
   const ledger = {
     onDetails: () => open('details'),
     onReasons: () => open('reasons'),
@@ -77,12 +79,7 @@ export function PlanScreen(_props: { siteId?: string }) {
         editing={editing}
         actions={
           editing ? (
-            <>
-              <ActionButton action={fit} context={hand.context} />
-              <ActionButton action={undo} context={hand.context} />
-              <ActionButton action={redo} context={hand.context} />
-              <Button label={t('plan.done')} kind="filled" onPress={() => actions.setMode('view')} />
-            </>
+            <Button label={t('plan.done')} kind="filled" onPress={() => actions.setMode('view')} />
           ) : (
             <>
               <ActionButton action={fit} context={hand.context} />

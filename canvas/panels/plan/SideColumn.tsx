@@ -6,7 +6,6 @@ import { useLayout } from '../../ui/useLayout';
 import { useWords } from '../../ui/words';
 import { BuildingFields } from '../inspector/BuildingFields';
 import { Inspector } from '../inspector/Inspector';
-import { useDraft } from '../workspace/workspace';
 import { ReasonsPanel } from './ReasonsPanel';
 import { PoleBeside, WallBeside } from './SideViews';
 
@@ -22,13 +21,12 @@ export function SideColumn({ tab, onTab }: SideColumnProps) {
   const t = useWords();
   const { colours, strokes } = useTheme();
   const wide = useLayout().name === 'wide';
-  const editing = useDraft((state) => state.mode === 'edit');
   const shown = wide && tab === 'wall' ? 'pole' : tab;
   const options = [
     ...(wide ? [] : [{ value: 'wall' as const, label: t('plan.elevation') }]),
     { value: 'pole' as const, label: t('plan.poleTab') },
-    { value: 'details' as const, label: editing ? t('plan.details') : t('plan.sizes') },
-    { value: 'building' as const, label: t('plan.building') },
+    { value: 'details' as const, label: t('plan.sizes') },
+    ...(wide ? [{ value: 'building' as const, label: t('plan.building') }] : []),
     { value: 'reasons' as const, label: t('plan.fits') },
   ];
   return (

@@ -19,16 +19,24 @@ export interface PlanCamera {
   readonly zoomBy: (factor: number) => void;
 }
 
-/** Fits the whole plan into a view. */
+/** Fits the building with its poles and dimensions into a view; the boundary and areas give way. */
 export function fitSolved({ drawing, setOut }: Solved, size: ViewSize): Camera {
+  const building = { ...drawing, boundary: null, keepClears: [] };
   return fitPlan({
     drawing,
     setOut,
     size,
     padding: PADDING,
     labelScale,
-    figureAt: (scale) => planFigure(drawing, setOut, { selection: null, scale, dimensions: true }),
+    figureAt: (scale) => planFigure(building, setOut, { selection: null, scale, dimensions: true }),
   });
+}
+
+/** What is drawn stays where it is on the screen when the view grows or shrinks at its right or bottom. */
+function heldTopLeft(camera: Camera, before: ViewSize, now: ViewSize): Camera {
+  const dx = (now.width - before.width) / 2 / camera.scale;
+  const dy = (now.height - before.height) / 2 / camera.scale;
+  return { ...camera, x: camera.x + dx, y: camera.y - dy };
 }
 
 /** The camera over the plan: fitted when the view first has a size, and kept on what it shows as the view changes. */
@@ -44,7 +52,8 @@ export function usePlanCamera(): PlanCamera {
         if (size.width <= 0 || size.height <= 0) return before;
         const { solved } = solver.get();
         if (solved && (before.camera === null || fitted.current)) return { camera: fitSolved(solved, size), size };
-        return { ...before, size };
+        if (!before.camera) return { ...before, size };
+        return { camera: heldTopLeft(before.camera, before.size, size), size };
       });
     },
     [solver],

@@ -117,7 +117,7 @@ describe('drawing wall runs', () => {
     h.draft.setSnapping(false);
     h.tap(0, 0).tap(10, 0).down(10, 6).move(10, 7).down(20, 7, 2).move(22, 7, 2).up(22, 7, 2).up(10, 7);
     expect(h.runs()).toEqual(['A–B']);
-    expect(h.draft.get().preview).toBe(null);
+    expect(h.draft.get().preview?.run?.length).toBe(0);
     expect(h.camera().scale).not.toBe(hand(nothing).camera().scale);
     expect(h.tools.isBusy()).toBe(true);
   });
@@ -127,6 +127,7 @@ describe('drawing wall runs', () => {
     h.draft.setSnapping(false);
     h.tap(0, 0).tap(10, 0).tap(10, 8);
     h.draft.undo();
+    expect(h.draft.get().preview?.run?.from).toEqual({ x: feet(10), y: feet(0) });
     h.tap(16, 0);
     expect(h.corners().map((corner) => corner.slice(2))).toEqual(['0,0', '10,0', '16,0']);
     expect(h.runs()).toHaveLength(2);
