@@ -2,13 +2,14 @@
 import { lowestOf, prune, slideUp, sumOf, type Cost, type Piece } from './costPieces';
 import { countsWithin, heightLimits } from './fitInterval';
 import { chargeOf, windowOf, type Problem, type Stop } from './problem';
+import type { Work } from './search';
 
 /**
  * For each stop, least soft cost of all the stops above it under the problem's own joint limits. The search is the forward
  * one walked from the top down, on heights turned over; that a lift needs a course is left out, which only makes the bound
- * lower. Only meant where no hard height is missed; `most` is the cost of a plan that is known.
+ * lower. Only meant where no hard height is missed; `most` is the most that is asked for. Null where the work ran out.
  */
-export function costAhead(problem: Problem, most: number): Cost[] {
+export function costAhead(problem: Problem, most: number, work: Work): Cost[] | null {
   const bound: Cost = { hard: 0, soft: most };
   const ahead: Cost[] = [];
   let above: readonly Piece[] = [];
@@ -16,7 +17,8 @@ export function costAhead(problem: Problem, most: number): Cost[] {
     const stop = problem.stops[i] as Stop;
     const { lo, hi } = windowOf(problem, i);
     const free = { lo: -hi, hi: -lo, hard: 0, soft: 0, hardSlope: 0, softSlope: 0 };
-    const from = i === problem.stops.length - 1 ? [free] : comeDown(problem, stop, above, -hi, -lo);
+    const from = i === problem.stops.length - 1 ? [free] : comeDown(problem, stop, above, -hi, -lo, work);
+    if (work.left < 0) return null;
     ahead[i] = { hard: 0, soft: Math.min(most, leastSoft(from)) };
     const turned = { ...stop, height: -stop.height as Stop['height'] };
     above = prune(sumOf(from, chargeOf(turned, -hi, -lo)), bound);
@@ -24,7 +26,14 @@ export function costAhead(problem: Problem, most: number): Cost[] {
   return ahead;
 }
 
-function comeDown(problem: Problem, stop: Stop, above: readonly Piece[], lo: number, hi: number): readonly Piece[] {
+function comeDown(
+  problem: Problem,
+  stop: Stop,
+  above: readonly Piece[],
+  lo: number,
+  hi: number,
+  work: Work,
+): readonly Piece[] {
   const first = above[0];
   const last = above[above.length - 1];
   if (!first || !last) return [];
@@ -34,6 +43,8 @@ function comeDown(problem: Problem, stop: Stop, above: readonly Piece[], lo: num
   for (let count = counts.from; count <= counts.to; count++) {
     const limits = heightLimits(count, unit, joint);
     if (limits.least > limits.most) continue;
+    work.left -= above.length;
+    if (work.left < 0) return [];
     arrivals.push(slideUp(above, limits.least + stop.beamDepth, limits.most + stop.beamDepth, lo, hi));
   }
   return lowestOf(arrivals);

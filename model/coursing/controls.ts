@@ -10,7 +10,7 @@ import type { Control, Stop } from './problem';
 export const MOST_COURSES = 1000;
 
 /** Soft heights that the search holds at once, the heaviest first; the others take the course line nearest to them. */
-const MOST_SOFT_STOPS = 16;
+const MOST_SOFT_STOPS = 24;
 
 export interface Gathered {
   readonly stops: readonly Stop[];

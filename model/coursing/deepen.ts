@@ -18,30 +18,30 @@ export interface CostRange {
 }
 
 /**
- * The cheapest plan within a range, or null where there is none. First the hard heights alone: the fewest that are
+ * The cheapest plan within a range, or null where there is none or the work ran out. First the hard heights alone: the fewest that are
  * missed, and by how little. Then the soft ones within that, the bound on their cost loosened until a plan is found; the
  * first one found is the cheapest of all, because its cost is within the bound.
  */
-export function cheapestPlan(problem: Problem, range: CostRange, help?: SearchHelp): Plan | null {
+export function cheapestPlan(problem: Problem, range: CostRange, help: SearchHelp): Plan | null {
   const hard = leastHard(problem, range.missed, help);
   if (hard === null) return null;
   for (let more = 0; ; more = more === 0 ? FIRST_SOFT : more * 3) {
     const soft = Math.min(range.mostSoft, range.leastSoft + more);
     const plan = cheapestWithin(problem, problem.joint, { hard, soft }, help);
-    if (plan || soft === range.mostSoft) return plan;
+    if (plan || soft === range.mostSoft || help.work.left < 0) return plan;
   }
 }
 
 /** Least cost of the hard heights, the soft ones left out of account; null where no counts fit at all. */
-function leastHard(problem: Problem, most: number, help?: SearchHelp): number | null {
+function leastHard(problem: Problem, most: number, help: SearchHelp): number | null {
   const hardOnly: Problem = {
     ...problem,
     stops: problem.stops.map((stop) => (stop.hold === 'hard' ? stop : { ...stop, weight: 0 })),
   };
-  const free: SearchHelp = help?.allowed ? { allowed: help.allowed } : {};
+  const { work, allowed } = help;
   for (let missed = 0; missed <= most; missed++) {
     const bound: Cost = { hard: missed === 0 ? 0 : (missed + 0.5) * HARD_MISS, soft: 0 };
-    const plan = cheapestWithin(hardOnly, problem.joint, bound, free);
+    const plan = cheapestWithin(hardOnly, problem.joint, bound, allowed ? { work, allowed } : { work });
     if (plan) return plan.cost.hard;
   }
   return null;

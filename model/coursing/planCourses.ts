@@ -7,12 +7,12 @@ import type { Ground } from '../survey/types';
 import type { Walls } from '../walls/types';
 import { coursesOf, liftsOf, linesOf } from './buildAnswer';
 import { controlResults } from './controlResults';
-import { gatherControls, missCode, MOST_COURSES } from './controls';
+import { gatherControls, missCode } from './controls';
 import { HARD_MISS } from './costPieces';
 import { checkLifts } from './lifts';
 import type { Control, Problem } from './problem';
 import { rate, type RatedPlan } from './refine';
-import { rankOnce } from './rememberRanking';
+import { settle } from './settle';
 import type { Coursing, CoursingAnswer } from './types';
 
 /** The best answer and this many others. */
@@ -26,26 +26,8 @@ const MOST_OTHERS = 5;
 export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Coursing {
   const type = coursedType(drawing);
   const gathered = gatherControls(drawing, walls, ground);
-  const reasons: Reason[] = [...gathered.reasons];
-  let problem: Problem = {
-    unit: type.unit.height,
-    joint: type.bedJoint,
-    start: ground.firstCourseTop,
-    stops: gathered.stops,
-  };
-  let left: readonly Control[] = gathered.left;
-  let openTop = gathered.openTop;
-  const tallest = Math.max(openTop ?? 0, problem.stops[problem.stops.length - 1]?.height ?? 0);
-  const fits = (tallest - problem.start) / (problem.unit + problem.joint.least) <= MOST_COURSES;
-  let ranking = fits ? rankOnce(problem, 1 + MOST_OTHERS) : { plans: [], complete: true };
-  if (ranking.plans.length === 0) {
-    reasons.push({ code: 'noCoursesFit', weight: 'blocked', thing: { kind: 'wallType', id: type.id } });
-    left = [...left, ...problem.stops.flatMap((stop) => stop.controls)];
-    problem = { ...problem, stops: [] };
-    const reach = problem.start + MOST_COURSES * (problem.unit + problem.joint.nominal);
-    openTop = ticks(Math.min(tallest, reach));
-    ranking = rankOnce(problem, 1);
-  }
+  const settled = settle(type, ground.firstCourseTop, gathered, 1 + MOST_OTHERS);
+  const { problem, ranking, left, openTop } = settled;
   const [best, ...rest] = ranking.plans;
   const chosen = best ?? rate(problem, { cost: { hard: 0, soft: 0 }, heights: [], counts: [] });
   const built = build(problem, chosen, left, openTop, ground.leastBedding);
@@ -59,7 +41,7 @@ export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Cou
     answer: built.answer,
     others: otherAnswers(problem, built, rest, left, openTop, ground.leastBedding),
     top: lastLift?.beam?.top ?? lastLift?.top ?? ground.firstCourseTop,
-    reasons: [...reasons, ...missed, ...tall],
+    reasons: [...gathered.reasons, ...settled.reasons, ...missed, ...tall],
   };
 }
 

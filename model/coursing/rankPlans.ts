@@ -1,10 +1,10 @@
 /** The best few plans that differ in the count of some interval, in strict order of cost. */
 import { costAhead } from './ahead';
-import { compareCosts, HARD_MISS, type Cost } from './costPieces';
+import { compareCosts, HARD_MISS } from './costPieces';
 import { ANY_SOFT, cheapestPlan, type CostRange } from './deepen';
 import { BEYOND_TOLERANCE, type Problem } from './problem';
 import { compareRated, refine, type RatedPlan } from './refine';
-import type { CountAllowed, Plan } from './search';
+import type { CountAllowed, Plan, SearchHelp, Work } from './search';
 
 /** Counts already settled from the bottom up, and counts that the next stop may not have. */
 interface Branch {
@@ -14,12 +14,12 @@ interface Branch {
   readonly rated: RatedPlan | null;
 }
 
-/** Parts of the alternatives that may be searched or refined; the best answer is outside this bound. */
-const MOST_BRANCHES = 120;
+/** Pieces of cost made in looking for the best plan, in refining it, and in looking for the others. */
+const WORK = { best: 2_000_000, refined: 1_000_000, others: 1_000_000 };
 
 export interface Ranking {
   readonly plans: readonly RatedPlan[];
-  /** False where the bound on the work was reached before `most` plans were found; the first is always the best. */
+  /** False where the bound on the work was reached: there may be more plans, and with none at all there may be a best one. */
   readonly complete: boolean;
 }
 
@@ -42,34 +42,36 @@ export function mostSoftOfOthers(problem: Problem, best: Plan): number {
  */
 export function rankPlans(problem: Problem, most: number): Ranking {
   const hardStops = problem.stops.filter((stop) => stop.hold === 'hard').length;
-  const first = cheapestPlan(problem, { missed: hardStops, leastSoft: 0, mostSoft: ANY_SOFT });
-  if (!first) return { plans: [], complete: true };
+  const best: Work = { left: WORK.best };
+  const first = cheapestPlan(problem, { missed: hardStops, leastSoft: 0, mostSoft: ANY_SOFT }, { work: best });
+  if (!first) return { plans: [], complete: best.left >= 0 };
   const missed = Math.floor(first.cost.hard / HARD_MISS);
   const range: CostRange = { missed, leastSoft: first.cost.soft, mostSoft: mostSoftOfOthers(problem, first) };
-  const ahead: readonly Cost[] | undefined = missed === 0 ? costAhead(problem, range.mostSoft) : undefined;
-  const help = (allowed: CountAllowed) => (ahead ? { allowed, ahead } : { allowed });
+  const refining: Work = { left: WORK.refined };
+  const ahead = missed === 0 ? costAhead(problem, range.mostSoft, refining) : null;
+  const help = (work: Work, allowed: CountAllowed): SearchHelp =>
+    ahead ? { work, allowed, ahead } : { work, allowed };
 
   const plans: RatedPlan[] = [];
   const open: Branch[] = [{ settled: [], barred: new Set(), plan: first, rated: null }];
-  let branches = 0;
+  const others: Work = { left: WORK.others };
   while (open.length > 0 && plans.length < most) {
-    if (branches > MOST_BRANCHES && plans.length > 0) return { plans, complete: false };
+    if (others.left < 0) return { plans, complete: false };
     const at = cheapestIndex(open);
     const best = open[at] as Branch;
     if (!best.rated) {
-      branches++;
-      open[at] = { ...best, rated: refine(problem, best.plan, help(allowedBy(best.settled, best.barred))) };
+      const work = best.plan === first ? refining : others;
+      open[at] = { ...best, rated: refine(problem, best.plan, help(work, allowedBy(best.settled, best.barred))) };
       continue;
     }
     open.splice(at, 1);
     plans.push(best.rated);
     if (plans.length === most) break;
     for (let i = best.settled.length; i < best.rated.counts.length; i++) {
-      branches++;
       const settled = best.rated.counts.slice(0, i);
       const barred = new Set(i === best.settled.length ? best.barred : []);
       barred.add(best.rated.counts[i] as number);
-      const plan = cheapestPlan(problem, range, help(allowedBy(settled, barred)));
+      const plan = cheapestPlan(problem, range, help(others, allowedBy(settled, barred)));
       if (plan) open.push({ settled, barred, plan, rated: null });
     }
   }

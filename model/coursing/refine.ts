@@ -39,9 +39,10 @@ export function compareRated(a: RatedPlan, b: RatedPlan): number {
 /**
  * Narrows the joint limits round the nominal as far as the least cost still holds: the largest step from nominal is then
  * the least there is. Then narrows them from each side in turn: with the step fixed, one joint lies at it, so the
- * least spread is found by raising the lower limit or by lowering the upper. Each trial is a whole exact search.
+ * least spread is found by raising the lower limit or by lowering the upper. Each trial is a whole exact search; where the
+ * work runs out, the best so far stands.
  */
-export function refine(problem: Problem, plan: Plan, help?: SearchHelp): RatedPlan {
+export function refine(problem: Problem, plan: Plan, help: SearchHelp): RatedPlan {
   const { nominal, least, most } = problem.joint;
   const within = (limits: JointLimits): RatedPlan | null => {
     const found = cheapestWithin(problem, limits, plan.cost, help);

@@ -34,7 +34,14 @@ export interface Plan {
 /** Which counts a stop's interval may have. */
 export type CountAllowed = (stop: number, count: number) => boolean;
 
+/** Pieces of cost that searches may still make; below zero they have stopped for lack of it. */
+export interface Work {
+  left: number;
+}
+
 export interface SearchHelp {
+  /** Shared by the searches of one task, and used up by them. */
+  readonly work: Work;
   readonly allowed?: CountAllowed;
   /** For each stop, a cost that the stops above it are known to add at least. */
   readonly ahead?: readonly Cost[];
@@ -49,7 +56,7 @@ interface Stage {
 const ANY_COUNT: CountAllowed = () => true;
 
 /**
- * The cheapest plan of those with neither part of the cost over `bound`, or null where there is none. Ties go to joints
+ * The cheapest plan of those with neither part of the cost over `bound`, or null where there is none or `work` ran out. Ties go to joints
  * near the nominal. Costs only grow from stop to stop, so what is over the bound is dropped on the way: a tight bound
  * makes the search quick, and changes nothing else.
  */
@@ -57,7 +64,7 @@ export function cheapestWithin(
   problem: Problem,
   joint: JointLimits,
   bound: Cost,
-  { allowed = ANY_COUNT, ahead }: SearchHelp = {},
+  { work, allowed = ANY_COUNT, ahead }: SearchHelp,
 ): Plan | null {
   const stages: Stage[] = [
     {
@@ -66,8 +73,8 @@ export function cheapestWithin(
     },
   ];
   for (let i = 0; i < problem.stops.length; i++) {
-    const next = advance(problem, joint, stages[i] as Stage, i, allowed, lessCost(bound, ahead?.[i]));
-    if (next.begun.length === 0 && next.bare.length === 0) return null;
+    const next = advance(problem, joint, stages[i] as Stage, i, allowed, lessCost(bound, ahead?.[i]), work);
+    if (work.left < 0 || (next.begun.length === 0 && next.bare.length === 0)) return null;
     stages.push(next);
   }
   return retrace(problem, joint, stages, allowed);
@@ -84,6 +91,7 @@ function advance(
   index: number,
   allowed: CountAllowed,
   bound: Cost,
+  work: Work,
 ): Stage {
   const stop = problem.stops[index] as Stop;
   const { lo, hi } = windowOf(problem, index);
@@ -96,7 +104,10 @@ function advance(
     for (const count of countsFrom(pieces, lo, hi, problem.unit, joint)) {
       if (count < leastCount || !allowed(index, count)) continue;
       const limits = heightLimits(count, problem.unit, joint);
-      if (limits.least <= limits.most) arrivals.push(slideUp(pieces, limits.least, limits.most, lo, hi));
+      if (limits.least > limits.most) continue;
+      work.left -= pieces.length;
+      if (work.left < 0) return { begun: [], bare: [] };
+      arrivals.push(slideUp(pieces, limits.least, limits.most, lo, hi));
     }
   }
   const begun = prune(sumOf(lowestOf(arrivals), charge), bound);
