@@ -30,13 +30,13 @@ function plainStyle(role: Role, { colours, strokes }: FigureTheme): RoleStyle {
       return { fill: NONE, stroke: colours.ink, width: strokes.normal, text };
     case 'body':
     case 'unit':
+    case 'return':
       return {
         fill: colours.earth,
-        stroke: role === 'unit' ? colours.earthDeep : NONE,
+        stroke: role === 'body' ? NONE : colours.earthDeep,
         width: strokes.hair * 0.5,
         text,
       };
-    case 'return':
     case 'closer':
       return { fill: colours.selected, stroke: colours.earthDeep, width: strokes.hair * 0.5, text };
     case 'joint':

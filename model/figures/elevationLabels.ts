@@ -1,4 +1,5 @@
 /** Words and numbers of an elevation, in columns beside the wall: course numbers left, heights right, lengths below. */
+import type { PlanPoint } from '../geometry/point';
 import { roundTicks, type Ticks } from '../length/ticks';
 import type { ThingRef } from '../things';
 import type { ElevationContext } from './elevation';
@@ -91,42 +92,47 @@ function courseLabels(context: ElevationContext): HeightLabel[] {
     }));
 }
 
-/** Piers and openings in one row of dimensions, and the whole run in a second. */
+/** Running distances of the jambs from the first corner, written upright under them, and the whole run below. */
 function lengthLabels(context: ElevationContext): Shape[] {
-  const { run, setOut, drawing, options } = context;
+  const { run, setOut, drawing, options, tape } = context;
   const { scale } = options;
-  const height = scale.textHeight.dimension;
-  const below = Math.min(...foundationLine(context).map((point) => point.y)) - scale.textHeight.small * 1.2;
+  const small = scale.textHeight.small;
+  const below = Math.min(...foundationLine(context).map((point) => point.y)) - small * 1.2;
   const openingById = new Map(drawing.openings.map((opening) => [opening.id, opening]));
-  const stops = [0, run.length as number];
-  for (const id of setOut.walls.openingsByRun.get(run.runId) ?? []) {
+  const jambs = (setOut.walls.openingsByRun.get(run.runId) ?? []).flatMap((id) => {
     const opening = openingById.get(id);
-    if (opening) stops.push(opening.at, opening.at + opening.width);
+    return opening ? [opening.at, roundTicks(opening.at + opening.width)] : [];
+  });
+  const shapes: Shape[] = [];
+  const ticksDown: PlanPoint[][] = [];
+  let deepest = 0;
+  let clear = -Infinity;
+  for (const at of [...new Set(jambs)].sort((a, b) => a - b)) {
+    ticksDown.push([
+      { x: at, y: roundTicks(below - small * 0.15) },
+      { x: at, y: roundTicks(below - small * 0.6) },
+    ]);
+    if (at - clear < small * 1.15) continue;
+    clear = at;
+    const text: FigureText = { kind: 'measure', length: at };
+    deepest = Math.max(deepest, textBox(text, 'small', false, scale, tape).width);
+    const place = { x: at, y: roundTicks(below - small * 0.85) };
+    shapes.push({ kind: 'text', role: 'dimension', at: place, text, size: 'small', turn: 90, anchor: 'end' });
   }
-  stops.sort((a, b) => a - b);
-  const rows: [number, number, number][] = [];
-  stops.forEach((from, i) => {
-    const to = stops[i + 1];
-    if (to !== undefined && to > from && stops.length > 2) rows.push([from, to, below - height * 1.2]);
+  if (ticksDown.length > 0) shapes.push({ kind: 'lines', role: 'dimension', lines: ticksDown });
+  const { width } = textBox({ kind: 'measure', length: run.length }, 'dimension', false, scale, tape);
+  if (run.length < width + scale.textHeight.dimension) return shapes;
+  const y = roundTicks(below - (deepest > 0 ? deepest + small : 0) - scale.textHeight.dimension);
+  shapes.push({
+    kind: 'dimension',
+    role: 'dimension',
+    from: { x: roundTicks(0), y },
+    to: { x: run.length, y },
+    length: run.length,
+    textAt: { x: roundTicks(run.length / 2), y },
+    turn: 0,
   });
-  const whole = below - height * (stops.length > 2 ? 2.8 : 1.2);
-  rows.push([0, run.length, whole]);
-  return rows.flatMap(([from, to, y]): Shape[] => {
-    const length = roundTicks(to - from);
-    const { width } = textBox({ kind: 'measure', length }, 'dimension', false, scale, context.tape);
-    if (length < width + height) return [];
-    return [
-      {
-        kind: 'dimension',
-        role: 'dimension',
-        from: { x: roundTicks(from), y: roundTicks(y) },
-        to: { x: roundTicks(to), y: roundTicks(y) },
-        length,
-        textAt: { x: roundTicks((from + to) / 2), y: roundTicks(y) },
-        turn: 0,
-      },
-    ];
-  });
+  return shapes;
 }
 
 /** The letters of the run's two corners, over the poles' heads. */

@@ -3,6 +3,7 @@ import { roundTicks } from '../length/ticks';
 import type { StoryPole } from '../poles/types';
 import type { ElevationContext } from './elevation';
 import { alongRun } from './onRun';
+import { usualGap } from './pole';
 
 export interface PoleSpan {
   readonly pole: StoryPole;
@@ -48,7 +49,12 @@ export function drawElevationPoles(context: ElevationContext): void {
       emphasis,
       boxes: [[left, marks.foot, right - left, marks.head - marks.foot]],
     });
-    const lines = marks.marks.map((mark) => [
+    // Where every mark would make one band, only those are shown that have a name or a number beside them.
+    const near = usualGap(marks) < options.scale.textHeight.small * 0.4;
+    const shown = marks.marks.filter(
+      (mark) => !near || mark.course === null || mark.course % 5 === 0 || mark.course === 1,
+    );
+    const lines = shown.map((mark) => [
       { x: roundTicks(left - over), y: mark.height },
       { x: roundTicks(right + over), y: mark.height },
     ]);

@@ -36,7 +36,7 @@ export function lowestFoundation(context: ElevationContext, from: number, to: nu
 /** How far the foundation is drawn past the wall's ends, and how deep below its lowest place. */
 function foundationMargin(context: ElevationContext): { past: number; deep: number } {
   const { small } = context.options.scale.textHeight;
-  return { past: Math.max(small * 2.5, context.drawing.poleKit.leg * 2), deep: small * 1.2 };
+  return { past: Math.max(small * 1.1, context.drawing.poleKit.leg * 1.5), deep: small * 1.2 };
 }
 
 export function drawElevationGround(context: ElevationContext): void {

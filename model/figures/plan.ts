@@ -13,7 +13,8 @@ import { drawBodies, drawFacesAndLines } from './planWalls';
 
 /**
  * The plan at a scale. The scale decides only what is sized by the printer: how large a pole is drawn at least, which
- * labels find room and where they stand. Bounds take in braces, labels and dimensions.
+ * labels find room and where they stand. Bounds take in braces, labels and
+ * dimensions, but no boundary or keep-clear that lies beyond them.
  */
 export function planFigure(drawing: Drawing, setOut: SetOut, options: PlanOptions): Figure {
   const context = planContext(drawing, setOut, options);
@@ -28,9 +29,12 @@ export function planFigure(drawing: Drawing, setOut: SetOut, options: PlanOption
     within: options.within ?? null,
   });
   for (const place of places) if (place) context.shapes.push(...place.shapes);
+  // The boundary and what is kept clear may lie far out: the building is what must be seen, where there is one.
+  const building = context.shapes.filter(({ role }) => role !== 'boundary' && role !== 'keep-clear');
+  const seen = building.length > 0 ? building : context.shapes;
   return {
     name: 'plan',
-    bounds: boundsOf(context.shapes, options.scale, context.tape),
+    bounds: boundsOf(seen, options.scale, context.tape),
     tape: context.tape,
     shapes: context.shapes,
   };

@@ -5,7 +5,7 @@
 import type { Drawing } from '../drawing/schema';
 import { roundTicks, type Ticks } from '../length/ticks';
 import type { PlanPoint } from '../geometry/point';
-import type { PoleMark, PoleMarks } from '../marks/types';
+import type { MarkKind, PoleMark, PoleMarks } from '../marks/types';
 import { boundsOf } from './bounds';
 import type { Emphasis, Figure, LabelScale, Role, Shape } from './figure';
 import { spreadApart } from './spread';
@@ -120,7 +120,10 @@ export function poleFigure(drawing: Drawing, marks: PoleMarks, options: PoleOpti
   };
 }
 
-/** The usual distance between two marks: the middle one of all gaps; the whole strip where there is only one mark. */
+/**
+ * The usual distance between two marks: three of four are at least so far apart, so that rows of this height hardly
+ * move off their marks. The whole strip where there is only one mark.
+ */
 export function usualGap(marks: PoleMarks): number {
   const gaps = marks.marks
     .flatMap((mark, i) => {
@@ -128,5 +131,10 @@ export function usualGap(marks: PoleMarks): number {
       return next && mark.height > next.height ? [mark.height - next.height] : [];
     })
     .sort((a, b) => a - b);
-  return gaps[Math.floor(gaps.length / 2)] ?? Math.max(1, marks.head - marks.foot);
+  return gaps[Math.floor(gaps.length / 4)] ?? Math.max(1, marks.head - marks.foot);
+}
+
+/** What a mark is besides a course's top. A lintel's seat is its opening's head: only one of the two is said. */
+export function tagsOfMark(mark: PoleMark): readonly MarkKind[] {
+  return mark.kinds.filter((kind) => kind !== 'course' && !(kind === 'lintelSeat' && mark.kinds.includes('head')));
 }

@@ -19,6 +19,11 @@ function measureLetters(length: Ticks, tape: Tape): number {
   return typesetMeasure(length, tape).reduce((sum, part) => sum + part.text.length * (part.fraction ? 0.62 : 1), 0);
 }
 
+/** A word's own name is about as long as the word in English, and somewhat more is allowed for other languages. */
+function wordLetters(key: string): number {
+  return key.length - key.lastIndexOf('.') + 2;
+}
+
 /** Characters to allow for a text; words are measured once worded, so a printer may give their length. */
 export function lettersOf(text: FigureText, tape: Tape): number {
   switch (text.kind) {
@@ -27,9 +32,9 @@ export function lettersOf(text: FigureText, tape: Tape): number {
     case 'measure':
       return measureLetters(text.length, tape);
     case 'labelled':
-      return measureLetters(text.length, tape) + 7;
+      return measureLetters(text.length, tape) + wordLetters(text.key) + 1;
     case 'word':
-      return 12;
+      return wordLetters(text.key);
   }
 }
 

@@ -65,7 +65,10 @@ export function planSheet(set: SheetSet): Sheet {
         y: inside.y + inside.height / 2 + middle.y * scale.pointsPerTick,
         pointsPerTick: scale.pointsPerTick,
       };
+      doc.save();
+      doc.rect(inside.x, inside.y, inside.width, inside.height).clip();
       printFigure(doc, plan, place, set.say);
+      doc.restore();
       drawBarScale(doc, set.tape, scale, area.x + 8, area.y + area.height - 4, set.say);
     },
   };

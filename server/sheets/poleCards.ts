@@ -1,6 +1,6 @@
 /** One card for each pole and lift, to go up the wall with whoever marks it: the strip and its table in one. */
 import type { PoleMark, PoleMarks } from '../../model/marks/types';
-import { poleFigure, usualGap } from '../../model/figures/pole';
+import { poleFigure, tagsOfMark, usualGap } from '../../model/figures/pole';
 import { roundTicks } from '../../model/length/ticks';
 import type { StoryPole } from '../../model/poles/types';
 import { colours, paperLabelScale } from './ink';
@@ -61,8 +61,7 @@ function heightOf(marks: PoleMarks): number {
 }
 
 function tagsOf(set: SheetSet, mark: PoleMark): string {
-  return mark.kinds
-    .filter((kind) => kind !== 'course')
+  return tagsOfMark(mark)
     .map((kind) => set.say(`poles.kinds.${kind}`))
     .join(', ');
 }

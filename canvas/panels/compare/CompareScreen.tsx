@@ -119,18 +119,22 @@ function Comparing({ before, after, names }: ComparingProps) {
           borderColor: colours.rule,
         }}
       >
-        <Choice
-          label={t('revisions.compare.changes')}
-          hideLabel
-          options={[
-            { value: 'plan', label: t('common.nav.plan') },
-            { value: 'walls', label: t('common.nav.walls') },
-          ]}
-          value={shown}
-          onChange={setShown}
-        />
+        <View style={{ minWidth: 220 }}>
+          <Choice
+            label={t('revisions.compare.changes')}
+            hideLabel
+            options={[
+              { value: 'plan', label: t('common.nav.plan') },
+              { value: 'walls', label: t('common.nav.walls') },
+            ]}
+            value={shown}
+            onChange={setShown}
+          />
+        </View>
         {shown === 'plan' ? (
-          <Choice label={t('revisions.compare.pick')} hideLabel options={sides} value={side} onChange={setSide} />
+          <View style={{ minWidth: 300 }}>
+            <Choice label={t('revisions.compare.pick')} hideLabel options={sides} value={side} onChange={setSide} />
+          </View>
         ) : null}
       </View>
       {shown === 'plan' ? (

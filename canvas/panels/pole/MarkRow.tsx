@@ -2,6 +2,7 @@ import { Pressable, View } from 'react-native';
 import { sayLength } from '../../../model/length/say';
 import { roundTicks, type Ticks } from '../../../model/length/ticks';
 import type { PoleMark } from '../../../model/marks/types';
+import { tagsOfMark } from '../../../model/figures/pole';
 import type { Tape } from '../../../model/figures/figure';
 import type { PressState } from '../../ui/Button';
 import { Measurement } from '../../ui/Measurement';
@@ -22,7 +23,7 @@ export interface MarkRowProps {
 
 /** What a mark is, in words: its course, and what else stands at that height. */
 export function nameOfMark(mark: PoleMark, t: Words): string {
-  const tags = mark.kinds.filter((kind) => kind !== 'course').map((kind) => t(`poles.kinds.${kind}`));
+  const tags = tagsOfMark(mark).map((kind) => t(`poles.kinds.${kind}`));
   return [...(mark.course === null ? [] : [t('poles.courseNumber', { number: mark.course })]), ...tags].join(', ');
 }
 
@@ -40,7 +41,7 @@ export function MarkRow({ mark, tape, selected, full, height, onPress }: MarkRow
   const say = (length: Ticks) => sayLength(length, tape.units, tape.step, tape.units === 'imperial' ? 'inches' : 'mm');
   const size = roundTicks(Math.abs(fromLine));
   const side = t(`poles.${sideOf(fromLine)}`);
-  const tags = mark.kinds.filter((kind) => kind !== 'course');
+  const tags = tagsOfMark(mark);
   const spoken = `${nameOfMark(mark, t)}: ${fromLine === 0 ? side : `${side} ${say(size)}`}, ${say(aboveFoundation)} ${t('poles.aboveHere')}`;
   const number = (length: Ticks) => (
     <Measurement
