@@ -105,6 +105,7 @@ export function roleStyle(role: Role, emphasis: Emphasis | undefined, theme: Fig
         return { ...style, fill: colours.caution, stroke: colours.caution, text: colours.surface };
       if (role === 'opening') return { ...style, stroke: colours.caution, width: theme.strokes.normal, dash: '3 3' };
       if (role === 'way') return { ...style, stroke: colours.caution };
+      if (role === 'frame' || role === 'lintel') return { ...style, fill: colours.caution, stroke: colours.caution };
       return { ...style, stroke: colours.caution, width: style.width * 1.6, dash: '6 3' };
     case 'quiet':
       // The far leg of a steel angle, lighter than the near one.

@@ -1,5 +1,5 @@
 /** Two plans in one: the earlier one pale underneath, the later one over it. */
-import type { Box, Figure, Role } from './figure';
+import type { Box, Figure, Role, Shape } from './figure';
 
 /** Of the earlier plan only what is built is shown: its words would only stand in the way of the later one's. */
 const UNDER: ReadonlySet<Role> = new Set(['face', 'frame', 'swing', 'pole', 'brace', 'foot', 'keep-clear', 'boundary']);
@@ -15,8 +15,11 @@ export function joinBounds(a: Box, b: Box): Box {
 }
 
 export function overlayFigure(before: Figure, after: Figure): Figure {
+  const keyOf = ({ thing }: Shape) => (thing ? `${thing.kind} ${thing.id}` : '');
+  const still = new Set(after.shapes.map(keyOf));
+  // What is gone stays as strong as what is new; what only moved is pale where it was.
   const under = before.shapes
     .filter((shape) => UNDER.has(shape.role))
-    .map((shape) => ({ ...shape, emphasis: shape.emphasis === 'differs' ? ('differs' as const) : ('quiet' as const) }));
+    .map((shape): Shape => (still.has(keyOf(shape)) ? { ...shape, emphasis: 'quiet' } : shape));
   return { ...after, bounds: joinBounds(before.bounds, after.bounds), shapes: [...under, ...after.shapes] };
 }

@@ -71,7 +71,7 @@ export function RunLedger({ drawing, setOut, runId, selectedCourse, onStep, onSt
           ? t('walls.courseTop', { number: course.number })
           : `${t('walls.run', { name: run.name })} · ${t('walls.length')}`}
       </Txt>
-      <View style={{ flexDirection: 'row', alignItems: 'center', gap: space.s }}>
+      <View style={{ flexDirection: 'row', alignItems: 'center', gap: space.s, paddingVertical: space.s }}>
         <View style={{ flex: 1 }}>
           <Measurement
             length={course ? course.top : run.length}
@@ -83,6 +83,7 @@ export function RunLedger({ drawing, setOut, runId, selectedCourse, onStep, onSt
         </View>
         <IconButton icon="down" kind="outline" label={t('walls.courseDown')} onPress={() => onStepCourse(-1)} />
         <IconButton icon="up" kind="outline" label={t('walls.courseUp')} onPress={() => onStepCourse(1)} />
+        <View style={{ width: space.s }} />
         <IconButton icon="back" kind="outline" label={t('walls.previous')} onPress={() => onStep(-1)} />
         <IconButton icon="forward" kind="outline" label={t('walls.next')} onPress={() => onStep(1)} />
       </View>

@@ -80,6 +80,8 @@ export function TakeoffScreen({ siteId }: { siteId: string }) {
   const { takeoff } = setOut;
   const { units } = drawing;
   const write = (length: Ticks) => writeLength(length, { units, step: drawing.tapeStep });
+  const writeSize = (length: Ticks) =>
+    writeLength(length, { units, step: drawing.tapeStep, style: units === 'imperial' ? 'inches' : 'mm' });
   const type = drawing.wallTypes[0];
   const heading = (
     <>
@@ -124,9 +126,9 @@ export function TakeoffScreen({ siteId }: { siteId: string }) {
           title={t('takeoff.units')}
           text={t('takeoff.unitsText', {
             unit: type.unitName,
-            length: write(type.unit.length),
-            width: write(type.unit.width),
-            height: write(type.unit.height),
+            length: writeSize(type.unit.length),
+            width: writeSize(type.unit.width),
+            height: writeSize(type.unit.height),
           })}
         >
           <Rows label={t('takeoff.units')}>
@@ -211,7 +213,7 @@ export function TakeoffScreen({ siteId }: { siteId: string }) {
                 name={t('takeoff.lintel', {
                   count: lintel.count,
                   length: write(lintel.length),
-                  depth: write(lintel.depth),
+                  depth: writeSize(lintel.depth),
                 })}
               >
                 <Count value={lintel.count} />
