@@ -128,18 +128,24 @@ function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
         paddingBottom: space.l,
       }}
     >
-      <View style={{ flex: 1, minWidth: 0 }}>
-        <Txt tone="soft" numberOfLines={1}>
-          {run.length === 0 ? t('plan.toolTells.runNext') : t('plan.length')}
+      {run.length === 0 && entry.text === '' ? (
+        <Txt size="large" tone="soft" numberOfLines={2} style={{ flex: 1, alignSelf: 'center' }}>
+          {t('plan.toolTells.runNext')}
         </Txt>
-        {unread ? (
-          <Txt numeric size="ledger" weight="semibold" numberOfLines={1}>
-            {entry.text}
+      ) : (
+        <View style={{ flex: 1, minWidth: 0 }}>
+          <Txt tone="soft" numberOfLines={1}>
+            {t('plan.length')}
           </Txt>
-        ) : (
-          <Measurement length={run.length} units={units} step={step} size="ledger" form="feet" />
-        )}
-      </View>
+          {unread ? (
+            <Txt numeric size="ledger" weight="semibold" numberOfLines={1}>
+              {entry.text}
+            </Txt>
+          ) : (
+            <Measurement length={run.length} units={units} step={step} size="ledger" form="feet" />
+          )}
+        </View>
+      )}
       <Button
         label={angle === null ? t('plan.angle') : t('plan.degrees', { value: Math.round(angle * 10) / 10 })}
         spoken={t('plan.typeAngle')}

@@ -12,7 +12,7 @@ import { ThingReasons } from './ThingReasons';
 
 const PHONE_HEIGHT = 196;
 const SIDE_HEIGHT = 150;
-export const EDIT_HEIGHT = 128;
+export const EDIT_HEIGHT = 116;
 
 export interface LedgerProps {
   readonly onDetails: () => void;

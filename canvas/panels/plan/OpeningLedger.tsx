@@ -3,6 +3,7 @@ import { changeOpening, moveOpening, type OpeningChange } from '../../../model/d
 import type { Ticks } from '../../../model/length/ticks';
 import { Button } from '../../ui/Button';
 import { space } from '../../ui/tokens';
+import { useLayout } from '../../ui/useLayout';
 import { useWords } from '../../ui/words';
 import { LengthField } from '../keypad/LengthField';
 import { useDraft, useDraftActions, useSetOut } from '../workspace/workspace';
@@ -15,6 +16,8 @@ export function OpeningLedger({ openingId, onDetails }: LedgerProps & { openingI
   const actions = useDraftActions();
   const editing = useDraft((state) => state.mode === 'edit');
   const opening = useDraft((state) => state.drawing.openings.find((one) => one.id === openingId));
+  // While drawing on a phone the room goes to what doesn't fit; the other sizes are under Details.
+  const phone = useLayout().name === 'phone';
   const units = useDraft((state) => state.drawing.units);
   const step = useDraft((state) => state.drawing.tapeStep);
   const { walls } = useSetOut();
@@ -48,11 +51,13 @@ export function OpeningLedger({ openingId, onDetails }: LedgerProps & { openingI
         }
         after={editing ? <Button label={t('plan.details')} onPress={onDetails} /> : null}
       />
-      <View style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l, rowGap: space.s }}>
-        {field(t('plan.ledger.width'), opening.width, (width) => change({ width }))}
-        {opening.kind === 'window' ? field(t('plan.ledger.sill'), opening.sill, (sill) => change({ sill })) : null}
-        {field(t('plan.ledger.head'), opening.head, (head) => change({ head }))}
-      </View>
+      {editing && phone ? null : (
+        <View style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: space.l, rowGap: space.s }}>
+          {field(t('plan.ledger.width'), opening.width, (width) => change({ width }))}
+          {opening.kind === 'window' ? field(t('plan.ledger.sill'), opening.sill, (sill) => change({ sill })) : null}
+          {field(t('plan.ledger.head'), opening.head, (head) => change({ head }))}
+        </View>
+      )}
     </>
   );
 }

@@ -41,7 +41,7 @@ function heldTopLeft(camera: Camera, before: ViewSize, now: ViewSize): Camera {
 
 /** The camera over the plan: fitted when the view first has a size, and kept on what it shows as the view changes. */
 export function usePlanCamera(): PlanCamera {
-  const { solver } = useWorkspace();
+  const { solver, draft } = useWorkspace();
   const [state, setState] = useState<{ camera: Camera | null; size: ViewSize }>({ camera: null, size: NO_SIZE });
   /** True until the person has moved the paper: then a change of the view's size fits it anew. */
   const fitted = useRef(true);
@@ -51,12 +51,18 @@ export function usePlanCamera(): PlanCamera {
       setState((before) => {
         if (size.width <= 0 || size.height <= 0) return before;
         const { solved } = solver.get();
+        const drawn = draft.get().preview?.run;
+        if (before.camera && drawn && size.height < before.size.height) {
+          // The keypad took the room: the corner that is being drawn from comes to the middle of what is left.
+          fitted.current = false;
+          return { camera: { ...before.camera, x: drawn.from.x, y: drawn.from.y }, size };
+        }
         if (solved && (before.camera === null || fitted.current)) return { camera: fitSolved(solved, size), size };
         if (!before.camera) return { ...before, size };
         return { camera: heldTopLeft(before.camera, before.size, size), size };
       });
     },
-    [solver],
+    [solver, draft],
   );
 
   const setCamera = useCallback(
