@@ -4,7 +4,7 @@ import { roundTicks, ticks } from '../length/ticks';
 import type { Reason } from '../reasons';
 import { ruleValue } from '../rules/registry';
 import type { Walls } from '../walls/types';
-import type { PlanLift } from './buildAnswer';
+import type { PlanLift } from './layCourses';
 import type { Lift } from './types';
 
 /**

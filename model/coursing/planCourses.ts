@@ -5,15 +5,13 @@ import type { Reason } from '../reasons';
 import { coursedType } from '../survey/coursedType';
 import type { Ground } from '../survey/types';
 import type { Walls } from '../walls/types';
-import { coursesOf, liftsOf, linesOf } from './buildAnswer';
-import { controlResults } from './controlResults';
+import { buildAnswer, type Built, type Parts } from './buildAnswer';
 import { gatherControls, missCode } from './controls';
-import { HARD_MISS } from './costPieces';
+import { lettingGo } from './lettingGo';
 import { checkLifts } from './lifts';
-import type { Control, Problem } from './problem';
-import { rate, type RatedPlan } from './refine';
+import { rate } from './refine';
 import { settle } from './settle';
-import type { Coursing, CoursingAnswer } from './types';
+import type { Course, Coursing, CoursingAnswer } from './types';
 
 /** The best answer and this many others. */
 const MOST_OTHERS = 5;
@@ -21,7 +19,8 @@ const MOST_OTHERS = 5;
 /**
  * Chooses whole numbers of courses and one bed joint for each interval between the heights that courses must meet, in strict order:
  * fewest hard heights missed, and by least; least soft misses by weight; joints nearest the nominal; joints
- * most even. Exact (see `search.ts`, `refine.ts`, `rankPlans.ts`). Heights are above the high point of the foundation.
+ * most even. Exact (see `search.ts`, `refine.ts`, `rankPlans.ts`). The others offered have other counts of courses, or even
+ * joints past a height that can't be met anyway. Heights are above the high point of the foundation.
  */
 export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Coursing {
   const type = coursedType(drawing);
@@ -30,56 +29,46 @@ export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Cou
   const { problem, ranking, left, openTop } = settled;
   const [best, ...rest] = ranking.plans;
   const chosen = best ?? rate(problem, { cost: { hard: 0, soft: 0 }, heights: [], counts: [] });
-  const built = build(problem, chosen, left, openTop, ground.leastBedding);
+  const parts: Parts = { problem, left, openTop, bedding: ground.leastBedding };
+  const built = buildAnswer(parts, chosen);
   const { lifts, reasons: tall } = checkLifts(drawing, walls, built.lifts);
   const missed = missedReasons(built.answer, left.length);
+  const others = [...rest.map((plan) => buildAnswer(parts, plan)), ...lettingGo(parts, built)];
   const lastLift = lifts[lifts.length - 1];
   return {
     unitHeight: type.unit.height,
     courses: built.courses,
     lifts,
     answer: built.answer,
-    others: otherAnswers(problem, built, rest, left, openTop, ground.leastBedding),
+    others: differing(built, others, drawing.tapeStep),
     top: lastLift?.beam?.top ?? lastLift?.top ?? ground.firstCourseTop,
     reasons: [...gathered.reasons, ...settled.reasons, ...missed, ...tall],
   };
 }
 
-type Built = ReturnType<typeof build>;
-
-function build(problem: Problem, plan: RatedPlan, left: readonly Control[], openTop: Ticks | null, bedding: Ticks) {
-  const lifts = liftsOf(problem, linesOf(problem, plan, openTop));
-  const courses = coursesOf(problem, bedding, lifts);
-  const controls = controlResults(problem, plan, courses, left);
-  const leftHard = controls.slice(controls.length - left.length).filter((one) => one.hold === 'hard' && !one.met);
-  const answer: CoursingAnswer = {
-    intervals: lifts.flatMap((lift) => lift.intervals),
-    controls,
-    cost: [Math.floor(plan.cost.hard / HARD_MISS) + leftHard.length, plan.cost.soft, plan.step, plan.spread],
-  };
-  return { lifts, courses, answer };
+/** The best few of the other answers that miss no more hard heights, and that the tape can tell from those before them. */
+function differing(best: Built, others: readonly Built[], tapeStep: Ticks): CoursingAnswer[] {
+  const kept = [best];
+  const inOrder = others
+    .filter((other) => other.answer.cost[0] <= best.answer.cost[0])
+    .sort((a, b) => compareParts(a.answer.cost, b.answer.cost));
+  for (const other of inOrder) {
+    if (kept.length > MOST_OTHERS) break;
+    if (kept.every((one) => tellApart(one, other, tapeStep))) kept.push(other);
+  }
+  return kept.slice(1).map((one) => one.answer);
 }
 
-/** The next best answers whose courses differ, and that miss no more hard heights than the best. */
-function otherAnswers(
-  problem: Problem,
-  best: Built,
-  rest: readonly RatedPlan[],
-  left: readonly Control[],
-  openTop: Ticks | null,
-  bedding: Ticks,
-): CoursingAnswer[] {
-  const seen = new Set([signature(best)]);
-  return rest.flatMap((plan) => {
-    const built = build(problem, plan, left, openTop, bedding);
-    if (built.answer.cost[0] > best.answer.cost[0] || seen.has(signature(built))) return [];
-    seen.add(signature(built));
-    return [built.answer];
-  });
+function compareParts(a: CoursingAnswer['cost'], b: CoursingAnswer['cost']): number {
+  const differs = a.findIndex((part, i) => part !== b[i]);
+  return differs < 0 ? 0 : (a[differs] as number) - (b[differs] as number);
 }
 
-function signature(built: Built): string {
-  return built.courses.map((course) => course.top).join(' ');
+function tellApart(one: Built, other: Built, tapeStep: Ticks): boolean {
+  return (
+    one.courses.length !== other.courses.length ||
+    one.courses.some((course, i) => Math.abs(course.top - (other.courses[i] as Course).top) >= tapeStep)
+  );
 }
 
 /** The last `left` controls have their reasons already. */

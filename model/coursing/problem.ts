@@ -37,6 +37,13 @@ export interface Problem {
 /** Ticks missed beyond the tolerance count this many times. */
 export const BEYOND_TOLERANCE = 10;
 
+/** What a miss of one soft control costs: its weight for each tick, tenfold beyond the tolerance. */
+export function missCost(control: Pick<Control, 'weight' | 'tolerance'>, miss: number): number {
+  const off = Math.abs(miss);
+  const within = Math.min(off, control.tolerance);
+  return control.weight * (within + BEYOND_TOLERANCE * (off - within));
+}
+
 /** How far from its height a stop may be looked for: one course of the thickest joint either way. */
 export function windowOf(problem: Problem, index: number): { lo: number; hi: number } {
   const stop = problem.stops[index] as Stop;

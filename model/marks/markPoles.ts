@@ -14,7 +14,8 @@ import type { Marks, PoleMark, PoleMarks } from './types';
  * Marks every pole for every lift. All poles carry the same marks, because courses are level all the way round; what
  * differs is how far they are above the foundation and the foot. In lift 1 the foot is lapped down over the foundation
  * at the pole, in the others over the top of the beam below, so a pole reaches its length less the lap above it. A
- * mark names the openings of the runs at its pole, or the first of them elsewhere. Marks above a pole's
+ * mark names the openings of the runs at its pole, or the first of them elsewhere. Only where openings want very many
+ * heights off the course lines does a pole leave out those of other runs. Marks above a pole's
  * head stay in its list and give the reason `poleTooShort`.
  */
 export function markPoles(drawing: Drawing, ground: Ground, coursing: Coursing, poles: PoleSet): Marks {
@@ -22,13 +23,13 @@ export function markPoles(drawing: Drawing, ground: Ground, coursing: Coursing, 
   const runOfOpening = new Map(drawing.openings.map((opening) => [opening.id, opening.runId]));
   const lifts = coursing.lifts.map((lift) => {
     const heights = markHeights(drawing, coursing, lift);
-    return { lift, heights, byRun: openingsByRun(heights, runOfOpening) };
+    return { lift, heights, byRun: openingsByRun(heights, runOfOpening), crowded: isCrowded(heights) };
   });
   const marked: PoleMarks[] = [];
   for (const pole of poles.poles) {
     const foundation = foundationAt(ground, pole);
-    for (const { lift, heights, byRun } of lifts) {
-      const one = markPole({ drawing, ground, pole, lift, foundation, heights, byRun });
+    for (const { lift, heights, byRun, crowded } of lifts) {
+      const one = markPole({ drawing, ground, pole, lift, foundation, heights, byRun, crowded });
       marked.push(one);
       const highest = one.marks[0];
       if (highest && highest.height > one.head) {
@@ -43,6 +44,20 @@ export function markPoles(drawing: Drawing, ground: Ground, coursing: Coursing, 
     }
   }
   return { poles: marked, reasons };
+}
+
+/**
+ * More heights off the course lines than this, wanted by openings alone, and a pole carries only those of its own runs: the
+ * rest would hide the course marks, and grow with the square of the building.
+ */
+const MOST_OPENING_MARKS = 24;
+
+function isCrowded(heights: readonly MarkHeight[]): boolean {
+  return heights.filter(openingOnly).length > MOST_OPENING_MARKS;
+}
+
+function openingOnly(mark: MarkHeight): boolean {
+  return mark.course === null && mark.things.length === 0;
 }
 
 type OpeningsByRun = ReadonlyMap<string, ReadonlyMap<MarkHeight, readonly ThingRef[]>>;
@@ -71,14 +86,18 @@ interface PoleInLift {
   readonly foundation: Ticks;
   readonly heights: readonly MarkHeight[];
   readonly byRun: OpeningsByRun;
+  readonly crowded: boolean;
 }
 
-function markPole({ drawing, ground, pole, lift, foundation, heights, byRun }: PoleInLift): PoleMarks {
+function markPole({ drawing, ground, pole, lift, foundation, heights, byRun, crowded }: PoleInLift): PoleMarks {
   const { footLap, poleLength } = drawing.poleKit;
   const stands = lift.number === 1 ? foundation : lift.base;
   const foot = ticks(stands - footLap);
   const here = pole.runIds.map((runId) => byRun.get(runId));
-  const marks = heights.map((one): PoleMark => {
+  const carried = crowded
+    ? heights.filter((one) => !openingOnly(one) || here.some((ofRun) => ofRun?.has(one)))
+    : heights;
+  const marks = carried.map((one): PoleMark => {
     const fromLine = ticks(one.height - ground.levelLine);
     const fromFoot = ticks(one.height - foot);
     const aboveFoundation = ticks(one.height - foundation);

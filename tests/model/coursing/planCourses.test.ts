@@ -177,6 +177,22 @@ describe('planCourses', () => {
     expect(coursing.others[0]!.intervals[0]!.joint).toBeCloseTo(16_256 / 3, 6);
   });
 
+  it('offers even joints past a height that cannot be met anyway', () => {
+    // No course line reaches 9 3/4 in; the best bends the joints to 8 1/8, the other lets it go.
+    const coursing = plan({ ...walls, controlHeights: [control(9.75)], bondBeams: [beam(96)] });
+    expect(coursing.answer.controls[0]).toMatchObject({ got: inches(8.125), miss: inches(-1.625), met: false });
+    const passing = coursing.others.find((other) => other.intervals.length === 1);
+    expect(passing?.intervals[0]!.joint).toBe(inches(0.5));
+    expect(passing?.controls[0]).toMatchObject({
+      wanted: inches(9.75),
+      got: inches(8),
+      miss: inches(-1.75),
+      met: false,
+    });
+    // 1 3/4 in at weight 1, tenfold because the tolerance is nothing.
+    expect(passing?.cost).toEqual([0, 17.5 * 16_256, 0, 0]);
+  });
+
   it('warns of a lift taller than ten times its thinnest wall, to the underside of the beam', () => {
     expect(codes(plan({ ...walls, bondBeams: [beam(100)] }))).toEqual([]);
     const tall = plan({ ...walls, bondBeams: [beam(104)] });
