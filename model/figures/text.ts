@@ -19,9 +19,12 @@ function measureLetters(length: Ticks, tape: Tape): number {
   return typesetMeasure(length, tape).reduce((sum, part) => sum + part.text.length * (part.fraction ? 0.62 : 1), 0);
 }
 
+/** Small letters are narrower than the figures and capitals that a scale's advance is for. */
+const SMALL_LETTERS = 0.82;
+
 /** A word's own name is about as long as the word in English, and somewhat more is allowed for other languages. */
 function wordLetters(key: string): number {
-  return key.length - key.lastIndexOf('.') + 2;
+  return (key.length - key.lastIndexOf('.') + 2) * SMALL_LETTERS;
 }
 
 /** Characters to allow for a text; words are measured once worded, so a printer may give their length. */

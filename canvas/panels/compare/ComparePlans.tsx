@@ -1,7 +1,7 @@
 import { useCallback, useState } from 'react';
 import { View } from 'react-native';
 import type { ComparedState } from '../../../model/compare/compare';
-import type { LabelScale } from '../../../model/figures/figure';
+import type { Box, LabelScale } from '../../../model/figures/figure';
 import { overlayFigure } from '../../../model/figures/overlay';
 import { planFigure } from '../../../model/figures/plan';
 import type { PlanNote } from '../../../model/figures/planContext';
@@ -22,7 +22,13 @@ interface Props {
   readonly side: Side;
 }
 
-function planOf(state: ComparedState, differing: readonly ThingRef[], notes: readonly PlanNote[], scale: LabelScale) {
+function planOf(
+  state: ComparedState,
+  differing: readonly ThingRef[],
+  notes: readonly PlanNote[],
+  scale: LabelScale,
+  within: Box | null,
+) {
   return planFigure(state.drawing, state.setOut, {
     selection: null,
     scale,
@@ -30,6 +36,7 @@ function planOf(state: ComparedState, differing: readonly ThingRef[], notes: rea
     notes,
     dimensions: true,
     cautions: false,
+    within,
   });
 }
 
@@ -40,15 +47,15 @@ export function ComparePlans({ compared, names, side }: Props) {
   const [camera, setCamera] = useState<Camera | null>(null);
   const { before, after, comparison, notesBefore, notesAfter } = compared;
   const makeBefore = useCallback(
-    (scale: LabelScale) => planOf(before, comparison.differingBefore, notesBefore, scale),
+    (scale: LabelScale, within: Box | null) => planOf(before, comparison.differingBefore, notesBefore, scale, within),
     [before, comparison, notesBefore],
   );
   const makeAfter = useCallback(
-    (scale: LabelScale) => planOf(after, comparison.differingAfter, notesAfter, scale),
+    (scale: LabelScale, within: Box | null) => planOf(after, comparison.differingAfter, notesAfter, scale, within),
     [after, comparison, notesAfter],
   );
   const makeOverlay = useCallback(
-    (scale: LabelScale) => overlayFigure(makeBefore(scale), makeAfter(scale)),
+    (scale: LabelScale, within: Box | null) => overlayFigure(makeBefore(scale, within), makeAfter(scale, within)),
     [makeBefore, makeAfter],
   );
   const shared = { camera, onCamera: setCamera };
@@ -71,6 +78,7 @@ export function ComparePlans({ compared, names, side }: Props) {
           make={which === 'before' ? makeBefore : which === 'after' ? makeAfter : makeOverlay}
           alongside={which === 'before' ? makeAfter : makeBefore}
           of={which}
+          labels="inView"
           shared={shared}
           label={t('revisions.compare.figure', { name })}
         />
