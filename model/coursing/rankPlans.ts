@@ -21,6 +21,8 @@ export interface Ranking {
   readonly plans: readonly RatedPlan[];
   /** False where the bound on the work was reached: there may be more plans, and with none at all there may be a best one. */
   readonly complete: boolean;
+  /** False where the work ran out before the best plan's joints were proved the nearest to nominal and the most even. */
+  readonly proved: boolean;
 }
 
 /**
@@ -44,7 +46,7 @@ export function rankPlans(problem: Problem, most: number): Ranking {
   const hardStops = problem.stops.filter((stop) => stop.hold === 'hard').length;
   const best: Work = { left: WORK.best };
   const first = cheapestPlan(problem, { missed: hardStops, leastSoft: 0, mostSoft: ANY_SOFT }, { work: best });
-  if (!first) return { plans: [], complete: best.left >= 0 };
+  if (!first) return { plans: [], complete: best.left >= 0, proved: false };
   const missed = Math.floor(first.cost.hard / HARD_MISS);
   const range: CostRange = { missed, leastSoft: first.cost.soft, mostSoft: mostSoftOfOthers(problem, first) };
   const refining: Work = { left: WORK.refined };
@@ -56,7 +58,7 @@ export function rankPlans(problem: Problem, most: number): Ranking {
   const open: Branch[] = [{ settled: [], barred: new Set(), plan: first, rated: null }];
   const others: Work = { left: WORK.others };
   while (open.length > 0 && plans.length < most) {
-    if (others.left < 0) return { plans, complete: false };
+    if (others.left < 0) return { plans, complete: false, proved: refining.left >= 0 };
     const at = cheapestIndex(open);
     const best = open[at] as Branch;
     if (!best.rated) {
@@ -75,7 +77,7 @@ export function rankPlans(problem: Problem, most: number): Ranking {
       if (plan) open.push({ settled, barred, plan, rated: null });
     }
   }
-  return { plans, complete: true };
+  return { plans, complete: true, proved: refining.left >= 0 };
 }
 
 function allowedBy(settled: readonly number[], barred: ReadonlySet<number>): CountAllowed {

@@ -15,7 +15,7 @@ export interface Settled {
   readonly reasons: readonly Reason[];
 }
 
-const NOTHING: Ranking = { plans: [], complete: true };
+const NOTHING: Ranking = { plans: [], complete: true, proved: false };
 
 /**
  * Ranks the plans of the gathered stops. Where the search's bound on its work is reached before there is any plan, the
@@ -38,7 +38,7 @@ export function settle(type: WallType, start: Ticks, gathered: Gathered, most: n
     ranking = rankOnce(problem, most);
   }
   if (ranking.plans.length > 0) {
-    if (left.length > gathered.left.length) reasons.push(BOUND_REACHED);
+    if (left.length > gathered.left.length || !ranking.proved) reasons.push(BOUND_REACHED);
     return { problem, ranking, left, openTop, reasons };
   }
   left = [...left, ...problem.stops.flatMap((stop) => stop.controls)];
