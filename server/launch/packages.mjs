@@ -1,22 +1,22 @@
 /** npm's packages: installed from the lock file when they are missing or older than it. */
-import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
-import { createHash } from 'node:crypto';
+import { statSync } from 'node:fs';
 import path from 'node:path';
 import { CHECKOUT } from './state.mjs';
 import { runProgram, step } from './terminal.mjs';
 
+/** @param {string} name @returns {number} */
+function changedAt(name) {
+  return statSync(path.join(CHECKOUT, name), { throwIfNoEntry: false })?.mtimeMs ?? 0;
+}
+
 export async function needPackages() {
-  const stamp = path.join(CHECKOUT, 'node_modules', '.installed-from');
-  const lock = createHash('sha256')
-    .update(readFileSync(path.join(CHECKOUT, 'package-lock.json')))
-    .digest('hex');
-  if (existsSync(stamp) && readFileSync(stamp, 'utf8') === lock) return;
-  await step('Installing packages (npm ci): one to three minutes the first time', async () => {
-    await runProgram('npm', ['ci', '--no-audit', '--no-fund', '--cache', path.join(CHECKOUT, '.state', 'npm-cache')], {
+  // npm writes its own copy of the lock last of all, so an install that was cut short is done again.
+  const installed = changedAt('node_modules/.package-lock.json');
+  if (installed > 0 && installed >= changedAt('package-lock.json')) return;
+  await step('Installing packages (npm ci): one to three minutes the first time', () =>
+    runProgram('npm', ['ci', '--no-audit', '--no-fund', '--cache', path.join(CHECKOUT, '.state', 'npm-cache')], {
       cwd: CHECKOUT,
       toDo: 'see that the network reaches the npm registry, then run the command again.',
-    });
-    mkdirSync(path.dirname(stamp), { recursive: true });
-    writeFileSync(stamp, lock);
-  });
+    }),
+  );
 }
