@@ -67,6 +67,8 @@ export interface Action {
   label(state: DraftState): ActionLabel;
   icon(state: DraftState): ActionIcon;
   enabled(state: DraftState): boolean;
+  /** Dictionary key of what it would do it to: the step that undo takes back. */
+  of?(state: DraftState): string | null;
   /** For a switch or a choice: whether it is on. */
   on?(state: DraftState): boolean;
   run(context: ActionContext): void;

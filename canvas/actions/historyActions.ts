@@ -6,6 +6,7 @@ export const undo: Action = {
   id: 'undo',
   label: () => 'actions.undo',
   icon: () => 'undo',
+  of: (state) => state.history.past.at(-1)?.label ?? null,
   enabled: (state) => isEditing(state) && (state.history.past.length > 0 || state.preview !== null),
   run({ draft, tools }) {
     if (!tools.stepBack()) draft.undo();
@@ -16,6 +17,7 @@ export const redo: Action = {
   id: 'redo',
   label: () => 'actions.redo',
   icon: () => 'redo',
+  of: (state) => state.history.future.at(-1)?.label ?? null,
   enabled: (state) => isEditing(state) && state.history.future.length > 0,
   run: ({ draft }) => draft.redo(),
 };

@@ -35,7 +35,7 @@ export function groundBox(drawing: Drawing, setOut: SetOut): Box | null {
   return left > right ? null : { left: ticks(left), bottom: ticks(bottom), right: ticks(right), top: ticks(top) };
 }
 
-/** Labels are sized on the screen, so how much room they take is known only at a scale: the second look settles it. */
+/** Labels are sized on the screen, so how much room they take is known only at a scale: a few looks settle it. */
 export function fitPlan({ drawing, setOut, size, padding, figureAt, labelScale }: FitPlan): Camera {
   const ground = groundBox(drawing, setOut);
   if (!ground) {
@@ -48,6 +48,6 @@ export function fitPlan({ drawing, setOut, size, padding, figureAt, labelScale }
     return fitBox(empty, size, padding);
   }
   let camera = fitBox(ground, size, padding);
-  for (let look = 0; look < 2; look += 1) camera = fitBox(figureAt(labelScale(camera.scale)).bounds, size, padding);
+  for (let look = 0; look < 4; look += 1) camera = fitBox(figureAt(labelScale(camera.scale)).bounds, size, padding);
   return camera;
 }

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useState } from 'react';
 import { Pressable, View } from 'react-native';
 import { readLength } from '../../../model/length/read';
 import type { Ticks } from '../../../model/length/ticks';
@@ -132,17 +132,16 @@ export interface LengthDialogProps extends LengthFieldProps {
   readonly onClose: () => void;
 }
 
-/** The tape keypad in a dialog, with the length as it grows. */
+/** The tape keypad in a dialog, with the length as it grows; empty each time it is opened. */
 export function LengthDialog(props: LengthDialogProps) {
-  const { label, value, units, step, form = 'feet', onCommit, open, onClose } = props;
+  return props.open ? <OpenLengthDialog {...props} /> : null;
+}
+
+function OpenLengthDialog(props: LengthDialogProps) {
+  const { label, value, units, step, form = 'feet', onCommit, onClose } = props;
   const t = useWords();
   const [text, setText] = useState('');
   const [error, setError] = useState<string | undefined>();
-  useEffect(() => {
-    if (!open) return;
-    setText('');
-    setError(undefined);
-  }, [open]);
   const read = readLength(text, { units });
 
   function enter(): void {
@@ -154,7 +153,7 @@ export function LengthDialog(props: LengthDialogProps) {
   }
 
   return (
-    <Dialog open={open} title={label} onClose={onClose}>
+    <Dialog open title={label} onClose={onClose}>
       <View role="status" style={{ minHeight: 60, justifyContent: 'center' }}>
         {text === '' || read.ok ? (
           <View style={{ opacity: text === '' ? 0.45 : 1 }}>

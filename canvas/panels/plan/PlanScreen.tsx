@@ -1,4 +1,4 @@
-import { useEffect, useRef, useState } from 'react';
+import { useEffect, useState } from 'react';
 import { View } from 'react-native';
 import { may } from '../../../model/contracts/common';
 import { setRunLength } from '../../../model/drawing/edits/runLength';
@@ -44,23 +44,21 @@ export function PlanScreen(_props: { siteId?: string }) {
   const [sheet, setSheet] = useState<'details' | 'reasons' | 'building' | null>(null);
   const [tab, setTab] = useState<SideTab>('wall');
   const [dimension, setDimension] = useState<ThingRef | null>(null);
-  const typing = useRef(false);
 
+  // While a run is being drawn, digits are its length.
+  const isTyping = useDraft((state) => state.tool === 'run' && state.preview?.run != null);
   const camera = usePlanCamera();
   const figure = usePlanFigure(camera.camera, camera.size);
   const hand = usePlanHand({
     camera,
     figure,
-    isTyping: () => typing.current,
+    isTyping,
     onDimension(thing) {
       actions.select(thing);
       if (workspace.draft.get().mode === 'edit') setDimension(thing);
     },
   });
   const entry = useRunEntry(hand.context);
-  useEffect(() => {
-    typing.current = entry.drawing;
-  });
   useWithoutNav(editing);
   useEffect(() => () => workspace.draft.setMode('view'), [workspace.draft]);
 

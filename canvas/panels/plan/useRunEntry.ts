@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useState } from 'react';
 import { readLength } from '../../../model/length/read';
 import type { ActionContext } from '../../actions/action';
 import { useDraft } from '../workspace/workspace';
@@ -19,7 +19,13 @@ export function useRunEntry({ tools }: ActionContext): RunEntry {
   const drawing = useDraft((state) => state.tool === 'run' && state.mode === 'edit' && state.preview?.run != null);
   const placed = useDraft((state) => state.drawing.runs.length);
   const [text, setText] = useState('');
-  useEffect(() => setText(''), [placed, drawing]);
+  const now = `${drawing} ${placed}`;
+  const [of, setOf] = useState(now);
+  if (of !== now) {
+    // What was typed belonged to the run before.
+    setOf(now);
+    setText('');
+  }
 
   return {
     drawing,

@@ -1,24 +1,36 @@
-import { useState } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
 import { View } from 'react-native';
 import { drawingOutlines } from '../../../model/drawing/emptyOutline';
 import type { Drawing } from '../../../model/drawing/schema';
 import type { DraftConflict } from '../../store/draftStore';
 import { Button } from '../../ui/Button';
 import { Dialog } from '../../ui/Dialog';
+import { Banner } from '../../ui/States';
 import { radius, space } from '../../ui/tokens';
 import { useTheme } from '../../ui/theme';
 import { Txt } from '../../ui/Txt';
-import { useWords } from '../../ui/words';
+import { say, useWords } from '../../ui/words';
 import { OutlinePicture } from '../sites/OutlinePicture';
+import { clashWords } from './clashWords';
 import { useDraft, useWorkspace } from './workspace';
 
 /** Asks, wherever in the site the person is, which version to go on with when two were saved at once. */
 export function ConflictWatch() {
   const conflicts = useDraft((state) => state.conflicts);
   const { resolve } = useWorkspace();
+  const t = useWords();
   const [put, putOff] = useState<DraftConflict | null>(null);
   const clash = conflicts[0];
-  if (!clash || put?.conflict.theirs === clash.conflict.theirs) return null;
+  if (!clash) return null;
+  if (put?.conflict.theirs === clash.conflict.theirs)
+    return (
+      <Banner
+        icon="warning"
+        tone="caution"
+        text={t('plan.conflict.put')}
+        action={<Button label={t('plan.conflict.resolve')} onPress={() => putOff(null)} />}
+      />
+    );
   return <ConflictDialog clash={clash} onChoose={(choice) => resolve(clash, choice)} onLater={() => putOff(clash)} />;
 }
 
@@ -59,7 +71,30 @@ export function ConflictDialog({ clash, onChoose, onLater }: ConflictDialogProps
           </>
         )}
       </View>
+      {part === 'drawing' ? <Differences theirs={clash.conflict.theirs} mine={clash.conflict.mine} /> : null}
     </Dialog>
+  );
+}
+
+/** More than this is read better after choosing, by comparing. */
+const SHOWN = 8;
+
+function Differences({ theirs, mine }: { theirs: Drawing; mine: Drawing }) {
+  const t = useWords();
+  const changes = useMemo(() => clashWords(theirs, mine, say), [theirs, mine]);
+  if (changes.length === 0) return <Txt tone="soft">{t('plan.conflict.same')}</Txt>;
+  return (
+    <View role="list" style={{ gap: space.xs }}>
+      <Txt weight="semibold">{t('plan.conflict.differs')}</Txt>
+      {changes.slice(0, SHOWN).map(({ about, what }, i) => (
+        <Txt key={i} role="listitem">
+          <Txt weight="medium">{about}</Txt> {what}
+        </Txt>
+      ))}
+      {changes.length > SHOWN ? (
+        <Txt tone="soft">{t('plan.conflict.moreDiffers', { count: changes.length - SHOWN })}</Txt>
+      ) : null}
+    </View>
   );
 }
 
@@ -81,7 +116,7 @@ function Readings({ title, count }: { title: string; count: number }) {
   return <Side title={title} text={t('plan.conflict.readings', { count })} />;
 }
 
-function Side({ title, text, children }: { title: string; text: string; children?: React.ReactNode }) {
+function Side({ title, text, children }: { title: string; text: string; children?: ReactNode }) {
   const { colours, strokes } = useTheme();
   return (
     <View

@@ -8,6 +8,7 @@ import { useSession } from '../../client/session';
 import { useSite } from '../../client/sites';
 import { Failed, Loading } from '../../ui/States';
 import { useWords } from '../../ui/words';
+import { useLatest } from '../../viewport/useLatest';
 import { ConflictWatch } from './ConflictDialog';
 import { recallLocal } from './localDrafts';
 import { openDraft, type OpenDraft } from './openDraft';
@@ -30,13 +31,16 @@ export function DraftProvider({ siteId, children }: { siteId: string; children: 
   const [open, setOpen] = useState<OpenDraft | null>(null);
   const ready = userId !== null && role !== undefined && fetched !== undefined;
 
+  const latest = useLatest({ fetched, siteName: site?.name ?? '' });
+
   useEffect(() => {
     if (!ready) return;
     let opened: OpenDraft | null = null;
     let wanted = true;
     void recallLocal(userId, siteId).then((local) => {
-      if (!wanted) return;
-      opened = openDraft({ client, userId, siteId, siteName: site?.name ?? '', role, fetched, local });
+      const { fetched: newest, siteName: name } = latest();
+      if (!wanted || !newest) return;
+      opened = openDraft({ client, userId, siteId, siteName: name, role, fetched: newest, local });
       setOpen(opened);
     });
     return () => {
@@ -45,7 +49,7 @@ export function DraftProvider({ siteId, children }: { siteId: string; children: 
       setOpen(null);
     };
     // Only who it is and which site decides on opening anew; a newer draft or name is taken over below.
-  }, [client, ready, userId, role, siteId]);
+  }, [client, ready, userId, role, siteId, latest]);
 
   useEffect(() => {
     if (open && fetched)

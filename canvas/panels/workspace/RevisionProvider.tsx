@@ -1,11 +1,11 @@
-import { useEffect, useState, type ReactNode } from 'react';
+import { useEffect, useMemo, type ReactNode } from 'react';
 import { errorWords } from '../../client/errorWords';
 import { useRevision } from '../../client/revisions';
 import { useSite } from '../../client/sites';
 import { Failed, Loading } from '../../ui/States';
 import { useWords } from '../../ui/words';
 import { openRevision } from './openDraft';
-import { WorkspaceContext, type Workspace } from './workspace';
+import { WorkspaceContext } from './workspace';
 
 /** A revision for the screens inside it, through the same hooks as a draft; nothing of it can be changed. */
 export function RevisionProvider(props: { siteId: string; number: number; children: ReactNode }) {
@@ -13,16 +13,9 @@ export function RevisionProvider(props: { siteId: string; number: number; childr
   const t = useWords();
   const siteName = useSite(siteId).data?.name ?? '';
   const { data: revision, error, isError, refetch } = useRevision(siteId, number);
-  const [workspace, setWorkspace] = useState<Workspace | null>(null);
-  useEffect(() => {
-    if (!revision) return;
-    const open = openRevision(siteId, siteName, revision);
-    setWorkspace(open.workspace);
-    return () => {
-      open.stop();
-      setWorkspace(null);
-    };
-  }, [siteId, siteName, revision]);
+  const open = useMemo(() => revision && openRevision(siteId, siteName, revision), [siteId, siteName, revision]);
+  useEffect(() => open?.stop, [open]);
+  const workspace = open?.workspace;
 
   if (workspace?.solver.get().solved) return <WorkspaceContext value={workspace}>{children}</WorkspaceContext>;
   if (isError && !revision)
