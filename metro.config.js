@@ -9,17 +9,18 @@ const config = getDefaultConfig(__dirname);
 config.cacheStores = [new FileStore({ root: path.join(__dirname, 'node_modules/.cache/metro') })];
 
 // What packages bring along and nothing of ours calls, by who asks for it: zod's locales (about 400 kB; people read our own
-// words), its JSON Schemas and its compiler (the content security policy forbids it), and the router's tab bars.
+// words), its JSON Schemas and its compiler (the content security policy forbids it), and the router's tab bars
+// and its page of all routes.
 const standIns = [
   { from: /[\\/]zod[\\/]v4[\\/]/, name: /locales\/index\.c?js$/, file: 'canvas/client/zodEnglish.ts' },
   {
     from: /[\\/]zod[\\/]v4[\\/]/,
-    name: /\/(?:json-schema-processors|json-schema-generator|to-json-schema|from-json-schema|compile|deep-partial)\.c?js$/,
+    name: /\/(?:json-schema-processors|json-schema-generator|to-json-schema|from-json-schema|compile|deep-partial|in-out)\.c?js$/,
     file: 'canvas/client/zodWithout.ts',
   },
   {
-    from: /[\\/]expo-router[\\/]build[\\/](?:exports|views[\\/]ErrorBoundary|views[\\/]Toast)\.js$/,
-    name: /\/(?:layouts\/Tabs|layouts\/experimental-stack|react-navigation\/bottom-tabs)$/,
+    from: /[\\/]expo-router[\\/]build[\\/](?:exports|getRoutes|ExpoRoot|views[\\/]ErrorBoundary|views[\\/]Toast)\.js$/,
+    name: /\/(?:layouts\/Tabs|layouts\/experimental-stack|react-navigation\/bottom-tabs|views\/Sitemap|views\/Unmatched)$/,
     file: 'canvas/client/routerWithout.ts',
   },
 ];

@@ -80,7 +80,8 @@ export function Choice<Value extends string>(props: ChoiceProps<Value>) {
                 },
               } as object)}
               style={({ hovered }: PressState) => ({
-                flex: 1,
+                flexGrow: 1,
+                flexShrink: 1,
                 minHeight: touch,
                 flexDirection: 'row',
                 gap: space.s,

@@ -1,4 +1,4 @@
-import i18next, { type TFunction } from 'i18next';
+import { createInstance, type TFunction } from 'i18next';
 import type { en } from '../../model/words/en';
 import { auth } from '../../model/words/en/auth';
 import { common } from '../../model/words/en/common';
@@ -13,7 +13,9 @@ declare module 'i18next' {
   }
 }
 
-void i18next.init({
+const dictionary = createInstance();
+
+void dictionary.init({
   lng: 'en',
   fallbackLng: 'en',
   initAsync: false,
@@ -25,15 +27,15 @@ void i18next.init({
 
 /** Takes in more of the dictionary, by namespaces at its top: called by the chunk whose screens say them. */
 export function addWords(words: Partial<typeof en>): void {
-  i18next.addResourceBundle('en', 'translation', words, true, true);
+  dictionary.addResourceBundle('en', 'translation', words, true, true);
 }
 
 export type Words = TFunction<'translation'>;
 
 /** Words by key, with keys and figures checked against the dictionary. */
 export function useWords(): Words {
-  return i18next.t;
+  return dictionary.t;
 }
 
 /** For the model's own words functions, which know keys only as strings. */
-export const say: Say = (key, params) => String(i18next.t(key as never, params as never));
+export const say: Say = (key, params) => String(dictionary.t(key as never, params as never));

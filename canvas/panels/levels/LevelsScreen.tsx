@@ -132,7 +132,8 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
       <ProfileView readingId={selected.reading?.id ?? null} height={phone ? 128 : 220} />
     </View>
   );
-  const pad = (
+  // While a station is being added the dialog's keypad alone listens to the keyboard.
+  const pad = adding ? null : (
     <ReadingPad
       key={selected.key}
       entry={selected}

@@ -62,7 +62,7 @@ export function MoreScreen({ siteId }: { siteId: string }) {
         <Section title={t('sites.more.site')}>
           <Rows label={t('sites.more.site')}>
             <View role="listitem">
-              <Row icon="back" title={t('common.nav.allSites')} onPress={() => router.push('/')} />
+              <Row icon="menu" title={t('common.nav.allSites')} onPress={() => router.push('/')} />
             </View>
             {manages ? (
               <>

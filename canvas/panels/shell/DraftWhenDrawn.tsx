@@ -1,8 +1,8 @@
 import { usePathname } from 'expo-router';
 import { useState, type ReactNode } from 'react';
-import { DraftProvider } from './lazyScreens';
+import { DraftProvider } from '../workspace/DraftProvider';
 
-/** Parts of a site that show nothing of the drawing, and so need neither its code nor its draft. */
+/** Parts of a site that show nothing of the drawing, and so need not wait for its draft. */
 const WITHOUT_DRAWING = /^\/sites\/[^/]+\/(crew|more)$/;
 
 /** Opens the draft once a part that draws is first shown, and then keeps it open for the whole visit to the site. */

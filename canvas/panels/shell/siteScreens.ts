@@ -1,5 +1,5 @@
 /**
- * Every screen of a site, behind one door. The bundler puts whatever two lazy chunks share into the page's first load, so the
+ * Every screen of a site and the list's own dialogs, behind one door. The bundler puts whatever two lazy chunks share into the page's first load, so the
  * drawing's packages and the solver stay out of it only while a single chunk, this one, reaches them.
  */
 import './siteWords';
@@ -14,4 +14,6 @@ export { PoleScreen } from '../pole/PoleScreen';
 export { RevisionScreen } from '../revisions/RevisionScreen';
 export { RevisionsScreen } from '../revisions/RevisionsScreen';
 export { TakeoffScreen } from '../takeoff/TakeoffScreen';
-export { DraftProvider } from '../workspace/DraftProvider';
+export { AccountDialog } from '../sites/AccountDialog';
+export { NewSiteDialog } from '../sites/NewSiteDialog';
+export { SiteShell } from './SiteShell';

@@ -1,7 +1,8 @@
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { ScrollView, View } from 'react-native';
 import { errorWords } from '../../client/errorWords';
 import { useOnline } from '../../client/online';
+import { keepPageFiles } from '../../client/pageFiles';
 import { useSites } from '../../client/sites';
 import { Button } from '../../ui/Button';
 import { Header } from '../../ui/Header';
@@ -11,11 +12,12 @@ import { space } from '../../ui/tokens';
 import { useTheme } from '../../ui/theme';
 import { useLayout } from '../../ui/useLayout';
 import { useWords } from '../../ui/words';
+import { AccountDialog, fetchSiteScreens, NewSiteDialog } from '../shell/lazyScreens';
 import { PageTitle } from '../shell/PageTitle';
 import { Paper } from '../shell/Paper';
-import { AccountDialog } from './AccountDialog';
-import { NewSiteDialog } from './NewSiteDialog';
 import { SiteRow } from './SiteRow';
+
+const QUIET_MS = 1500;
 
 /** Every site that the person belongs to, the one changed last first. */
 export function SitesScreen() {
@@ -25,6 +27,13 @@ export function SitesScreen() {
   const { colours, strokes } = useTheme();
   const wide = useLayout().name !== 'phone';
   const [open, setOpen] = useState<'none' | 'new' | 'account'>('none');
+  const listed = sites.data !== undefined;
+  useEffect(() => {
+    if (!listed) return;
+    // Once the list stands and the page is quiet: what opening a site needs, also where there is no signal.
+    const timer = setTimeout(() => keepPageFiles(fetchSiteScreens()), QUIET_MS);
+    return () => clearTimeout(timer);
+  }, [listed]);
   const add = (kind: 'filled' | 'outline') => (
     <Button kind={kind} label={t('sites.add')} onPress={() => setOpen('new')} />
   );
@@ -77,7 +86,7 @@ export function SitesScreen() {
         <Loading />
       )}
       {open === 'new' ? <NewSiteDialog onClose={() => setOpen('none')} /> : null}
-      <AccountDialog open={open === 'account'} onClose={() => setOpen('none')} />
+      {open === 'account' ? <AccountDialog open onClose={() => setOpen('none')} /> : null}
     </Paper>
   );
 }

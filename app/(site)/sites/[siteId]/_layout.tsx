@@ -1,14 +1,11 @@
 import { Slot, useLocalSearchParams } from 'expo-router';
-import { SiteFrame } from '../../../../canvas/panels/shell/SiteFrame';
-import { DraftWhenDrawn } from '../../../../canvas/panels/shell/DraftWhenDrawn';
+import { SiteShell } from '../../../../canvas/panels/shell/lazyScreens';
 
 export default function SiteLayout() {
   const { siteId } = useLocalSearchParams<{ siteId: string }>();
   return (
-    <SiteFrame siteId={siteId}>
-      <DraftWhenDrawn siteId={siteId}>
-        <Slot />
-      </DraftWhenDrawn>
-    </SiteFrame>
+    <SiteShell siteId={siteId}>
+      <Slot />
+    </SiteShell>
   );
 }
