@@ -1,17 +1,17 @@
 /** The box around shapes, and around anything placed beside them. */
-import { roundTicks, ticks } from '../length/ticks';
-import type { PlanPoint, Vec } from '../geometry/point';
+import { ticks } from '../length/ticks';
+import type { Vec } from '../geometry/point';
 import type { Box, LabelScale, Shape, Tape } from './figure';
 import { dimensionQuad, textQuad } from './text';
 
-export interface BoundsMaker {
+interface BoundsMaker {
   add(point: Vec): void;
   addAll(points: readonly Vec[]): void;
   /** The box, grown by `margin`; a box of `margin` around the origin where nothing was added. */
   box(margin: number): Box;
 }
 
-export function makeBounds(): BoundsMaker {
+function makeBounds(): BoundsMaker {
   let left = Infinity;
   let bottom = Infinity;
   let right = -Infinity;
@@ -86,9 +86,4 @@ export function boundsOf(shapes: readonly Shape[], scale: LabelScale, tape: Tape
     }
   }
   return bounds.box(0);
-}
-
-/** The middle of a box. */
-export function middleOf(box: Box): PlanPoint {
-  return { x: roundTicks((box.left + box.right) / 2), y: roundTicks((box.bottom + box.top) / 2) };
 }

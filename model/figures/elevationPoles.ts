@@ -26,7 +26,7 @@ export function polesOfRun(context: ElevationContext): PoleSpan[] {
 }
 
 /** The lift that is shown: the selected course's, or the first. */
-export function shownLift(context: ElevationContext): number {
+function shownLift(context: ElevationContext): number {
   const { selectedCourse } = context.options;
   const course = context.setOut.coursing.courses.find((each) => each.number === selectedCourse);
   return course?.lift ?? 1;

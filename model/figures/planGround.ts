@@ -35,7 +35,7 @@ export function drawGround(context: PlanContext): void {
     shapes.push({ kind: 'polygon', role: 'boundary', thing, points });
     points.forEach((from, i) => {
       const to = points[(i + 1) % points.length];
-      if (to) obstacles.push({ points: [from, to], weight: 2 });
+      if (to) obstacles.push({ points: [from, to], weight: 7 });
     });
   }
   for (const area of drawing.keepClears) {

@@ -9,7 +9,7 @@ import type { PlanContext } from './planContext';
 const LEAST_LEG = 0.85;
 
 /** The section, grown about its heel until it can be seen at this scale. */
-export function readableSection(context: PlanContext, pole: StoryPole): PlanPoint[] {
+function readableSection(context: PlanContext, pole: StoryPole): PlanPoint[] {
   const least = context.options.scale.textHeight.small * LEAST_LEG;
   const grow = Math.max(1, least / Math.max(1, context.drawing.poleKit.leg));
   return pole.section.map((point) => ({

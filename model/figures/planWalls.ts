@@ -5,7 +5,7 @@ import { alongRun, onRun, stripOnRun, withoutGaps } from './onRun';
 import type { PlanContext } from './planContext';
 
 /** Openings of a run as gaps along it. */
-export function gapsOf(context: PlanContext, runId: string): (readonly [number, number])[] {
+function gapsOf(context: PlanContext, runId: string): (readonly [number, number])[] {
   return (context.setOut.walls.openingsByRun.get(runId) ?? []).flatMap((id) => {
     const opening = context.openingById.get(id);
     return opening ? [[opening.at, opening.at + opening.width] as const] : [];

@@ -63,7 +63,7 @@ function walkRound(setOut: SetOut, gap: number): { stretches: Stretch[]; corners
 }
 
 /** How many times taller than long the heights are drawn. */
-export function profileStretch(setOut: SetOut, tall: number): number {
+function profileStretch(setOut: SetOut, tall: number): number {
   return setOut.ground.range > 0 ? tall / setOut.ground.range : 1;
 }
 

@@ -5,7 +5,7 @@ import type { DimensionShape, FigureText, LabelScale, Tape, TextShape, TextSize 
 import { typesetMeasure } from './typeset';
 
 /** A frame stands this far off its letter, as a part of the text's height. */
-export const FRAME_PAD = 0.36;
+const FRAME_PAD = 0.36;
 /** A framed letter is at least as wide as this part of its text's height. */
 const FRAME_LEAST = 1.5;
 

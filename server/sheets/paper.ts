@@ -34,7 +34,7 @@ export function cardPaper(paper: Paper): Paper {
 }
 
 /** One tick (1/640 mm) at full size, in points. */
-export const POINTS_PER_TICK = 72 / 25.4 / 640;
+const POINTS_PER_TICK = 72 / 25.4 / 640;
 
 /** A drawing scale 1:n. */
 export interface DrawingScale {

@@ -2,10 +2,11 @@
 import type { Figure } from '../../model/figures/figure';
 import { planFigure } from '../../model/figures/plan';
 import { BAR_SCALE_HEIGHT, drawBarScale } from './barScale';
-import { paperLabelScale } from './ink';
+import { colours, paperLabelScale } from './ink';
 import { largestThatFits, type Area, type DrawingScale } from './paper';
 import { printFigure } from './paperPrinter';
 import { drawingArea, type Sheet, type SheetSet } from './sheet';
+import { setLine } from './type';
 
 export function widthOnPaper(figure: Figure, scale: DrawingScale): number {
   return (figure.bounds.right - figure.bounds.left) * scale.pointsPerTick;
@@ -69,6 +70,11 @@ export function planSheet(set: SheetSet): Sheet {
       doc.rect(inside.x, inside.y, inside.width, inside.height).clip();
       printFigure(doc, plan, place, set.say);
       doc.restore();
+      setLine(doc, set.say('sheets.runningFrom'), area.x + area.width, area.y + area.height - 4, {
+        size: 7.5,
+        colour: colours.soft,
+        align: 'end',
+      });
       drawBarScale(doc, set.tape, scale, area.x + 8, area.y + area.height - 4, set.say);
     },
   };

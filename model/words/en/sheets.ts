@@ -21,6 +21,7 @@ export const sheets = {
   draft: 'Draft, not issued',
   notIssued: 'not issued',
   scale: 'Scale {{scale}}',
+  runningFrom: 'Jambs are measured along the outside face from each wall’s first letter.',
   barScale: 'Bar scale: measure it before you trust a copy',
   firstMark: 'First mark',
   belowLine: 'below the level line',

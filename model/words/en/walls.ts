@@ -14,10 +14,7 @@ export const walls = {
   beamTop: 'beam top',
   wallTop: 'wall top',
   length: 'Length, outside face',
-  insideLength: 'Length inside',
-  course: 'Course {{number}}',
   courseTop: 'Course {{number}}, top above the high point',
-  noCourse: 'Tap a course to see its height',
   courses: 'Courses',
   unitsInCourse: 'Units in this course',
   closersInCourse: 'Closers in this course',
@@ -32,5 +29,4 @@ export const walls = {
   courseDown: 'Course down',
   noRuns: 'No wall runs yet',
   noRunsHelp: 'Draw the footprint on the plan; its walls show here.',
-  seePole: 'Pole {{letter}}',
 } as const;

@@ -48,7 +48,6 @@ describe('the plan as a figure', () => {
         const clashes = texts.flatMap((a, i) =>
           texts
             .slice(i + 1)
-            // A caution's mark stands in its own triangle; nothing else may touch.
             .filter((b) => sharedArea(a.points, b.points) > 1)
             .map((b) => `${a.what} on ${b.what}`),
         );
