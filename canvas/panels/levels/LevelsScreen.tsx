@@ -9,6 +9,7 @@ import { Header } from '../../ui/Header';
 import { Empty } from '../../ui/States';
 import { space } from '../../ui/tokens';
 import { useTheme } from '../../ui/theme';
+import { Txt } from '../../ui/Txt';
 import { useLayout } from '../../ui/useLayout';
 import { useWords } from '../../ui/words';
 import { PageTitle } from '../shell/PageTitle';
@@ -115,6 +116,13 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
           </Caution>
         </View>
       ) : null}
+      <View style={{ paddingHorizontal: space.l, paddingBottom: space.m, gap: 2 }}>
+        <Txt size="large" weight="semibold" role="heading" level={2}>
+          {t('levels.stations')}
+        </Txt>
+        <Txt tone="soft">{t('levels.how')}</Txt>
+        {editable ? <Txt tone="soft">{t('levels.stationsText')}</Txt> : null}
+      </View>
       <View style={{ borderTopWidth: strokes.hair, borderColor: colours.rule }}>
         <StationList
           entries={entries}

@@ -17,11 +17,7 @@ export const sites = {
   revision: 'Revision {{number}} is current',
   noRevision: 'No revision saved yet',
   draftChanged: 'The draft differs from revision {{number}}',
-  draftOnly: 'Only a draft so far',
-  draftSame: 'The draft is the same',
   changed: 'Changed {{when}}',
-  outline: 'Outline of the walls',
-  noWalls: 'Nothing drawn yet',
 
   newSite: {
     title: 'New site',
@@ -61,8 +57,6 @@ export const sites = {
     revisionSheetsTells: 'Saved {{when}} by {{by}}',
     noRevisions: 'Save a revision first: sheets for the wall are printed from a revision.',
     screen: 'Screen',
-    rules: 'Cautions',
     openPdf: 'Open {{name}} as PDF',
-    setAside: 'Set aside',
   },
 } as const;
