@@ -15,6 +15,9 @@ export function useTapeTyping(typing: TapeTyping | null): void {
     latest.current = typing;
   });
   useEffect(() => {
+    /** Whether what was done last was typing: then Enter takes what was typed, whatever button has the focus. */
+    let typed = false;
+
     function onKey(event: KeyboardEvent): void {
       const now = latest.current;
       const target = event.target instanceof HTMLElement ? event.target : null;
@@ -22,17 +25,31 @@ export function useTapeTyping(typing: TapeTyping | null): void {
       if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey) return;
       const onControl = target?.closest('button,[role=button],[role=radio],a') != null;
       if (event.key === 'Enter') {
-        if (onControl || !now.onEnter || now.value === '') return;
+        if ((onControl && !typed) || !now.onEnter || now.value === '') return;
         now.onEnter();
       } else {
-        if (event.key === ' ' && onControl) return;
+        if (event.key === ' ' && onControl && !typed) return;
         const text = typeTapeKey(now.value, event.key);
         if (text === null || (text === '' && now.value === '')) return;
+        typed = true;
         now.onChange(text);
       }
       event.preventDefault();
+      event.stopPropagation();
     }
-    globalThis.addEventListener?.('keydown', onKey);
-    return () => globalThis.removeEventListener?.('keydown', onKey);
+
+    function onOther(): void {
+      typed = false;
+    }
+
+    // Before the button that has the focus hears of it.
+    globalThis.addEventListener?.('keydown', onKey, { capture: true });
+    globalThis.addEventListener?.('focusin', onOther);
+    globalThis.addEventListener?.('pointerdown', onOther);
+    return () => {
+      globalThis.removeEventListener?.('keydown', onKey, { capture: true });
+      globalThis.removeEventListener?.('focusin', onOther);
+      globalThis.removeEventListener?.('pointerdown', onOther);
+    };
   }, []);
 }

@@ -16,7 +16,7 @@ import { useTapeTyping } from '../keypad/useTapeTyping';
 import { useDraft } from '../workspace/workspace';
 import { ActionButton } from './ActionButton';
 import { AngleDialog } from './AngleDialog';
-import { EDIT_HEIGHT, Ledger, type LedgerProps } from './Ledger';
+import { Ledger, useEditHeight, type LedgerProps } from './Ledger';
 import { ToolRow } from './ToolRow';
 import type { RunEntry } from './useRunEntry';
 
@@ -35,6 +35,7 @@ export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
   const step = useDraft((state) => state.drawing.tapeStep);
   const tool = useDraft((state) => state.tool);
   const [keypad, setKeypad] = useState(false);
+  const height = useEditHeight();
   const shown = keys && keypad && entry.drawing;
   const typing = { value: entry.text, onChange: entry.onChange, onEnter: entry.place };
   useTapeTyping(entry.drawing && !shown ? typing : null);
@@ -46,7 +47,7 @@ export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
       ) : tool === 'select' ? (
         <Ledger {...ledger} />
       ) : (
-        <Txt tone="soft" size="large" style={{ padding: space.l, height: EDIT_HEIGHT }}>
+        <Txt tone="soft" size="large" style={{ padding: space.l, height }}>
           {t(`plan.toolTells.${tool}`)}
         </Txt>
       )}
@@ -111,6 +112,7 @@ interface RunEntryRowProps {
 function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
   const t = useWords();
   const [angles, setAngles] = useState(false);
+  const height = useEditHeight();
   const units = useDraft((state) => state.drawing.units);
   const step = useDraft((state) => state.drawing.tapeStep);
   const run = useDraft((state) => state.preview?.run ?? null);
@@ -123,7 +125,7 @@ function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
         flexDirection: 'row',
         alignItems: 'flex-end',
         gap: space.s,
-        height: EDIT_HEIGHT,
+        height,
         paddingHorizontal: space.l,
         paddingBottom: space.l,
       }}

@@ -12,7 +12,13 @@ import { ThingReasons } from './ThingReasons';
 
 const PHONE_HEIGHT = 196;
 const SIDE_HEIGHT = 150;
-export const EDIT_HEIGHT = 116;
+const PHONE_EDIT_HEIGHT = 116;
+const SIDE_EDIT_HEIGHT = 164;
+
+/** Height of what stands over the commands while drawing: the same for every tool, so that the plan never jumps. */
+export function useEditHeight(): number {
+  return useLayout().name === 'phone' ? PHONE_EDIT_HEIGHT : SIDE_EDIT_HEIGHT;
+}
 
 export interface LedgerProps {
   readonly onDetails: () => void;
@@ -27,7 +33,8 @@ export function Ledger(props: LedgerProps) {
   const selection = useDraft((state) => state.selection);
   const editing = useDraft((state) => state.mode === 'edit');
   // Of one height whatever is selected: the drawing must not jump under the finger.
-  const height = editing ? EDIT_HEIGHT : phone ? PHONE_HEIGHT : SIDE_HEIGHT;
+  const editHeight = useEditHeight();
+  const height = editing ? editHeight : phone ? PHONE_HEIGHT : SIDE_HEIGHT;
   return (
     <ScrollView
       style={{

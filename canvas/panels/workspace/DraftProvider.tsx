@@ -1,8 +1,8 @@
-import { useQueryClient } from '@tanstack/react-query';
+import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { usePathname } from 'expo-router';
 import { useEffect, useMemo, useState, type ReactNode } from 'react';
 import { ApiError } from '../../client/api';
-import { useDraft as useFetchedDraft } from '../../client/drafts';
+import { draftQuery } from '../../client/drafts';
 import { errorWords } from '../../client/errorWords';
 import { useSession } from '../../client/session';
 import { useSite } from '../../client/sites';
@@ -17,6 +17,19 @@ import { WorkspaceContext, type Workspace } from './workspace';
 /** Parts of a site that show nothing of the drawing, and so need not wait for it. */
 const WITHOUT_DRAWING = /^\/sites\/[^/]+\/(crew|more)$/;
 
+/** With a signal too weak for an answer, what the device remembers is opened after this long. */
+const ASK_MOST = 4_000;
+
+/** True once the server has answered for this site, or was waited for long enough. */
+function useAsked(siteId: string, answered: boolean): boolean {
+  const [waitedFor, setWaitedFor] = useState<string | null>(null);
+  useEffect(() => {
+    const timer = setTimeout(() => setWaitedFor(siteId), ASK_MOST);
+    return () => clearTimeout(timer);
+  }, [siteId]);
+  return answered || waitedFor === siteId;
+}
+
 /** Opens the site's draft for every screen inside it, saves it as it changes, and keeps what is unsaved on the device. */
 export function DraftProvider({ siteId, children }: { siteId: string; children: ReactNode }) {
   const t = useWords();
@@ -24,12 +37,14 @@ export function DraftProvider({ siteId, children }: { siteId: string; children: 
   const client = useQueryClient();
   const { session } = useSession();
   const site = useSite(siteId).data;
-  const query = useFetchedDraft(siteId);
+  // What this device remembers may be from before the last save: the server is asked each time a site is opened.
+  const query = useQuery({ ...draftQuery(siteId), refetchOnMount: 'always' });
+  const asked = useAsked(siteId, query.isFetchedAfterMount);
   const fetched = query.data;
   const userId = typeof session === 'object' ? session.in.id : null;
   const role = site?.role;
   const [open, setOpen] = useState<OpenDraft | null>(null);
-  const ready = userId !== null && role !== undefined && fetched !== undefined;
+  const ready = userId !== null && role !== undefined && fetched !== undefined && asked;
 
   const latest = useLatest({ fetched, siteName: site?.name ?? '' });
 
