@@ -102,6 +102,8 @@ function CommandRow({ context }: { context: ActionContext }) {
   );
 }
 
+const KEYPAD_ENTRY_HEIGHT = 92;
+
 interface RunEntryRowProps {
   readonly context: ActionContext;
   readonly entry: RunEntry;
@@ -112,7 +114,9 @@ interface RunEntryRowProps {
 function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
   const t = useWords();
   const [angles, setAngles] = useState(false);
-  const height = useEditHeight();
+  // The keypad takes the room that the drawing would miss most.
+  const usual = useEditHeight();
+  const height = keypad ? KEYPAD_ENTRY_HEIGHT : usual;
   const units = useDraft((state) => state.drawing.units);
   const step = useDraft((state) => state.drawing.tapeStep);
   const run = useDraft((state) => state.preview?.run ?? null);
@@ -127,7 +131,7 @@ function RunEntryRow({ context, entry, keypad, onKeypad }: RunEntryRowProps) {
         gap: space.s,
         height,
         paddingHorizontal: space.l,
-        paddingBottom: space.l,
+        paddingBottom: space.m,
       }}
     >
       {run.length === 0 && entry.text === '' ? (
