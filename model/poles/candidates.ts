@@ -3,7 +3,8 @@ import type { PoleKit } from '../drawing/schema';
 import type { PlanPoint, Vec } from '../geometry/point';
 import { dot, negate } from '../geometry/vec';
 import { ticks, type Ticks } from '../length/ticks';
-import { degreesBetween, stepFrom, turn } from './plane';
+import type { ThingRef } from '../things';
+import { degreesBetween, turn } from './plane';
 import type { Seat } from './seats';
 
 /** Which bearings and reaches are tried. Reaches are in per cent of the fixing height. */
@@ -18,6 +19,16 @@ export const USUAL_CANDIDATES: CandidateOptions = {
   turnMost: 60,
   turnStep: 1,
   reaches: [66, 60, 75, 50, 85, 100],
+};
+
+/**
+ * Tried where the usual ones leave a pole without two braces that keep the angle rule: every bearing on the open side, and
+ * reaches from the steepest that holds to the longest leg of most kits.
+ */
+export const WIDE_CANDIDATES: CandidateOptions = {
+  turnMost: 90,
+  turnStep: 1,
+  reaches: [66, 62, 70, 58, 75, 54, 80, 50, 85, 46, 90, 42, 95, 38, 100, 33, 110, 120, 130, 150],
 };
 
 /** The reach that a brace is best at, in per cent of its fixing height (typical: half the height to the whole of it). */
@@ -38,14 +49,37 @@ interface Ideal {
   readonly alongFace: boolean;
 }
 
+/** A whole-degree bearing that one brace of a pole may take. */
+export interface Heading {
+  readonly runId: string;
+  readonly direction: Vec;
+  /** Which of the brace's ideal bearings it was turned from, and by how many degrees counter-clockwise. */
+  readonly ideal: number;
+  readonly turn: number;
+  readonly alongFace: boolean;
+  /** Cost of the bearing alone. */
+  readonly cost: number;
+}
+
+/** A plan distance that a brace may take, and what it costs. */
+export interface Reach {
+  readonly reach: Ticks;
+  readonly cost: number;
+}
+
+/** A place where one brace can stand. */
 export interface Candidate {
+  /** Place of its heading in the brace's list. */
+  readonly heading: number;
   readonly runId: string;
   readonly foot: PlanPoint;
   readonly direction: Vec;
   readonly reach: Ticks;
   readonly turned: number;
   readonly alongFace: boolean;
-  /** Cost of its bearing and reach; passing over a way comes on top. */
+  /** Ways through that it passes over with head room. */
+  readonly over: readonly ThingRef[];
+  /** Cost of its bearing and reach, and of every way that it passes over. */
   readonly cost: number;
 }
 
@@ -70,8 +104,8 @@ export function legShortBy(kit: PoleKit): Ticks {
   return ticks(Math.ceil(Math.max(steepest, leastLeg) - mostLeg));
 }
 
-/** The reaches to try, each with its cost: the square of its per cents away from the best. */
-function reachesWithin(kit: PoleKit, limits: ReachLimits, options: CandidateOptions): { reach: Ticks; cost: number }[] {
+/** The reaches to try, cheapest first: each costs the square of its per cents away from the best. */
+export function reachesWithin(kit: PoleKit, limits: ReachLimits, options: CandidateOptions): readonly Reach[] {
   const fixing = kit.brace.fixing;
   const found = new Map<number, number>();
   for (const part of options.reaches) {
@@ -81,7 +115,7 @@ function reachesWithin(kit: PoleKit, limits: ReachLimits, options: CandidateOpti
     const off = Math.round((100 * reach) / fixing) - BEST_REACH;
     if (!found.has(reach)) found.set(reach, off * off);
   }
-  return [...found].map(([reach, cost]) => ({ reach: ticks(reach), cost }));
+  return [...found].map(([reach, cost]) => ({ reach: ticks(reach), cost })).sort((a, b) => a.cost - b.cost);
 }
 
 /** For each of the two braces of a seat's pole, the bearings that would suit it best. */
@@ -106,13 +140,18 @@ export function idealsAt(seat: Seat): readonly [readonly Ideal[], readonly Ideal
 
 /** False where a brace would go straight into the walls of its own corner. */
 function isOpen(direction: Vec, seat: Seat): boolean {
-  const [a, b] = seat.faces.map((face) => dot(direction, face.off) > 0);
-  return seat.shape === 'wraps' ? a === true || b === true : a === true && b === true;
+  const a = dot(direction, seat.faces[0].off) > 0;
+  const b = dot(direction, seat.faces[1].off) > 0;
+  return seat.shape === 'wraps' ? a || b : a && b;
 }
+
+/** A direction whose cosine with a face is under this lies more than `NEAR_FACE_DEGREES` off it: no need to ask further. */
+const NEAR_FACE_COSINE = Math.cos(((NEAR_FACE_DEGREES - 0.4) * Math.PI) / 180);
 
 function nearFace(direction: Vec, seat: Seat): number {
   let cost = 0;
   for (const face of seat.faces) {
+    if (dot(direction, face.along) < NEAR_FACE_COSINE) continue;
     const within = NEAR_FACE_DEGREES - Math.round(degreesBetween(direction, face.along));
     if (within > 0) cost += NEAR_FACE * within * within;
   }
@@ -120,67 +159,43 @@ function nearFace(direction: Vec, seat: Seat): number {
 }
 
 /**
- * Each brace straight in line with its wall, at the reach that costs least; null where those lie near a face, so that
- * something turned may cost less.
+ * Every heading of a pole's two braces, cheapest first. The cost is a whole number made only of figures that a translation,
+ * a quarter-turn or a mirroring leaves alone: the turn squared, and what it takes from the room beside the faces.
  */
-export function straightAt(
+export function headingsAt(
+  ideals: readonly (readonly Ideal[])[],
   seat: Seat,
-  at: PlanPoint,
-  kit: PoleKit,
-  limits: ReachLimits,
   options: CandidateOptions,
-): readonly [Candidate, Candidate] | null {
-  const reaches = reachesWithin(kit, limits, options).sort((a, b) => a.cost - b.cost);
-  const best = reaches[0];
-  const [first, second] = idealsAt(seat).map((ideals) => ideals[0]);
-  if (!best || !first || !second) return null;
-  const candidate = (ideal: Ideal): Candidate => ({
-    runId: ideal.runId,
-    foot: stepFrom(at, [ideal.bearing, best.reach]),
-    direction: ideal.bearing,
-    reach: best.reach,
-    turned: 0,
-    alongFace: false,
-    cost: best.cost + nearFace(ideal.bearing, seat),
+): readonly (readonly Heading[])[] {
+  return ideals.map((each) => {
+    const list: Heading[] = [];
+    each.forEach(({ runId, bearing, alongFace }, ideal) => {
+      for (let size = 0; size <= options.turnMost; size += options.turnStep)
+        for (let side = 0; side < (size === 0 ? 1 : 2); side += 1) {
+          const turned = side === 0 ? size : -size;
+          const direction = turn(bearing, turned);
+          if (!isOpen(direction, seat)) continue;
+          const cost = size * size + (alongFace ? ALONG_FACE : 0) + nearFace(direction, seat);
+          list.push({ runId, direction, ideal, turn: turned, alongFace, cost });
+        }
+    });
+    return list.sort((p, q) => p.cost - q.cost);
   });
-  const pair = [candidate(first), candidate(second)] as const;
-  return pair.every((each) => each.cost === best.cost) ? pair : null;
 }
 
 /**
- * Every candidate of a pole's two braces, cheapest first. The cost is a whole number made only of figures that a
- * translation, a quarter-turn or a mirroring leaves alone: the turn squared, the reach's per cents off its best squared,
- * and what it takes from the room beside the faces.
+ * Each brace straight in line with its wall; null where one lies near a face, so that something turned may cost less.
  */
-export function candidatesAt(
+export function straightHeadings(
+  ideals: readonly (readonly Ideal[])[],
   seat: Seat,
-  at: PlanPoint,
-  kit: PoleKit,
-  limits: ReachLimits,
-  options: CandidateOptions,
-): readonly [readonly Candidate[], readonly Candidate[]] {
-  const reaches = reachesWithin(kit, limits, options);
-  const fill = (ideals: readonly Ideal[]): Candidate[] => {
-    const list: Candidate[] = [];
-    for (const ideal of ideals)
-      for (let size = 0; size <= options.turnMost; size += options.turnStep)
-        for (const turned of size === 0 ? [0] : [size, -size]) {
-          const direction = turn(ideal.bearing, turned);
-          if (!isOpen(direction, seat)) continue;
-          const base = turned * turned + (ideal.alongFace ? ALONG_FACE : 0) + nearFace(direction, seat);
-          for (const { reach, cost } of reaches)
-            list.push({
-              runId: ideal.runId,
-              foot: stepFrom(at, [direction, reach]),
-              direction,
-              reach,
-              turned: Math.abs(turned),
-              alongFace: ideal.alongFace,
-              cost: base + cost,
-            });
-        }
-    return list.sort((p, q) => p.cost - q.cost);
+): readonly [Heading, Heading] | null {
+  const [first, second] = ideals.map((each) => each[0]);
+  if (!first || !second) return null;
+  const heading = ({ runId, bearing, alongFace }: Ideal): Heading => {
+    const cost = nearFace(bearing, seat) + (alongFace ? ALONG_FACE : 0);
+    return { runId, direction: bearing, ideal: 0, turn: 0, alongFace, cost };
   };
-  const [first, second] = idealsAt(seat);
-  return [fill(first), fill(second)];
+  const pair = [heading(first), heading(second)] as const;
+  return pair.every((each) => each.cost === 0) ? pair : null;
 }

@@ -1,16 +1,16 @@
 /** Why a brace had to turn, and why a pole can't be braced: the obstacle, and what would free it. */
 import type { Door, Drawing } from '../drawing/schema';
 import { boxAround } from '../geometry/box';
-import type { Vec } from '../geometry/point';
+import type { PlanPoint, Vec } from '../geometry/point';
 import { negate } from '../geometry/vec';
 import { roundTicks, ticks } from '../length/ticks';
 import type { Reason } from '../reasons';
 import type { ThingRef } from '../things';
 import type { Walls } from '../walls/types';
-import { idealsAt, reachLimits, type Candidate, type CandidateOptions } from './candidates';
+import { headingsAt, idealsAt, reachesWithin, reachLimits, type Candidate, type CandidateOptions } from './candidates';
 import { tryBrace } from './clearance';
 import { groundOf, swingOf, type Ground, type Obstacle } from './obstacles';
-import { cheapestPair, poleBraces, type PoleSite } from './pairs';
+import { PoleBraces, type PoleSite } from './poleBraces';
 import { stepFrom } from './plane';
 import { standAt } from './section';
 
@@ -46,11 +46,18 @@ const SET_OFF_LEGS = [1, 2, 4, 6, 8];
 /** A reason names this many obstacles at most. */
 const NAMED_MOST = 6;
 
+function feetOf(site: PoleSite): PlanPoint[] {
+  const reaches = reachesWithin(site.kit, site.reach, site.options);
+  return headingsAt(idealsAt(site.seat), site.seat, site.options)
+    .flat()
+    .flatMap(({ direction }) => reaches.map(({ reach }) => stepFrom(site.at, [direction, reach])));
+}
+
 type Change = NonNullable<Reason['change']>;
 
 function canBrace(site: PoleSite, obstacles: readonly Obstacle[], ground: Ground): boolean {
   const local = groundOf(obstacles, ground.boundary);
-  return cheapestPair(poleBraces(site, local)) !== null;
+  return new PoleBraces(site, local).own() !== null;
 }
 
 function doorChange(
@@ -133,8 +140,8 @@ export function whyBlocked(drawing: Drawing, walls: Walls, site: PoleSite, groun
     const key = `${thing.kind} ${thing.id}`;
     counts.set(key, { thing, count: (counts.get(key)?.count ?? 0) + 1 });
   };
-  for (const candidate of poleBraces(coarse, ground).lists().flat()) {
-    const tried = tryBrace({ from: site.at, foot: candidate.foot }, site.poleId, site.kit, ground, true);
+  for (const foot of feetOf(coarse)) {
+    const tried = tryBrace({ from: site.at, foot }, site.poleId, site.kit, ground, true);
     if (tried.free) continue;
     for (const obstacle of tried.refusedBy) note(obstacle.thing);
     if (tried.boundary) note({ kind: 'boundary', id: 'boundary' });

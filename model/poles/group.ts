@@ -2,7 +2,8 @@
 import { distance } from '../geometry/vec';
 import type { Candidate } from './candidates';
 import { bracesConflict, type BraceLine } from './clearance';
-import { bestWith, cheapestPair, pairsWith, type Pair, type PoleBraces, type Ranked } from './pairs';
+import { cheapestPair, pairOf, pairWith, rankedBy, rankedWith, type Ranked } from './pairs';
+import type { Pair, PoleBraces } from './poleBraces';
 
 /**
  * When each of a pole's two braces first met another pole's, counted in rounds; null where it never did. Only braces that
@@ -38,13 +39,15 @@ export interface Solved {
   readonly pairs: ReadonlyMap<number, Pair>;
   /** Total, with `UNBRACED` for each pole left without a pair. */
   readonly cost: number;
+  /** What any placing costs at least; the cost itself where it is exact. */
+  readonly lower: number;
   /** False where the bound was reached. */
   readonly exact: boolean;
   readonly spent: number;
 }
 
 /** Dearer than any pair: a pole is left without braces only where the others leave it no way at all. */
-const UNBRACED = 1_000_000;
+export const UNBRACED = 1_000_000;
 /** Slack over the lower bound within which a group is first searched; it grows until an answer lies within it. */
 const FIRST_SLACK = 16;
 const SLACK_GROWS = 2;
@@ -56,22 +59,16 @@ interface Choice {
   readonly member: Member;
   readonly which: 0 | 1;
   readonly part: number;
+  /** Place of its member among all. */
+  readonly of: number;
   /** Where among the choices the member's other brace is chosen, when it is chosen before this one. */
   readonly after: number | null;
-  /** Each candidate that may serve, with the best pair it can be part of, cheapest first. */
+  /** Earlier choices whose braces can come near this one's. */
+  readonly rivals: readonly number[];
+  /** Each candidate that may serve, with the least that a pair with it costs, cheapest first. */
   readonly ranked: readonly Ranked[];
   /** The same, given where the member's other brace is: cheapest pair with it first. */
   readonly beside: (first: Candidate) => readonly Ranked[];
-}
-
-function rank(member: Member, which: 0 | 1, most: number, spend: Spend): Ranked[] {
-  const found: Ranked[] = [];
-  for (const candidate of member.pole.lists()[which]) {
-    if (candidate.cost > most || !spend()) break;
-    const pair = bestWith(member.pole, candidate, which, most);
-    if (pair) found.push({ candidate, pair });
-  }
-  return found.sort((a, b) => a.pair.cost - b.pair.cost);
 }
 
 /** Partners of each first candidate, listed once when first asked for. */
@@ -79,16 +76,18 @@ function partners(member: Member, which: 0 | 1, most: number): Choice['beside'] 
   const known = new Map<Candidate, readonly Ranked[]>();
   return (first) => {
     let list = known.get(first);
-    if (!list) known.set(first, (list = pairsWith(member.pole, first, which, most)));
+    if (!list) known.set(first, (list = rankedWith(member.pole, first, which, most)));
     return list;
   };
 }
 
 /** The relevant braces in the order in which they met, so that those in each other's way are chosen one after another. */
-function choicesOf(parts: readonly Part[], slack: number, spend: Spend): Choice[] {
-  const wanted = parts.flatMap(({ members, lower }, part) =>
-    members.flatMap((member) => {
-      const most = Math.min(UNBRACED - 1, slack + lower - (ownSum(members) - member.own.cost));
+function choicesOf(parts: readonly Part[], slack: number, clearance: number, spend: Spend): Choice[] {
+  const members = parts.flatMap((part) => part.members);
+  const place = new Map(members.map((member, i) => [member, i]));
+  const wanted = parts.flatMap(({ members: own, lower }, part) =>
+    own.flatMap((member) => {
+      const most = Math.min(UNBRACED - 1, slack + lower - (ownSum(own) - member.own.cost));
       return ([0, 1] as const).flatMap((which) => {
         const round = member.relevant[which];
         return round === null ? [] : [{ member, which, part, most, round }];
@@ -97,43 +96,39 @@ function choicesOf(parts: readonly Part[], slack: number, spend: Spend): Choice[
   );
   wanted.sort((a, b) => a.round - b.round);
   const firsts = new Map<Member, number>();
-  return wanted.map(({ member, which, part, most }, i) => {
+  const longest = (pole: PoleBraces) => pole.longestReach + 1;
+  const choices: Choice[] = [];
+  wanted.forEach(({ member, which, part, most }, i) => {
     const after = firsts.get(member) ?? null;
     if (after === null) firsts.set(member, i);
-    const ranked = rank(member, which, most, spend);
-    return { member, which, part, after, ranked, beside: partners(member, which, most) };
+    const ranked = rankedBy(member.pole, which, most);
+    for (let n = 0; n < ranked.length && spend(); n += 1);
+    const rivals = choices.flatMap((other, n) => {
+      if (other.member === member) return [];
+      const room = longest(member.pole) + longest(other.member.pole) + clearance;
+      return distance(member.pole.at, other.member.pole.at) <= room ? [n] : [];
+    });
+    const beside = partners(member, which, most);
+    choices.push({ member, which, part, of: place.get(member) ?? 0, after, rivals, ranked, beside });
   });
+  return choices;
 }
 
 function ownSum(members: readonly Member[]): number {
   return members.reduce((sum, member) => sum + member.own.cost, 0);
 }
 
-/** Whether two candidates conflict, worked out once for each two. */
-function conflictTable(clearance: number): (a: Member, p: Candidate, b: Member, q: Candidate) => boolean {
-  const known = new Map<Candidate, Map<Candidate, boolean>>();
-  return (a, p, b, q) => {
-    let row = known.get(p);
-    if (!row) known.set(p, (row = new Map()));
-    let answer = row.get(q);
-    if (answer === undefined) {
-      answer = bracesConflict({ from: a.pole.at, foot: p.foot }, { from: b.pole.at, foot: q.foot }, clearance);
-      row.set(q, answer);
-    }
-    return answer;
-  };
-}
-
 interface Best {
   cost: number;
-  pairs: ReadonlyMap<Member, Pair | null> | null;
+  /** What was chosen for each choice; null where its pole goes unbraced. */
+  chosen: readonly (Candidate | null)[] | null;
 }
 
 interface Descent {
   readonly parts: readonly Part[];
   readonly choices: readonly Choice[];
+  readonly clearance: number;
   readonly mayLeave: boolean;
-  readonly conflict: ReturnType<typeof conflictTable>;
   readonly spend: Spend;
 }
 
@@ -141,57 +136,59 @@ interface Descent {
  * Depth first, one brace at a time. A branch ends when the least that its whole placing can cost reaches the best found:
  * each pole costs at least the best pair that keeps what is chosen of it, and each part at least its lower bound.
  */
-function descend({ parts, choices, mayLeave, conflict, spend }: Descent, best: Best): void {
+function descend({ parts, choices, clearance, mayLeave, spend }: Descent, best: Best): void {
   const sums = parts.map(({ members }) => ownSum(members));
-  const pairs = new Map<Member, Pair | null>(
-    parts.flatMap(({ members }) => members.map((member) => [member, member.own])),
-  );
-  const chosen: (Candidate | null)[] = [];
-  const total = (part: number, change: number): number =>
-    parts.reduce((sum, { lower }, p) => sum + Math.max(lower, (sums[p] ?? 0) + (p === part ? change : 0)), 0);
-  const costOf = (pair: Pair | null | undefined) => (pair ? pair.cost : UNBRACED);
-  const isClear = (depth: number, choice: Choice, candidate: Candidate): boolean =>
-    chosen.every((other, n) => {
-      const earlier = choices[n];
-      return (
-        !other ||
-        !earlier ||
-        n >= depth ||
-        earlier.member === choice.member ||
-        !conflict(earlier.member, other, choice.member, candidate)
-      );
-    });
-  const take = (depth: number, choice: Choice, candidate: Candidate | null, pair: Pair | null): void => {
-    const before = pairs.get(choice.member) ?? null;
-    const change = costOf(pair) - costOf(before);
-    sums[choice.part] = (sums[choice.part] ?? 0) + change;
-    pairs.set(choice.member, pair);
+  const lowers = parts.map(({ lower }) => lower);
+  const costs = parts.flatMap(({ members }) => members.map((member) => member.own.cost));
+  const chosen: (Candidate | null)[] = choices.map(() => null);
+  let floor = sums.reduce((sum, own, p) => sum + Math.max(own, lowers[p] ?? 0), 0);
+  /** What the whole costs at least when the sum of one part changes. */
+  const withChange = (part: number, change: number): number => {
+    const [sum, lower] = [sums[part] ?? 0, lowers[part] ?? 0];
+    return floor - Math.max(lower, sum) + Math.max(lower, sum + change);
+  };
+  const isClear = (choice: Choice, candidate: Candidate): boolean => {
+    const line = { from: choice.member.pole.at, foot: candidate.foot };
+    for (const n of choice.rivals) {
+      const other = chosen[n];
+      const from = choices[n]?.member.pole.at;
+      if (other && from && bracesConflict({ from, foot: other.foot }, line, clearance)) return false;
+    }
+    return true;
+  };
+  const take = (depth: number, choice: Choice, candidate: Candidate | null, cost: number): void => {
+    const before = costs[choice.of] ?? 0;
+    const floorBefore = floor;
+    const sumBefore = sums[choice.part] ?? 0;
+    floor = withChange(choice.part, cost - before);
+    sums[choice.part] = sumBefore + cost - before;
+    costs[choice.of] = cost;
     chosen[depth] = candidate;
     step(depth + 1);
-    chosen.length = depth;
-    pairs.set(choice.member, before);
-    sums[choice.part] = (sums[choice.part] ?? 0) - change;
+    chosen[depth] = null;
+    costs[choice.of] = before;
+    sums[choice.part] = sumBefore;
+    floor = floorBefore;
   };
   const step = (depth: number): void => {
     const choice = choices[depth];
     if (!choice) {
-      const cost = total(-1, 0);
-      if (cost < best.cost) {
-        best.cost = cost;
-        best.pairs = new Map(pairs);
+      if (floor < best.cost) {
+        best.cost = floor;
+        best.chosen = [...chosen];
       }
       return;
     }
-    const held = pairs.get(choice.member) ?? null;
-    if (choice.after !== null && !held) return take(depth, choice, null, null);
+    const held = costs[choice.of] ?? 0;
     const first = choice.after === null ? null : (chosen[choice.after] ?? null);
-    for (const { candidate, pair } of first ? choice.beside(first) : choice.ranked) {
-      if (total(choice.part, pair.cost - costOf(held)) >= best.cost) break;
+    if (choice.after !== null && !first) return take(depth, choice, null, held);
+    for (const { candidate, cost } of first ? choice.beside(first) : choice.ranked) {
+      if (withChange(choice.part, cost - held) >= best.cost) break;
       if (!spend()) return;
-      if (isClear(depth, choice, candidate)) take(depth, choice, candidate, pair);
+      if (isClear(choice, candidate)) take(depth, choice, candidate, cost);
     }
-    if (mayLeave && choice.after === null && total(choice.part, UNBRACED - costOf(held)) < best.cost)
-      take(depth, choice, null, null);
+    if (mayLeave && choice.after === null && withChange(choice.part, UNBRACED - held) < best.cost)
+      take(depth, choice, null, UNBRACED);
   };
   step(0);
 }
@@ -204,28 +201,47 @@ function descend({ parts, choices, mayLeave, conflict, spend }: Descent, best: B
  */
 export function solveGroup(parts: readonly Part[], clearance: number, bound: SearchBound): Solved {
   const floor = parts.reduce((sum, part) => sum + part.lower, 0);
-  const conflict = conflictTable(clearance);
   let spent = 0;
   const spend = () => (spent += 1) <= bound.most;
   for (let slack = FIRST_SLACK; ; slack *= SLACK_GROWS) {
     const mayLeave = slack >= UNBRACED || floor >= UNBRACED;
-    const choices = choicesOf(parts, mayLeave ? UNBRACED : slack, spend);
-    const best: Best = { cost: mayLeave ? Infinity : floor + slack + 1, pairs: null };
-    descend({ parts, choices, mayLeave, conflict, spend }, best);
+    const choices = choicesOf(parts, mayLeave ? UNBRACED : slack, clearance, spend);
+    const best: Best = { cost: mayLeave ? Infinity : floor + slack + 1, chosen: null };
+    descend({ parts, choices, clearance, mayLeave, spend }, best);
     const exact = spent <= bound.most;
-    if (best.pairs) return solved(best.pairs, best.cost, exact, spent);
-    if (!exact || mayLeave) return settle(parts, clearance, spent);
+    // Everything within the slack before this one was looked at.
+    const lower = exact ? best.cost : floor + (slack === FIRST_SLACK ? 0 : slack / SLACK_GROWS + 1);
+    if (best.chosen) return solved(parts, choices, best.chosen, best.cost, Math.min(lower, best.cost), exact, spent);
+    if (!exact || mayLeave) return settle(parts, clearance, lower, spent);
   }
 }
 
-function solved(pairs: ReadonlyMap<Member, Pair | null>, cost: number, exact: boolean, spent: number): Solved {
-  const byIndex = new Map<number, Pair>();
-  for (const [member, pair] of pairs) if (pair) byIndex.set(member.index, pair);
-  return { pairs: byIndex, cost, exact, spent };
+function solved(
+  parts: readonly Part[],
+  choices: readonly Choice[],
+  chosen: readonly (Candidate | null)[],
+  cost: number,
+  lower: number,
+  exact: boolean,
+  spent: number,
+): Solved {
+  const pairs = new Map<number, Pair>();
+  for (const { members } of parts) for (const member of members) pairs.set(member.index, member.own);
+  choices.forEach(({ member, which, after }, i) => {
+    const candidate = chosen[i];
+    const first = after === null ? null : chosen[after];
+    if (!candidate) pairs.delete(member.index);
+    else if (first) pairs.set(member.index, pairOf(member.pole, which === 0 ? [candidate, first] : [first, candidate]));
+    else {
+      const pair = pairWith(member.pole, candidate, which);
+      if (pair) pairs.set(member.index, pair);
+    }
+  });
+  return { pairs, cost, lower, exact, spent };
 }
 
 /** One pole after another, each with the cheapest pair that keeps clear of those already placed. */
-function settle(parts: readonly Part[], clearance: number, spent: number): Solved {
+function settle(parts: readonly Part[], clearance: number, lower: number, spent: number): Solved {
   const members = parts.flatMap((part) => part.members);
   const found = placeInTurn(
     members.map((member) => member.pole),
@@ -239,7 +255,7 @@ function settle(parts: readonly Part[], clearance: number, spent: number): Solve
     cost += pair ? pair.cost : UNBRACED;
     if (pair) pairs.set(member.index, pair);
   });
-  return { pairs, cost, exact: false, spent };
+  return { pairs, cost, lower: Math.min(lower, cost), exact: false, spent };
 }
 
 /** Pairs for poles in turn, each the cheapest that keeps clear of `fixed` and of those before it; null where none does. */
@@ -250,15 +266,13 @@ export function placeInTurn(
 ): readonly (Pair | null)[] {
   const placed = [...fixed];
   return poles.map((pole) => {
-    const longest = pole.lists().reduce((most, list) => Math.max(most, ...list.map((each) => each.reach)), 0);
-    const near = placed.filter(
-      ({ from, foot }) => distance(from, pole.at) <= distance(from, foot) + longest + clearance + 1,
-    );
-    const over = (candidate: Candidate) => {
+    const room = pole.longestReach + clearance + 1;
+    const near = placed.filter(({ from, foot }) => distance(from, pole.at) <= distance(from, foot) + room);
+    const refuse = (candidate: Candidate) => {
       const line = { from: pole.at, foot: candidate.foot };
-      return near.some((other) => bracesConflict(line, other, clearance)) ? null : pole.over(candidate);
+      return near.some((other) => bracesConflict(line, other, clearance));
     };
-    const pair = cheapestPair({ ...pole, over });
+    const pair = cheapestPair(pole, near.length > 0 ? refuse : undefined);
     if (pair) placed.push(...pair.braces.map((brace) => ({ from: pole.at, foot: brace.foot })));
     return pair;
   });

@@ -12,13 +12,34 @@ export interface Obstacle {
   readonly kind: 'wall' | 'frame' | 'way' | 'swing' | 'keepClear' | 'pole';
   readonly thing: ThingRef;
   readonly ring: readonly PlanPoint[];
+  /** What a brace has to keep out of: the ring, and for a way through the working clearance round it. */
+  readonly keep: readonly PlanPoint[];
+  /** Box of `keep`. */
   readonly box: Box;
+  /** `keep` as x, y, x, y …, its first point once more at the end. */
+  readonly flat: Float64Array;
 }
 
 const EMPTY: Box = { minX: 0, minY: 0, maxX: 0, maxY: 0 };
 
-export function obstacleOf(kind: Obstacle['kind'], thing: ThingRef, ring: readonly PlanPoint[]): Obstacle {
-  return { kind, thing, ring, box: boxOf(ring) ?? EMPTY };
+/** A ring as x, y, x, y …, its first point once more at the end. */
+export function flatOf(ring: readonly PlanPoint[]): Float64Array {
+  const flat = new Float64Array(2 * (ring.length + 1));
+  for (let i = 0; i <= ring.length; i += 1) {
+    const point = ring[i % ring.length];
+    flat[2 * i] = point?.x ?? 0;
+    flat[2 * i + 1] = point?.y ?? 0;
+  }
+  return flat;
+}
+
+export function obstacleOf(
+  kind: Obstacle['kind'],
+  thing: ThingRef,
+  ring: readonly PlanPoint[],
+  keep: readonly PlanPoint[] = ring,
+): Obstacle {
+  return { kind, thing, ring, keep, box: boxOf(keep) ?? EMPTY, flat: flatOf(keep) };
 }
 
 const openingRef = (opening: Opening): ThingRef => ({ kind: 'opening', id: opening.id });
@@ -40,12 +61,18 @@ export function frameOf(run: RunGeometry, opening: Opening): Obstacle {
   return obstacleOf('frame', openingRef(opening), strip(run, opening.at, opening.at + opening.width, 0, 0));
 }
 
-/** The room to keep free on both sides of a way through, centred on its opening. */
-export function wayOf(run: RunGeometry, opening: Opening & { readonly way: WayThrough }): Obstacle | null {
+/** The room to keep free on both sides of a way through, centred on its opening; braces keep `clearance` off it. */
+export function wayOf(
+  run: RunGeometry,
+  opening: Opening & { readonly way: WayThrough },
+  clearance: number,
+): Obstacle | null {
   const { used, width, depth } = opening.way;
   if (!used || width === 0) return null;
   const middle = opening.at + opening.width / 2;
-  return obstacleOf('way', openingRef(opening), strip(run, middle - width / 2, middle + width / 2, depth, depth));
+  const wide = (off: number) =>
+    strip(run, middle - width / 2 - off, middle + width / 2 + off, depth + off, depth + off);
+  return obstacleOf('way', openingRef(opening), wide(0), wide(clearance));
 }
 
 /** Degrees between the points drawn on a swing's arc; a multiple of them is a quarter-turn. */
@@ -71,10 +98,10 @@ export function swingOf(run: RunGeometry, door: Door): Obstacle | null {
   return obstacleOf('swing', openingRef(door), ring);
 }
 
-function ofOpening(run: RunGeometry, opening: Opening): Obstacle[] {
+function ofOpening(run: RunGeometry, opening: Opening, clearance: number): Obstacle[] {
   const found = [frameOf(run, opening)];
   if (opening.kind !== 'window') {
-    const way = wayOf(run, opening);
+    const way = wayOf(run, opening, clearance);
     if (way) found.push(way);
   }
   const swing = opening.kind === 'door' ? swingOf(run, opening) : null;
@@ -91,7 +118,7 @@ export function obstaclesOf(drawing: Drawing, walls: Walls): Obstacle[] {
   for (const run of walls.runs)
     for (const id of walls.openingsByRun.get(run.runId) ?? []) {
       const opening = openings.get(id);
-      if (opening) found.push(...ofOpening(run, opening));
+      if (opening) found.push(...ofOpening(run, opening, drawing.poleKit.clearance));
     }
   for (const area of drawing.keepClears)
     found.push(obstacleOf('keepClear', { kind: 'keepClear', id: area.id }, area.points));

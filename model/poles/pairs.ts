@@ -1,165 +1,89 @@
 /** The pairs of braces that one pole may have, found in order of their cost. */
-import type { PoleKit } from '../drawing/schema';
-import type { PlanPoint } from '../geometry/point';
-import type { ThingRef } from '../things';
-import {
-  candidatesAt,
-  OVER_WAY,
-  straightAt,
-  type Candidate,
-  type CandidateOptions,
-  type ReachLimits,
-} from './candidates';
-import { tryBrace } from './clearance';
-import type { Ground } from './obstacles';
-import { degreesBetween } from './plane';
-import type { Seat } from './seats';
-
-export interface Pair {
-  readonly cost: number;
-  readonly braces: readonly [Candidate, Candidate];
-}
-
-export interface AngleLimits {
-  /** Least and most angle between the two braces in plan, in degrees. */
-  readonly least: number;
-  readonly most: number;
-}
-
-/** A right angle is best; the square of the degrees away from it counts. */
-const BEST_ANGLE = 90;
-/** Angles come from whole degrees of turn: what floating point adds must not refuse one on the limit. */
-const ANGLE_SLACK = 1e-6;
-
-function angleCost(a: Candidate, b: Candidate, limits: AngleLimits): number | null {
-  const angle = degreesBetween(a.direction, b.direction);
-  if (angle < limits.least - ANGLE_SLACK || angle > limits.most + ANGLE_SLACK) return null;
-  const off = Math.round(angle) - BEST_ANGLE;
-  return off * off;
-}
-
-export type CandidateLists = readonly [readonly Candidate[], readonly Candidate[]];
-
-/** The two braces of one pole: candidates listed, and tried against the ground, when first asked for. */
-export interface PoleBraces {
-  readonly poleId: string;
-  readonly at: PlanPoint;
-  /** Straight in line with each wall at the best reach: the least that any pair can cost before its angle. */
-  readonly straight: readonly [Candidate, Candidate] | null;
-  readonly lists: () => CandidateLists;
-  /** Ways that a candidate passes over; null where it can't stand. */
-  readonly over: (candidate: Candidate) => readonly ThingRef[] | null;
-  readonly limits: AngleLimits;
-}
-
-export interface PoleSite {
-  readonly poleId: string;
-  readonly seat: Seat;
-  readonly at: PlanPoint;
-  readonly kit: PoleKit;
-  readonly reach: ReachLimits;
-  readonly limits: AngleLimits;
-  readonly options: CandidateOptions;
-}
-
-export function poleBraces(site: PoleSite, ground: Ground): PoleBraces {
-  const { poleId, seat, at, kit, reach, limits, options } = site;
-  let listed: CandidateLists | null = null;
-  const lists = () => (listed ??= candidatesAt(seat, at, kit, reach, options));
-  const known = new Map<Candidate, readonly ThingRef[] | null>();
-  const over = (candidate: Candidate) => {
-    const found = known.get(candidate);
-    if (found !== undefined) return found;
-    const tried = tryBrace({ from: at, foot: candidate.foot }, poleId, kit, ground);
-    const answer = tried.free ? tried.over : null;
-    known.set(candidate, answer);
-    return answer;
-  };
-  return { poleId, at, straight: straightAt(seat, at, kit, reach, options), lists, over, limits };
-}
-
-function fullCost(braces: PoleBraces, candidate: Candidate): number | null {
-  const over = braces.over(candidate);
-  return over === null ? null : candidate.cost + OVER_WAY * over.length;
-}
-
-/** Both braces straight and square to one another, where nothing is in their way: no pair can cost less. */
-function straightPair(braces: PoleBraces): Pair | null {
-  if (!braces.straight) return null;
-  const [a, b] = braces.straight;
-  if (angleCost(a, b, braces.limits) !== 0) return null;
-  const free = [a, b].every((candidate) => braces.over(candidate)?.length === 0);
-  return free ? { cost: a.cost + b.cost, braces: [a, b] } : null;
-}
+import type { Candidate, Heading } from './candidates';
+import type { Pair, PoleBraces } from './poleBraces';
 
 /**
- * The cheapest pair, or null. Both lists are in order of cost and no pair costs less than its two candidates, so the
- * search ends as soon as they alone reach the best found. Most poles end at the very first pair.
+ * The cheapest pair, or null; `refuse` takes candidates out. Headings are in order of cost and no pair costs less than its
+ * two headings at the best reach, so the search ends as soon as they alone reach the best found, and only what may still
+ * be part of the best is tried against the ground. Most poles end at the very first pair.
  */
-export function cheapestPair(braces: PoleBraces): Pair | null {
-  const quick = straightPair(braces);
-  if (quick) return quick;
-  const [first, second] = braces.lists();
-  const leastSecond = second[0]?.cost ?? Infinity;
+export function cheapestPair(braces: PoleBraces, refuse?: (candidate: Candidate) => boolean): Pair | null {
+  const quick = braces.straightPair();
+  if (quick && !(refuse && quick.braces.some(refuse))) return quick;
+  const first = braces.headings(0);
+  const second = braces.headings(1);
+  const reach = braces.leastReachCost;
+  const leastSecond = (second[0]?.cost ?? Infinity) + reach;
+  const known: (Candidate | null | undefined)[] = [];
+  const bestSecond = (j: number) => (known[j] === undefined ? (known[j] = braces.best(1, j, refuse)) : known[j]);
   let best: Pair | null = null;
-  for (const a of first) {
-    if (best && a.cost + leastSecond >= best.cost) break;
-    const costA = fullCost(braces, a);
-    if (costA === null) continue;
-    if (!best && !second.some((b) => braces.over(b) !== null)) return null;
-    for (const b of second) {
-      if (best && costA + b.cost >= best.cost) break;
-      const angle = angleCost(a, b, braces.limits);
-      if (angle === null || (best && costA + b.cost + angle >= best.cost)) continue;
-      const costB = fullCost(braces, b);
-      if (costB === null) continue;
-      const cost = costA + costB + angle;
-      if (!best || cost < best.cost) best = { cost, braces: [a, b] };
+  let least = Infinity;
+  for (let i = 0; i < first.length; i += 1) {
+    const a = first[i] as Heading;
+    if (a.cost + reach + leastSecond >= least) break;
+    const candidateA = braces.best(0, i, refuse);
+    if (!candidateA) continue;
+    for (let j = 0; j < second.length; j += 1) {
+      const b = second[j] as Heading;
+      const floor = candidateA.cost + b.cost + reach;
+      if (floor >= least) break;
+      const angle = braces.angleCost(a, b);
+      if (floor + angle >= least) continue;
+      const candidateB = bestSecond(j);
+      if (!candidateB) continue;
+      const cost = candidateA.cost + candidateB.cost + angle;
+      if (cost >= least) continue;
+      least = cost;
+      best = { cost, braces: [candidateA, candidateB] };
     }
   }
   return best;
 }
 
-/** A candidate and the pair that it makes. */
+/** A candidate and the least that a pair with it costs. */
 export interface Ranked {
   readonly candidate: Candidate;
-  readonly pair: Pair;
+  readonly cost: number;
 }
 
-/** Every pair that `first` makes with a candidate for brace `which`, of those that cost no more than `most`, cheapest first. */
-export function pairsWith(braces: PoleBraces, first: Candidate, which: 0 | 1, most: number): readonly Ranked[] {
-  const costFirst = fullCost(braces, first);
-  if (costFirst === null) return [];
+/** Every candidate for brace `which` that a pair of at most `most` can have, with what that pair costs, cheapest first. */
+export function rankedBy(braces: PoleBraces, which: 0 | 1, most: number): readonly Ranked[] {
   const found: Ranked[] = [];
-  for (const candidate of braces.lists()[which]) {
-    if (costFirst + candidate.cost > most) break;
-    const angle = angleCost(first, candidate, braces.limits);
-    if (angle === null || costFirst + candidate.cost + angle > most) continue;
-    const costSecond = fullCost(braces, candidate);
-    if (costSecond === null || costFirst + costSecond + angle > most) continue;
-    const pair: Pair = {
-      cost: costFirst + costSecond + angle,
-      braces: which === 0 ? [candidate, first] : [first, candidate],
-    };
-    found.push({ candidate, pair });
+  for (const candidate of braces.upTo(which, most)) {
+    if (candidate.cost > most) break;
+    const cost = candidate.cost + braces.partnerCost(which, candidate.heading);
+    if (cost <= most) found.push({ candidate, cost });
   }
-  return found.sort((a, b) => a.pair.cost - b.pair.cost);
+  return found.sort((a, b) => a.cost - b.cost);
 }
 
-/** The cheapest pair with one brace given, within `most`; null where it can't stand or finds no partner. */
-export function bestWith(braces: PoleBraces, given: Candidate, which: 0 | 1, most: number): Pair | null {
-  const costGiven = fullCost(braces, given);
-  if (costGiven === null) return null;
-  let best: Pair | null = null;
-  for (const other of braces.lists()[which === 0 ? 1 : 0]) {
-    if (costGiven + other.cost > most || (best && costGiven + other.cost >= best.cost)) break;
-    const angle = angleCost(given, other, braces.limits);
-    if (angle === null || (best && costGiven + other.cost + angle >= best.cost)) continue;
-    const costOther = fullCost(braces, other);
-    if (costOther === null) continue;
-    const cost = costGiven + costOther + angle;
-    if (cost > most || (best && cost >= best.cost)) continue;
-    best = { cost, braces: which === 0 ? [given, other] : [other, given] };
+/** Every candidate for brace `which` that stands with `first` as the other, with what their pair costs, cheapest first. */
+export function rankedWith(braces: PoleBraces, first: Candidate, which: 0 | 1, most: number): readonly Ranked[] {
+  const headings = braces.headings(which);
+  const own = braces.headings(which === 0 ? 1 : 0)[first.heading];
+  const found: Ranked[] = [];
+  if (!own) return found;
+  for (const candidate of braces.upTo(which, most - first.cost)) {
+    if (first.cost + candidate.cost > most) break;
+    const angle = braces.angleFrom(which === 0 ? 1 : 0, own, headings[candidate.heading] as Heading);
+    const cost = first.cost + candidate.cost + angle;
+    if (cost <= most) found.push({ candidate, cost });
   }
-  return best;
+  return found.sort((a, b) => a.cost - b.cost);
+}
+
+/** The pair that one brace given makes with its best partner. */
+export function pairWith(braces: PoleBraces, given: Candidate, which: 0 | 1): Pair | null {
+  const own = braces.headings(which)[given.heading];
+  const partner = own ? braces.partnerOf(which, own) : null;
+  if (!partner) return null;
+  const cost = given.cost + partner.cost;
+  return { cost, braces: which === 0 ? [given, partner.candidate] : [partner.candidate, given] };
+}
+
+/** Two candidates of one pole as a pair. */
+export function pairOf(braces: PoleBraces, pair: readonly [Candidate, Candidate]): Pair {
+  const [a, b] = [braces.headings(0)[pair[0].heading], braces.headings(1)[pair[1].heading]];
+  const angle = a && b ? braces.angleCost(a, b) : Infinity;
+  return { cost: pair[0].cost + pair[1].cost + angle, braces: pair };
 }

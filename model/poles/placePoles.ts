@@ -7,11 +7,18 @@ import type { Reason } from '../reasons';
 import { ruleValue } from '../rules/registry';
 import type { ThingRef } from '../things';
 import type { Walls } from '../walls/types';
-import { legShortBy, reachLimits, USUAL_CANDIDATES, type Candidate, type CandidateOptions } from './candidates';
+import {
+  legShortBy,
+  reachLimits,
+  USUAL_CANDIDATES,
+  WIDE_CANDIDATES,
+  type Candidate,
+  type CandidateOptions,
+} from './candidates';
 import { bracesConflict, type BraceLine } from './clearance';
 import { turnedFor, whyBlocked } from './explain';
 import { groundOf, obstacleOf, obstaclesOf, type Ground } from './obstacles';
-import { cheapestPair, poleBraces, type AngleLimits, type PoleBraces, type PoleSite } from './pairs';
+import { PoleBraces, type AngleLimits, type PoleSite } from './poleBraces';
 import { USUAL_BOUND, type SearchBound } from './group';
 import { placeBraces, type Placed } from './search';
 import { nearJambs, standClear, takenOf, type Standing } from './section';
@@ -21,10 +28,12 @@ import type { Brace, PoleSet, StoryPole } from './types';
 
 export interface PoleOptions {
   readonly candidates: CandidateOptions;
+  /** Tried for a pole to which the usual candidates give no two braces that keep the angle rule. */
+  readonly wide: CandidateOptions;
   readonly bound: SearchBound;
 }
 
-const USUAL: PoleOptions = { candidates: USUAL_CANDIDATES, bound: USUAL_BOUND };
+const USUAL: PoleOptions = { candidates: USUAL_CANDIDATES, wide: WIDE_CANDIDATES, bound: USUAL_BOUND };
 
 /** Where no pair keeps the angle rule, one within these degrees still stands, with a warning. */
 const LOOSE_ANGLES: AngleLimits = { least: 30, most: 150 };
@@ -71,7 +80,6 @@ function braceOf(
   site: PoleSite,
   candidate: Candidate,
   which: 0 | 1,
-  over: readonly ThingRef[],
   ground: Ground,
   cornerIds: readonly string[],
   walls: Walls,
@@ -93,7 +101,7 @@ function braceOf(
     inLineWith: candidate.runId,
     turned: candidate.turned,
     turnedFor: turnedFor(site, candidate, which, ground),
-    over,
+    over: candidate.over,
     ties: tiesOf(candidate.foot, cornerIds, walls),
   };
 }
@@ -102,9 +110,9 @@ function braceOf(
 function lonelyBrace(pole: PoleBraces, placed: readonly BraceLine[], clearance: number): [Candidate, 0 | 1] | null {
   let best: [Candidate, 0 | 1] | null = null;
   ([0, 1] as const).forEach((which) => {
-    const found = pole.lists()[which].find((candidate) => {
+    const found = pole.upTo(which, Infinity).find((candidate) => {
       const line = { from: pole.at, foot: candidate.foot };
-      return pole.over(candidate) !== null && !placed.some((other) => bracesConflict(line, other, clearance));
+      return !placed.some((other) => bracesConflict(line, other, clearance));
     });
     if (found && (!best || found.cost < best[0].cost)) best = [found, which];
   });
@@ -115,6 +123,16 @@ interface Search {
   readonly sites: readonly PoleSite[];
   readonly poles: readonly PoleBraces[];
   readonly placed: Placed;
+}
+
+/** A pole's braces among the usual candidates, or the wide ones where those hold no pair, or at a looser angle. */
+function bracesAt(site: PoleSite, ground: Ground, wide: CandidateOptions): PoleBraces {
+  const usual = new PoleBraces(site, ground);
+  if (usual.own()) return usual;
+  const wider = new PoleBraces({ ...site, options: wide }, ground);
+  if (wider.own()) return wider;
+  const loose = new PoleBraces({ ...site, limits: LOOSE_ANGLES }, ground);
+  return loose.own() ? loose : usual;
 }
 
 /** Sites in an order that the drawing's lists don't change, each with the angle limits that it can keep. */
@@ -146,14 +164,13 @@ function searchAll(
     .sort((a, b) => (a.seat.id < b.seat.id ? -1 : 1))
     .map(({ seat, standing }) => {
       const site = { poleId: seat.id, seat, at: standing.at, kit, reach, limits, options: options.candidates };
-      sites.push(site);
-      const strict = poleBraces(site, ground);
-      if (cheapestPair(strict)) return strict;
-      const loose = { ...strict, limits: LOOSE_ANGLES };
-      if (!cheapestPair(loose)) return strict;
-      const why = whyBlocked(drawing, walls, site, ground);
-      reasons.push({ ...why, code: 'braceAngleOut', weight: 'warning', rule: 'braceAngleLeast' });
-      return loose;
+      const braces = bracesAt(site, ground, options.wide);
+      sites.push(braces.site);
+      if (braces.site.limits === LOOSE_ANGLES) {
+        const why = whyBlocked(drawing, walls, { ...braces.site, limits }, ground);
+        reasons.push({ ...why, code: 'braceAngleOut', weight: 'warning', rule: 'braceAngleLeast' });
+      }
+      return braces;
     });
   return { sites, poles, placed: placeBraces(poles, kit.clearance, options.bound) };
 }
@@ -182,14 +199,13 @@ function bracesByPole(
       site.seat.faces.map((face) => face.runId),
       walls,
     );
-    const make = (candidate: Candidate, which: 0 | 1) =>
-      braceOf(site, candidate, which, pole.over(candidate) ?? [], ground, cornerIds, walls);
+    const make = (candidate: Candidate, which: 0 | 1) => braceOf(site, candidate, which, ground, cornerIds, walls);
     if (pair) {
       found.set(site.poleId, [make(pair.braces[0], 0), make(pair.braces[1], 1)]);
       return;
     }
     const group = search.placed.groups.find((members) => members.includes(i)) ?? [];
-    if (cheapestPair(pole)) {
+    if (pole.own()) {
       const against = group.flatMap((j) => (j === i ? [] : (search.sites[j]?.poleId ?? []))).map(poleRef);
       reasons.push({ code: 'braceBlocked', weight: 'blocked', thing: poleRef(site.poleId), against });
     } else reasons.push(whyBlocked(drawing, walls, site, ground));
@@ -239,6 +255,7 @@ export function placePoles(drawing: Drawing, walls: Walls, options: PoleOptions 
     poleById: new Map(poles.map((pole) => [pole.id, pole])),
     cost: search ? search.placed.pairs.reduce((sum, pair) => sum + (pair?.cost ?? 0), 0) : 0,
     neighbourhoods: search ? search.placed.groups.map(idsOf) : poles.map((pole) => [pole.id]),
+    gap: search?.placed.gap ?? 0,
     exact: (search?.placed.bounded.length ?? 0) === 0,
     reasons,
   };

@@ -7,11 +7,16 @@ import { contains, edges, whereIs } from '../geometry/polygon';
 import { cross, dot, sub } from '../geometry/vec';
 import { roundTicks, type Ticks } from '../length/ticks';
 
+const RADIANS = Math.PI / 180;
+const COSINES = Array.from({ length: 181 }, (_, degrees) => Math.cos(degrees * RADIANS));
+const SINES = Array.from({ length: 181 }, (_, degrees) => Math.sin(degrees * RADIANS));
+
 /** `v` turned counter-clockwise by degrees. */
 export function turn(v: Vec, degrees: number): Vec {
-  const size = (Math.abs(degrees) * Math.PI) / 180;
-  const c = Math.cos(size);
-  const s = degrees < 0 ? -Math.sin(size) : Math.sin(size);
+  const size = Math.abs(degrees);
+  const c = COSINES[size] ?? Math.cos(size * RADIANS);
+  const sine = SINES[size] ?? Math.sin(size * RADIANS);
+  const s = degrees < 0 ? -sine : sine;
   return { x: v.x * c - v.y * s, y: v.x * s + v.y * c };
 }
 

@@ -14,14 +14,16 @@
 import { boxOfSegment, inflate } from '../geometry/box';
 import { gridOf } from '../geometry/grid';
 import { bracesConflict, type BraceLine } from './clearance';
-import { placeInTurn, solveGroup, type Member, type Part, type SearchBound, type Solved } from './group';
-import { cheapestPair, type Pair, type PoleBraces } from './pairs';
+import { placeInTurn, solveGroup, UNBRACED, type Member, type Part, type SearchBound, type Solved } from './group';
+import type { Pair, PoleBraces } from './poleBraces';
 
 export interface Placed {
   readonly pairs: readonly (Pair | null)[];
   readonly groups: readonly (readonly number[])[];
   /** Groups that reached the bound: their placing is free of conflicts but may not be the least. */
   readonly bounded: readonly (readonly number[])[];
+  /** How far at most the placing is above the least; 0 where every group was solved to the end. */
+  readonly gap: number;
 }
 
 interface Chosen {
@@ -60,8 +62,10 @@ function conflicts(
 
 interface Group {
   readonly poles: readonly number[];
-  /** What it cost when last solved; as a lower bound it holds when more is asked of it. */
+  /** What it cost when last solved, poles without braces included. */
   readonly cost: number;
+  /** What it costs at least, as far as it was solved; that holds when more is asked of it. */
+  readonly lower: number;
   readonly exact: boolean;
 }
 
@@ -73,7 +77,9 @@ class Groups {
 
   constructor(own: readonly (Pair | null)[]) {
     this.of = own.map((_, i) => i);
-    own.forEach((pair, i) => this.whole.set(i, { poles: [i], cost: pair?.cost ?? 0, exact: true }));
+    own.forEach((pair, i) =>
+      this.whole.set(i, { poles: [i], cost: pair?.cost ?? 0, lower: pair?.cost ?? 0, exact: true }),
+    );
   }
 
   /** Joins the groups of two poles, or marks the one that holds both to be solved again. */
@@ -103,9 +109,9 @@ class Groups {
     return [...this.parts];
   }
 
-  close(group: number, poles: readonly number[], solved: Solved): void {
+  close(group: number, poles: readonly number[], solved: Pick<Solved, 'cost' | 'lower' | 'exact'>): void {
     this.parts.delete(group);
-    this.whole.set(group, { poles, cost: solved.cost, exact: solved.exact });
+    this.whole.set(group, { poles, cost: solved.cost, lower: solved.lower, exact: solved.exact });
   }
 
   all(): readonly Group[] {
@@ -124,13 +130,14 @@ function finish(poles: readonly PoleBraces[], pairs: (Pair | null)[], groups: Gr
     const open = indices.flatMap((i) => poles[i] ?? []);
     const found = placeInTurn(open, fixed, clearance);
     indices.forEach((i, n) => (pairs[i] = found[n] ?? null));
-    groups.close(group, indices, { pairs: new Map(), cost: 0, exact: false, spent: 0 });
+    const cost = open.reduce((sum, pole, n) => sum + (found[n]?.cost ?? (pole.own() ? UNBRACED : 0)), 0);
+    groups.close(group, indices, { cost, lower: joined.reduce((sum, part) => sum + part.lower, 0), exact: false });
   }
 }
 
 /** Places the braces of every pole; `poles` in an order that does not depend on the drawing's. */
 export function placeBraces(poles: readonly PoleBraces[], clearance: number, bound: SearchBound): Placed {
-  const own = poles.map((pole) => cheapestPair(pole));
+  const own = poles.map((pole) => pole.own());
   const pairs: (Pair | null)[] = [...own];
   const relevant = poles.map((): [number | null, number | null] => [null, null]);
   const groups = new Groups(own);
@@ -154,12 +161,7 @@ export function placeBraces(poles: readonly PoleBraces[], clearance: number, bou
       break;
     }
     for (const [group, joined] of opened) {
-      // A group that reached its bound may cost more than its least: its poles' own optima are the bound that holds.
-      const parts = joined.flatMap(({ poles: indices, cost, exact }): Part[] => {
-        const members = indices.flatMap(member);
-        const lower = exact ? cost : members.reduce((sum, each) => sum + each.own.cost, 0);
-        return [{ members, lower }];
-      });
+      const parts = joined.map(({ poles: indices, lower }): Part => ({ members: indices.flatMap(member), lower }));
       const indices = joined.flatMap((part) => part.poles);
       const solved = solveGroup(parts, clearance, bound);
       spent += solved.spent;
@@ -172,5 +174,6 @@ export function placeBraces(poles: readonly PoleBraces[], clearance: number, bou
     pairs,
     groups: all.map((group) => group.poles),
     bounded: all.filter((group) => !group.exact).map((group) => group.poles),
+    gap: all.reduce((sum, group) => sum + group.cost - group.lower, 0),
   };
 }

@@ -55,6 +55,11 @@ export interface PoleSet {
   readonly poleById: ReadonlyMap<string, StoryPole>;
   /** Total cost of the braces as placed; lower is better. */
   readonly cost: number;
+  /**
+   * How far at most the cost is above the least there is: 0 where it is exact. A pole left without braces counts with a
+   * million, so a gap as large says that one more might be braced.
+   */
+  readonly gap?: number;
   /** Groups of poles whose braces can touch one another, solved apart. */
   readonly neighbourhoods: readonly (readonly string[])[];
   /** False where the counted bound of the search was reached. */

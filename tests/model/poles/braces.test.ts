@@ -90,7 +90,10 @@ describe('braces beside obstacles', () => {
 
   it('keeps out of a door’s swing, and says that opening it the other way frees the pole', () => {
     const way = { used: false, width: inches(0), depth: inches(0) };
-    const shut = withOpenings(ell(), door('CD', 54, { way, swing: { hinge: 'far', opens: 'out' } }));
+    // Legs of 96 in or more stand at least 53 in out: none can stay short of the swing.
+    const kit = { ...KIT, brace: { ...KIT.brace, leastLeg: inches(96) } };
+    const site = { ...ell(), poleKit: kit };
+    const shut = withOpenings(site, door('CD', 54, { way, swing: { hinge: 'far', opens: 'out' } }));
     const reason = place(shut).reasons.find((each) => each.thing.id === 'D');
     expect(reason).toMatchObject({
       code: 'braceAngleOut',
@@ -99,9 +102,20 @@ describe('braces beside obstacles', () => {
       against: [{ kind: 'opening', id: 'door-CD-54' }],
       change: { kind: 'openOtherWay', thing: { kind: 'opening', id: 'door-CD-54' } },
     });
-    const opened = place(withOpenings(ell(), door('CD', 54, { way, swing: { hinge: 'far', opens: 'in' } })));
+    const opened = place(withOpenings(site, door('CD', 54, { way, swing: { hinge: 'far', opens: 'in' } })));
     expect(opened.reasons).toEqual([]);
     expect(bearings(opened.poleById.get('D'))).toEqual([15, 75]);
+  });
+
+  it('stands short of the swing where shorter legs allow it, within the angle rule', () => {
+    const way = { used: false, width: inches(0), depth: inches(0) };
+    const set = place(withOpenings(ell(), door('CD', 54, { way, swing: { hinge: 'far', opens: 'out' } })));
+    expect(set.reasons).toEqual([]);
+    const [a, b] = set.poleById.get('D')?.braces ?? [];
+    const apart = Math.abs((a?.bearing ?? 0) - (b?.bearing ?? 0));
+    expect(apart).toBeGreaterThanOrEqual(60 - 1e-3);
+    // Between the wall's face and the leaf's edge at 120 − 54 − 36 + 1.5 in from D: the foot is nearer than that.
+    expect(Math.min(a?.reach ?? 0, b?.reach ?? 0)).toBeLessThan(inches(40));
   });
 
   it('says which way through blocks a pole, and that not using it frees the pole', () => {

@@ -10,7 +10,7 @@ import type { PlanPoint } from '../../../model/geometry/point';
 import { inches } from '../../../model/length/ticks';
 import { reachLimits, USUAL_CANDIDATES, type CandidateOptions } from '../../../model/poles/candidates';
 import { groundOf, obstacleOf, obstaclesOf } from '../../../model/poles/obstacles';
-import { poleBraces, type PoleSite } from '../../../model/poles/pairs';
+import { PoleBraces, type PoleSite } from '../../../model/poles/poleBraces';
 import { placePoles } from '../../../model/poles/placePoles';
 import { USUAL_BOUND } from '../../../model/poles/group';
 import { seatsAtCorners } from '../../../model/poles/seats';
@@ -118,6 +118,7 @@ describe('braces on random sites', () => {
     }
     const set = placePoles(drawing, layOutWalls(drawing), {
       candidates: USUAL_CANDIDATES,
+      wide: USUAL_CANDIDATES,
       bound: { most: 4000, inAll: 12_000 },
     });
     expect(set.exact).toBe(false);
@@ -136,7 +137,7 @@ describe('braces on random sites', () => {
     fc.assert(
       fc.property(sites, (drawing) => {
         const walls = layOutWalls(drawing);
-        const set = placePoles(drawing, walls, { candidates: COARSE, bound: USUAL_BOUND });
+        const set = placePoles(drawing, walls, { candidates: COARSE, wide: COARSE, bound: USUAL_BOUND });
         fc.pre(set.reasons.length === 0);
         expect(set.exact).toBe(true);
         expect(set.cost).toBe(cheapestOfAll(drawing));
@@ -154,7 +155,7 @@ interface Choice {
 /** Every pair of candidates of every pole, and every combination of them, by brute force. */
 function cheapestOfAll(drawing: Drawing): number {
   const walls = layOutWalls(drawing);
-  const placed = placePoles(drawing, walls, { candidates: COARSE, bound: USUAL_BOUND });
+  const placed = placePoles(drawing, walls, { candidates: COARSE, wide: COARSE, bound: USUAL_BOUND });
   const poles = placed.poles.map((pole) => obstacleOf('pole', { kind: 'pole', id: pole.id }, pole.section));
   const ground = groundOf([...obstaclesOf(drawing, walls), ...poles], null);
   const reach = reachLimits(KIT)!;
@@ -162,16 +163,13 @@ function cheapestOfAll(drawing: Drawing): number {
     const at = placed.poleById.get(seat.id)!.at;
     const limits = { least: 60, most: 120 };
     const site: PoleSite = { poleId: seat.id, seat, at, kit: KIT, reach, limits, options: COARSE };
-    const braces = poleBraces(site, ground);
-    const [first, second] = braces.lists();
-    return first.flatMap((a) =>
-      second.flatMap((b): Choice[] => {
-        const overA = braces.over(a);
-        const overB = braces.over(b);
+    const braces = new PoleBraces(site, ground);
+    return braces.upTo(0, Infinity).flatMap((a) =>
+      braces.upTo(1, Infinity).flatMap((b): Choice[] => {
         const cosine = a.direction.x * b.direction.x + a.direction.y * b.direction.y;
         const angle = Math.round((Math.acos(Math.max(-1, Math.min(1, cosine))) * 180) / Math.PI);
-        if (!overA || !overB || angle < 60 || angle > 120) return [];
-        const cost = a.cost + b.cost + (angle - 90) ** 2 + 400 * (overA.length + overB.length);
+        if (angle < 60 || angle > 120) return [];
+        const cost = a.cost + b.cost + (angle - 90) ** 2;
         return [{ cost, lines: [line(at, a.foot), line(at, b.foot)] }];
       }),
     );
