@@ -1,7 +1,7 @@
 /** What the stops above each stop cost at least, wherever that stop lies: it lets a search drop dead ends early. */
-import { lowestOf, prune, slideUp, sumOf, type Cost, type Piece } from './costPieces';
-import { countsWithin, heightLimits } from './fitInterval';
-import { chargeOf, windowOf, type Problem, type Stop } from './problem';
+import { charged, lowestOf, prune, slideUp, sumOf, type Cost, type Piece } from './costPieces';
+import { heightLimits, makesWithin } from './fitInterval';
+import { chargeOf, partsOf, windowOf, type Problem, type Stop } from './problem';
 import type { Work } from './search';
 
 /**
@@ -21,7 +21,7 @@ export function costAhead(problem: Problem, most: number, work: Work): Cost[] | 
     if (work.left < 0) return null;
     ahead[i] = { hard: 0, soft: Math.min(most, leastSoft(from)) };
     const turned = { ...stop, height: -stop.height as Stop['height'] };
-    above = prune(sumOf(from, chargeOf(turned, -hi, -lo)), bound);
+    above = prune(sumOf(from, chargeOf(turned, -hi, -lo, partsOf(problem))), bound);
   }
   return ahead;
 }
@@ -38,14 +38,16 @@ function comeDown(
   const last = above[above.length - 1];
   if (!first || !last) return [];
   const { unit, joint } = problem;
-  const counts = countsWithin(lo - stop.beamDepth - last.hi, hi - stop.beamDepth - first.lo, unit, joint);
+  const least = lo - stop.beamDepth - last.hi;
+  const most = hi - stop.beamDepth - first.lo;
   const arrivals: (readonly Piece[])[] = [];
-  for (let count = counts.from; count <= counts.to; count++) {
-    const limits = heightLimits(count, unit, joint);
+  for (const { count, thin } of makesWithin(least, most, unit, joint, problem.thin ?? null)) {
+    const limits = heightLimits(count, unit, joint, thin);
     if (limits.least > limits.most) continue;
     work.left -= above.length;
     if (work.left < 0) return [];
-    arrivals.push(slideUp(above, limits.least + stop.beamDepth, limits.most + stop.beamDepth, lo, hi));
+    const risen = slideUp(above, limits.least + stop.beamDepth, limits.most + stop.beamDepth, lo, hi);
+    arrivals.push(charged(risen, thin ? 1 : 0));
   }
   return lowestOf(arrivals);
 }

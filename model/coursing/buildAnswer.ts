@@ -3,7 +3,7 @@ import type { Ticks } from '../length/ticks';
 import { controlResults } from './controlResults';
 import { HARD_MISS } from './costPieces';
 import { coursesOf, liftsOf, linesOf, type PlanLift } from './layCourses';
-import { missCost, type Control, type Problem } from './problem';
+import { missCost, takeApart, type Control, type Problem } from './problem';
 import type { RatedPlan } from './refine';
 import type { Course, CoursingAnswer } from './types';
 
@@ -30,11 +30,13 @@ export function buildAnswer(parts: Parts, plan: RatedPlan, letGo: readonly Contr
   const asked = controls.length - left.length;
   const leftHard = controls.slice(asked).filter((one) => one.hold === 'hard' && !one.met).length;
   const passed = controls.slice(asked - letGo.length, asked);
-  const soft = passed.reduce((sum, one, i) => sum + missCost(letGo[i] as Control, one.miss), plan.cost.soft);
+  const held = takeApart(problem, plan.cost.soft);
+  const soft = passed.reduce((sum, one, i) => sum + missCost(letGo[i] as Control, one.miss), held.soft);
+  const hard = Math.floor(plan.cost.hard / HARD_MISS);
   const answer: CoursingAnswer = {
     intervals: lifts.flatMap((lift) => lift.intervals),
     controls,
-    cost: [Math.floor(plan.cost.hard / HARD_MISS) + leftHard, soft, plan.step, plan.spread],
+    cost: [hard + leftHard, plan.cost.hard - hard * HARD_MISS, soft, held.thin, plan.step, plan.spread],
   };
   return { lifts, courses, answer };
 }

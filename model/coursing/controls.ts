@@ -18,6 +18,8 @@ export interface Gathered {
   readonly left: readonly Control[];
   /** Where masonry goes on to above the last stop, when nothing drawn ends it. */
   readonly openTop: Ticks | null;
+  /** Some soft heights were left out because the search can't hold so many. */
+  readonly tooMany: boolean;
   readonly reasons: readonly Reason[];
 }
 
@@ -53,7 +55,13 @@ export function gatherControls(drawing: Drawing, walls: Walls, ground: Ground): 
   const highest = kept.reduce((high, { height }) => Math.max(high, height), 0);
   const ends = plate !== null || (beamTop !== null && highest <= beamTop);
   if (!ends) reasons.push({ code: 'noWallTop', weight: 'note', thing: SITE });
-  return { stops, left, openTop: ends ? null : openTop(drawing, Math.max(highest, beamTop ?? 0)), reasons };
+  return {
+    stops,
+    left,
+    openTop: ends ? null : openTop(drawing, Math.max(highest, beamTop ?? 0)),
+    tooMany: tooMany.length > 0,
+    reasons,
+  };
 }
 
 const SITE = { kind: 'site', id: 'site' } as const;

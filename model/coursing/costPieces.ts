@@ -216,6 +216,11 @@ function clip(pieces: readonly Piece[], lo: number, hi: number): Piece[] {
   return kept;
 }
 
+/** The same pieces, each costing `soft` more. */
+export function charged(pieces: readonly Piece[], soft: number): readonly Piece[] {
+  return soft === 0 ? pieces : pieces.map((piece) => ({ ...piece, soft: piece.soft + soft }));
+}
+
 /** The same costs, `by` higher. */
 export function raise(pieces: readonly Piece[], by: number): Piece[] {
   return pieces.map((piece) => moved(piece, piece.lo, piece.hi, by));

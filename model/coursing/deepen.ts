@@ -1,6 +1,6 @@
 /** The cheapest plan without its cost known: bounds are tried from tight to loose, so that most searches are small. */
 import { HARD_MISS, type Cost } from './costPieces';
-import type { Problem } from './problem';
+import { partsOf, type Problem } from './problem';
 import { cheapestWithin, type Plan, type SearchHelp } from './search';
 
 /** How much soft cost over the least known the first bound allows: a thousandth of an inch; then three times as much each time. */
@@ -25,7 +25,7 @@ export interface CostRange {
 export function cheapestPlan(problem: Problem, range: CostRange, help: SearchHelp): Plan | null {
   const hard = leastHard(problem, range.missed, help);
   if (hard === null) return null;
-  for (let more = 0; ; more = more === 0 ? FIRST_SOFT : more * 3) {
+  for (let more = 0; ; more = more === 0 ? FIRST_SOFT * partsOf(problem) : more * 3) {
     const soft = Math.min(range.mostSoft, range.leastSoft + more);
     const plan = cheapestWithin(problem, problem.joint, { hard, soft }, help);
     if (plan || soft === range.mostSoft || help.work.left < 0) return plan;
@@ -39,8 +39,10 @@ function leastHard(problem: Problem, most: number, help: SearchHelp): number | n
     stops: problem.stops.map((stop) => (stop.hold === 'hard' ? stop : { ...stop, weight: 0 })),
   };
   const { work, allowed } = help;
+  // Soft heights weigh nothing here, but thinner courses still cost a part each.
+  const thinner = problem.thin ? problem.stops.length : 0;
   for (let missed = 0; missed <= most; missed++) {
-    const bound: Cost = { hard: missed === 0 ? 0 : (missed + 0.5) * HARD_MISS, soft: 0 };
+    const bound: Cost = { hard: missed === 0 ? 0 : (missed + 0.5) * HARD_MISS, soft: thinner };
     const plan = cheapestWithin(hardOnly, problem.joint, bound, allowed ? { work, allowed } : { work });
     if (plan) return plan.cost.hard;
   }

@@ -2,13 +2,16 @@
 import { roundTicks, ticks, type Ticks } from '../length/ticks';
 import { jointOf } from './fitInterval';
 import type { Problem } from './problem';
-import type { Plan } from './search';
+import type { RatedPlan } from './refine';
 import type { Course, CourseInterval } from './types';
 
 /** A height of a plan with the course whose top it is, counted through all lifts; 0 for none. */
 export interface Line {
   readonly height: Ticks;
   readonly count: number;
+  /** The last of those courses is a thinner one, and the bed joint is this. */
+  readonly thin: boolean;
+  readonly joint: number;
   /** Depth of the beam that starts here; 0 for none. */
   readonly beamDepth: Ticks;
   readonly beamId: string | null;
@@ -25,12 +28,14 @@ export interface PlanLift {
 }
 
 /** The plan's lines, and above them, where nothing ends the wall, courses of the nominal joint up to `openTop`. */
-export function linesOf(problem: Problem, plan: Plan, openTop: Ticks | null): Line[] {
+export function linesOf(problem: Problem, plan: RatedPlan, openTop: Ticks | null): Line[] {
   const lines = problem.stops.map((stop, i): Line => {
     const beam = stop.controls.find((control) => control.kind === 'bondBeam');
     return {
       height: ticks(plan.heights[i] as number),
       count: plan.counts[i] as number,
+      thin: plan.thins[i] as boolean,
+      joint: plan.joints[i] as number,
       beamDepth: stop.beamDepth,
       beamId: stop.beamDepth > 0 ? (beam?.thing.id ?? null) : null,
     };
@@ -40,7 +45,9 @@ export function linesOf(problem: Problem, plan: Plan, openTop: Ticks | null): Li
   const from = last ? last.height + last.beamDepth : problem.start;
   const gauge = problem.unit + problem.joint.nominal;
   const count = Math.max(last?.beamId ? 1 : 0, Math.round((openTop - from) / gauge));
-  return [...lines, { height: ticks(from + count * gauge), count, beamDepth: ticks(0), beamId: null }];
+  const joint = problem.joint.nominal;
+  const height = ticks(from + count * gauge);
+  return [...lines, { height, count, thin: false, joint, beamDepth: ticks(0), beamId: null }];
 }
 
 /** Lifts with their intervals of equal courses. `problem.start` is the top of course 1, in lift 1. */
@@ -72,7 +79,7 @@ export function liftsOf(problem: Problem, lines: readonly Line[]): PlanLift[] {
 
 /**
  * One lift's intervals, as few as there can be from the bottom up: a line that an interval's equal courses pass anyway, to
- * the tick, does not break it.
+ * the tick, does not break it. A thinner course ends its interval, which is its stop's alone.
  */
 function intervalsOf(
   unit: Ticks,
@@ -88,16 +95,19 @@ function intervalsOf(
     let end = lines.length - 1;
     while (end > i && !passes(from, lines.slice(i, end + 1))) end--;
     const count = lines.slice(i, end + 1).reduce((sum, line) => sum + line.count, 0);
-    const to = (lines[end] as Line).height;
+    const last = lines[end] as Line;
+    const to = last.height;
     if (count > 0) {
+      const joint = last.thin ? last.joint : jointOf(from, to, count, unit);
       intervals.push({
         lift,
         fromHeight: from,
         toHeight: to,
         count,
-        joint: jointOf(from, to, count, unit),
+        joint,
         firstCourse: course + 1,
         lastCourse: course + count,
+        ...(last.thin ? { thin: roundTicks(to - from - count * joint - (count - 1) * unit) } : {}),
       });
     }
     from = to;
@@ -108,6 +118,7 @@ function intervalsOf(
 }
 
 function passes(from: Ticks, lines: readonly Line[]): boolean {
+  if (lines.length > 1 && lines.some((line) => line.thin)) return false;
   const to = (lines[lines.length - 1] as Line).height;
   const total = lines.reduce((sum, line) => sum + line.count, 0);
   let count = 0;
@@ -122,6 +133,13 @@ export function courseTop(from: Ticks, to: Ticks, count: number, k: number): Tic
   return count === 0 ? from : roundTicks(from + (k * (to - from)) / count);
 }
 
+/** Top of an interval's k-th course, from its exact height, rounded once. */
+function topIn(interval: CourseInterval, unit: Ticks, k: number): Ticks {
+  const { fromHeight, toHeight, count, joint, thin } = interval;
+  if (thin === undefined) return courseTop(fromHeight, toHeight, count, k);
+  return k === count ? toHeight : roundTicks(fromHeight + k * (unit + joint));
+}
+
 /** Every course from the bottom up. Course 1 lies on the least bedding, the first of each later lift on its beam. */
 export function coursesOf(problem: Problem, bedding: Ticks, lifts: readonly PlanLift[]): Course[] {
   const courses: Course[] = [{ number: 1, lift: 1, bottom: bedding, top: problem.start, joint: bedding }];
@@ -130,8 +148,9 @@ export function coursesOf(problem: Problem, bedding: Ticks, lifts: readonly Plan
     if (lift.number > 1) below = lift.base;
     for (const interval of lift.intervals) {
       for (let k = 1; k <= interval.count; k++) {
-        const top = courseTop(interval.fromHeight, interval.toHeight, interval.count, k);
-        const bottom = ticks(top - problem.unit);
+        const top = topIn(interval, problem.unit, k);
+        const isThin = interval.thin !== undefined && k === interval.count;
+        const bottom = ticks(top - (isThin ? (interval.thin as Ticks) : problem.unit));
         courses.push({ number: courses.length + 1, lift: lift.number, bottom, top, joint: ticks(bottom - below) });
         below = top;
       }

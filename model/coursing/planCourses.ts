@@ -13,13 +13,13 @@ import { rate } from './refine';
 import { settle } from './settle';
 import type { Course, Coursing, CoursingAnswer } from './types';
 
-/** The best answer and this many others. */
-const MOST_OTHERS = 5;
+/** The best answer and this many others: five in all. */
+const MOST_OTHERS = 4;
 
 /**
  * Chooses whole numbers of courses and one bed joint for each interval between the heights that courses must meet, in strict order:
- * fewest hard heights missed, and by least; least soft misses by weight; joints nearest the nominal; joints
- * most even. Exact (see `search.ts`, `refine.ts`, `rankPlans.ts`). The others offered have other counts of courses, or even
+ * fewest hard heights missed, and by least; least soft misses by weight; fewest thinner courses; joints nearest the
+ * nominal; joints most even. Exact (see `search.ts`, `refine.ts`, `rankPlans.ts`). The others offered have other counts of courses, or even
  * joints past a height that can't be met anyway. Heights are above the high point of the foundation.
  */
 export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Coursing {
@@ -28,7 +28,7 @@ export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Cou
   const settled = settle(type, ground.firstCourseTop, gathered, 1 + MOST_OTHERS);
   const { problem, ranking, left, openTop } = settled;
   const [best, ...rest] = ranking.plans;
-  const chosen = best ?? rate(problem, { cost: { hard: 0, soft: 0 }, heights: [], counts: [] });
+  const chosen = best ?? rate(problem, { cost: { hard: 0, soft: 0 }, heights: [], counts: [], thins: [] });
   const parts: Parts = { problem, left, openTop, bedding: ground.leastBedding };
   const built = buildAnswer(parts, chosen);
   const { lifts, reasons: tall } = checkLifts(drawing, walls, built.lifts);
@@ -41,6 +41,7 @@ export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Cou
     lifts,
     answer: built.answer,
     others: differing(built, others, drawing.tapeStep),
+    proof: settled.proof,
     top: lastLift?.beam?.top ?? lastLift?.top ?? ground.firstCourseTop,
     reasons: [...gathered.reasons, ...settled.reasons, ...missed, ...tall],
   };

@@ -25,6 +25,12 @@ export interface Stop {
   readonly beamDepth: Ticks;
 }
 
+/** A thinner course: the least and most height of its unit. Alike for a split unit, apart where units are ripped to fit. */
+export interface ThinCourse {
+  readonly least: Ticks;
+  readonly most: Ticks;
+}
+
 export interface Problem {
   readonly unit: Ticks;
   readonly joint: { readonly nominal: Ticks; readonly least: Ticks; readonly most: Ticks };
@@ -32,6 +38,25 @@ export interface Problem {
   readonly start: Ticks;
   /** From the lowest up. */
   readonly stops: readonly Stop[];
+  /** What one course of every interval, its last, may be; absent where every course is whole. */
+  readonly thin?: ThinCourse;
+}
+
+/**
+ * Where thinner courses are allowed, soft costs are counted in this many parts and each thinner course costs one part: a
+ * soft miss of one tick outweighs a thinner course in every interval (at most 40 control heights, 24 openings and 10 beams).
+ */
+const PARTS = 128;
+
+/** Parts of one weighted tick in a problem's costs. */
+export function partsOf(problem: Problem): number {
+  return problem.thin ? PARTS : 1;
+}
+
+/** A search's soft cost taken apart: weighted ticks, and thinner courses. */
+export function takeApart(problem: Problem, soft: number): { soft: number; thin: number } {
+  const parts = partsOf(problem);
+  return { soft: Math.floor(soft / parts), thin: soft % parts };
 }
 
 /** Ticks missed beyond the tolerance count this many times. */
@@ -52,9 +77,10 @@ export function windowOf(problem: Problem, index: number): { lo: number; hi: num
   return { lo: stop.height - reach, hi: stop.height + reach };
 }
 
-/** What holding the stop at each height within `lo`…`hi` costs. */
-export function chargeOf(stop: Stop, lo: number, hi: number): Piece[] {
-  const { height, weight } = stop;
+/** What holding the stop at each height within `lo`…`hi` costs, in the problem's parts. */
+export function chargeOf(stop: Stop, lo: number, hi: number, parts: number): Piece[] {
+  const { height } = stop;
+  const weight = stop.weight * parts;
   if (stop.hold === 'hard') {
     return [
       { lo, hi: height - 1, hard: HARD_MISS + (height - lo), soft: 0, hardSlope: -1, softSlope: 0 },

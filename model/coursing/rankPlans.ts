@@ -2,11 +2,11 @@
 import { costAhead } from './ahead';
 import { compareCosts, HARD_MISS } from './costPieces';
 import { ANY_SOFT, cheapestPlan, type CostRange } from './deepen';
-import { BEYOND_TOLERANCE, type Problem } from './problem';
+import { BEYOND_TOLERANCE, partsOf, type Problem } from './problem';
 import { compareRated, refine, type RatedPlan } from './refine';
 import type { CountAllowed, Plan, SearchHelp, Work } from './search';
 
-/** Counts already settled from the bottom up, and counts that the next stop may not have. */
+/** Makes (see `makeOf`) already settled from the bottom up, and makes that the next stop may not have. */
 interface Branch {
   readonly settled: readonly number[];
   readonly barred: ReadonlySet<number>;
@@ -34,7 +34,10 @@ export function mostSoftOfOthers(problem: Problem, best: Plan): number {
   if (best.cost.hard > 0) return ANY_SOFT;
   const weights = problem.stops.flatMap((stop) => (stop.hold === 'soft' ? [stop.weight] : []));
   const lightest = weights.length > 0 ? Math.min(...weights) : 0;
-  return best.cost.soft + (lightest * BEYOND_TOLERANCE * (problem.unit + problem.joint.nominal)) / 2;
+  const halfCourse = (problem.unit + problem.joint.nominal) / 2;
+  // One thinner course more for every stop is no dearer than that.
+  const thin = problem.thin ? problem.stops.length : 0;
+  return best.cost.soft + lightest * BEYOND_TOLERANCE * halfCourse * partsOf(problem) + thin;
 }
 
 /**
@@ -69,10 +72,12 @@ export function rankPlans(problem: Problem, most: number): Ranking {
     open.splice(at, 1);
     plans.push(best.rated);
     if (plans.length === most) break;
-    for (let i = best.settled.length; i < best.rated.counts.length; i++) {
-      const settled = best.rated.counts.slice(0, i);
+    const { counts, thins } = best.rated;
+    const makes = counts.map((count, i) => makeOf(count, thins[i] === true));
+    for (let i = best.settled.length; i < makes.length; i++) {
+      const settled = makes.slice(0, i);
       const barred = new Set(i === best.settled.length ? best.barred : []);
-      barred.add(best.rated.counts[i] as number);
+      barred.add(makes[i] as number);
       const plan = cheapestPlan(problem, range, help(others, allowedBy(settled, barred)));
       if (plan) open.push({ settled, barred, plan, rated: null });
     }
@@ -80,9 +85,16 @@ export function rankPlans(problem: Problem, most: number): Ranking {
   return { plans, complete: true, proved: refining.left >= 0 };
 }
 
+/** A count of courses, with or without a thinner one, as one number. */
+function makeOf(count: number, thin: boolean): number {
+  return 2 * count + (thin ? 1 : 0);
+}
+
 function allowedBy(settled: readonly number[], barred: ReadonlySet<number>): CountAllowed {
-  return (stop, count) =>
-    stop < settled.length ? settled[stop] === count : stop > settled.length || !barred.has(count);
+  return (stop, count, thin) => {
+    const make = makeOf(count, thin);
+    return stop < settled.length ? settled[stop] === make : stop > settled.length || !barred.has(make);
+  };
 }
 
 /** The branch of least cost; an unrated one before rated ones of the same cost, because it may prove better. */

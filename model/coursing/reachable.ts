@@ -1,4 +1,4 @@
-/** The nearest heights below and above a missed one that courses can meet while every other hard height is held. */
+/** The nearest heights below and above a missed one that courses can meet, with a thinner one at most on each side, while every other hard height is held. */
 import { ticks, type Ticks } from '../length/ticks';
 import { heightLimits } from './fitInterval';
 import { MOST_COURSES } from './controls';
@@ -68,7 +68,7 @@ function descend(problem: Problem, plan: Pick<Plan, 'heights'>, index: number): 
       return ranges(problem, beams, (limits) => ({
         lo: to - depth - limits.most,
         hi: to - depth - limits.least,
-      })).reverse();
+      }));
     }
     if (stop.beamDepth > 0) {
       depth += stop.beamDepth;
@@ -78,12 +78,27 @@ function descend(problem: Problem, plan: Pick<Plan, 'heights'>, index: number): 
   return [{ lo: -Infinity, hi: Infinity }];
 }
 
-/** One range for each count from `least` up, joined where they touch. */
+/**
+ * One range for each count from `least` up, with every course whole and, where that is allowed, with one of them thinner;
+ * rising, and joined where they meet.
+ */
 function ranges(problem: Problem, least: number, range: (limits: { least: number; most: number }) => Range): Range[] {
   const found: Range[] = [];
   for (let count = least; count <= MOST_COURSES; count++) {
-    const limits = heightLimits(count, problem.unit, problem.joint);
-    if (limits.least <= limits.most) found.push(range(limits));
+    for (const thin of problem.thin && count > 0 ? [problem.thin, null] : [null]) {
+      const limits = heightLimits(count, problem.unit, problem.joint, thin);
+      if (limits.least <= limits.most) found.push(range(limits));
+    }
   }
-  return found;
+  return joined(found);
+}
+
+function joined(found: Range[]): Range[] {
+  const rising: Range[] = [];
+  for (const one of found.sort((a, b) => a.lo - b.lo)) {
+    const last = rising[rising.length - 1];
+    if (last && one.lo <= last.hi + 1) rising[rising.length - 1] = { lo: last.lo, hi: Math.max(last.hi, one.hi) };
+    else rising.push(one);
+  }
+  return rising;
 }

@@ -1,8 +1,8 @@
 /** Among the plans of least cost, the one whose joints stay nearest the nominal, and then spread least. */
 import { compareCosts } from './costPieces';
-import { cheapestWithin, jointsOf, type Plan, type SearchHelp } from './search';
-import type { JointLimits } from './fitInterval';
-import type { Problem } from './problem';
+import { jointRange, type JointLimits } from './fitInterval';
+import type { Problem, Stop } from './problem';
+import { cheapestWithin, type Plan, type SearchHelp } from './search';
 
 /** A plan with everything it is judged by. */
 export interface RatedPlan extends Plan {
@@ -10,22 +10,53 @@ export interface RatedPlan extends Plan {
   readonly step: number;
   /** Thickest joint less thinnest, in ticks. */
   readonly spread: number;
+  /** The joint of each stop's interval, in ticks, not rounded; the nominal one where it has no course. */
+  readonly joints: readonly number[];
 }
 
 /** Two joints that part by less are one: finer than any two different joints of under 300 courses each. */
 const FINE = 1e-5;
 
+/**
+ * Judges a plan, and settles the joints of intervals whose thinner course leaves them a choice: none further from nominal
+ * than the interval that is the furthest, then all within the shortest stretch that has a part of every range, then each
+ * as near nominal as that allows.
+ */
 export function rate(problem: Problem, plan: Plan): RatedPlan {
-  const joints = jointsOf(problem, plan);
-  if (joints.length === 0) return { ...plan, step: 0, spread: 0 };
-  const thinnest = Math.min(...joints);
-  const thickest = Math.max(...joints);
   const { nominal } = problem.joint;
-  return {
-    ...plan,
-    step: Math.max(Math.abs(thinnest - nominal), Math.abs(thickest - nominal)),
-    spread: thickest - thinnest,
-  };
+  const ranges = jointRangesOf(problem, plan);
+  const held = ranges.filter((range) => range !== null);
+  if (held.length === 0) return { ...plan, step: 0, spread: 0, joints: ranges.map(() => nominal) };
+  const step = held.reduce((most, one) => Math.max(most, one.least - nominal, nominal - one.most), 0);
+  const inner = held.map((one) => ({
+    least: Math.max(one.least, nominal - step),
+    most: Math.min(one.most, nominal + step),
+  }));
+  const thickest = Math.max(...inner.map((one) => one.least));
+  const thinnest = Math.min(...inner.map((one) => one.most));
+  const spread = Math.max(0, thickest - thinnest);
+  const together = spread > 0 ? { least: thinnest, most: thickest } : { least: thickest, most: thinnest };
+  const joints = ranges.map((one) =>
+    one ? within(within(nominal, together.least, together.most), one.least, one.most) : nominal,
+  );
+  return { ...plan, step, spread, joints };
+}
+
+function within(value: number, least: number, most: number): number {
+  return Math.min(most, Math.max(least, value));
+}
+
+/** The joints that each stop's interval may have; null where it holds no course. */
+function jointRangesOf(problem: Problem, plan: Plan): (JointLimits | null)[] {
+  let below: number = problem.start;
+  return plan.counts.map((count, i) => {
+    const from = below;
+    const height = plan.heights[i] as number;
+    below = height + (problem.stops[i] as Stop).beamDepth;
+    if (count === 0) return null;
+    const thin = plan.thins[i] ? (problem.thin ?? null) : null;
+    return jointRange(height - from, { count, thin }, problem.unit, problem.joint);
+  });
 }
 
 /** Strict order of plans: cost, then largest step from the nominal joint, then spread. */
@@ -44,7 +75,7 @@ export function compareRated(a: RatedPlan, b: RatedPlan): number {
  */
 export function refine(problem: Problem, plan: Plan, help: SearchHelp): RatedPlan {
   const { nominal, least, most } = problem.joint;
-  const within = (limits: JointLimits): RatedPlan | null => {
+  const attempt = (limits: JointLimits): RatedPlan | null => {
     const found = cheapestWithin(problem, limits, plan.cost, help);
     return found && rate(problem, found);
   };
@@ -55,7 +86,7 @@ export function refine(problem: Problem, plan: Plan, help: SearchHelp): RatedPla
   let best = narrow(
     rate(problem, plan),
     (p) => p.step,
-    (step) => within(around(step)),
+    (step) => attempt(around(step)),
   );
   const { step } = best;
   const sides = [
@@ -66,7 +97,7 @@ export function refine(problem: Problem, plan: Plan, help: SearchHelp): RatedPla
     best = narrow(
       best,
       (p) => p.spread,
-      (spread) => within(clamp(side(spread), around(step))),
+      (spread) => attempt(clamp(side(spread), around(step))),
     );
   }
   return best;

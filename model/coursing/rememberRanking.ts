@@ -9,12 +9,13 @@ const remembered = new Map<string, Ranking>();
 
 /** `rankPlans`, worked out once for equal problems; the same result in every way. */
 export function rankOnce(problem: Problem, most: number): Ranking {
-  const { unit, joint, start, stops } = problem;
+  const { unit, joint, start, stops, thin } = problem;
   const key = JSON.stringify([
     most,
     unit,
     [joint.least, joint.nominal, joint.most],
     start,
+    thin ? [thin.least, thin.most] : null,
     stops.map((stop) => [stop.height, stop.hold, stop.tolerance, stop.weight, stop.beamDepth]),
   ]);
   const known = remembered.get(key);

@@ -3,11 +3,13 @@
  *
  * Every stop i takes a whole height yᵢ, and every interval between neighbouring stops a whole count nᵢ of courses with
  * nᵢ (u + l) ≤ yᵢ − (yᵢ₋₁ + depth of the beam between) ≤ nᵢ (u + m), for unit u and joint limits l…m; each lift has a
- * course at least. The cost is the sum of the stops' charges. For given counts these are difference constraints,
+ * course at least. Where one course of an interval may be thinner, of p…q, its limits are lower by u − p and u − q and it
+ * costs one part more. The cost is the sum of the stops' charges. For given counts these are difference constraints,
  * whose matrix is totally unimodular, so whole heights lose nothing. The least cost of having come to each
  * height is a piecewise linear function: it is carried from stop to stop, for all counts at once.
  */
 import {
+  charged,
   compareCosts,
   costAt,
   lowestOf,
@@ -19,8 +21,8 @@ import {
   type Piece,
   costOn,
 } from './costPieces';
-import { countsWithin, heightLimits, jointOf, type JointLimits } from './fitInterval';
-import { chargeOf, windowOf, type Problem, type Stop } from './problem';
+import { heightLimits, jointRange, makesWithin, type JointLimits, type Make } from './fitInterval';
+import { chargeOf, partsOf, windowOf, type Problem, type Stop, type ThinCourse } from './problem';
 
 /** Counts and heights of one answer, stop by stop. */
 export interface Plan {
@@ -29,10 +31,12 @@ export interface Plan {
   readonly heights: readonly number[];
   /** Courses between the stop below (or the start, or the beam below) and this one. */
   readonly counts: readonly number[];
+  /** Whether the last of those courses is a thinner one. */
+  readonly thins: readonly boolean[];
 }
 
-/** Which counts a stop's interval may have. */
-export type CountAllowed = (stop: number, count: number) => boolean;
+/** Which counts a stop's interval may have, with and without a thinner course. */
+export type CountAllowed = (stop: number, count: number, thin: boolean) => boolean;
 
 /** Pieces of cost that searches may still make; below zero they have stopped for lack of it. */
 export interface Work {
@@ -95,58 +99,58 @@ function advance(
 ): Stage {
   const stop = problem.stops[index] as Stop;
   const { lo, hi } = windowOf(problem, index);
-  const charge = chargeOf(stop, lo, hi);
+  const charge = chargeOf(stop, lo, hi, partsOf(problem));
   const arrivals: (readonly Piece[])[] = [];
   for (const [pieces, leastCount] of [
     [from.begun, 0],
     [from.bare, 1],
   ] as const) {
-    for (const count of countsFrom(pieces, lo, hi, problem.unit, joint)) {
-      if (count < leastCount || !allowed(index, count)) continue;
-      const limits = heightLimits(count, problem.unit, joint);
+    for (const { count, thin } of makesFrom(pieces, lo, hi, problem, joint)) {
+      if (count < leastCount || !allowed(index, count, thin !== null)) continue;
+      const limits = heightLimits(count, problem.unit, joint, thin);
       if (limits.least > limits.most) continue;
       work.left -= pieces.length;
       if (work.left < 0) return { begun: [], bare: [] };
-      arrivals.push(slideUp(pieces, limits.least, limits.most, lo, hi));
+      arrivals.push(charged(slideUp(pieces, limits.least, limits.most, lo, hi), thin ? 1 : 0));
     }
   }
   const begun = prune(sumOf(lowestOf(arrivals), charge), bound);
   if (stop.beamDepth > 0) return { begun: [], bare: raise(begun, stop.beamDepth) };
-  return { begun, bare: allowed(index, 0) ? prune(sumOf(from.bare, charge), bound) : [] };
+  return { begun, bare: allowed(index, 0, false) ? prune(sumOf(from.bare, charge), bound) : [] };
 }
 
-function countsFrom(pieces: readonly Piece[], lo: number, hi: number, unit: number, joint: JointLimits): number[] {
+function makesFrom(pieces: readonly Piece[], lo: number, hi: number, problem: Problem, joint: JointLimits): Make[] {
   const first = pieces[0];
   const last = pieces[pieces.length - 1];
   if (!first || !last) return [];
-  const { from, to } = countsWithin(lo - last.hi, hi - first.lo, unit, joint);
-  return Array.from({ length: Math.max(0, to - from + 1) }, (_, i) => from + i);
+  return makesWithin(lo - last.hi, hi - first.lo, problem.unit, joint, problem.thin ?? null);
 }
 
 /** Goes back from the cheapest end, taking at every stop a count and a height below that explain the cost. */
 function retrace(problem: Problem, joint: JointLimits, stages: readonly Stage[], allowed: CountAllowed): Plan | null {
-  const nominal = problem.unit + problem.joint.nominal;
   const end = stages[stages.length - 1] as Stage;
   const last = cheapestOf([...end.begun, ...end.bare]);
   if (!last) return null;
   const heights: number[] = [];
   const counts: number[] = [];
+  const thins: boolean[] = [];
   const lastStop = problem.stops[problem.stops.length - 1];
   let height = last.height - (lastStop?.beamDepth ?? 0);
   let bare = (lastStop?.beamDepth ?? 0) === 0 && !isCost(costAt(end.begun, last.height), last.cost);
   for (let i = problem.stops.length - 1; i >= 0; i--) {
     const from = stages[i] as Stage;
     const step = bare
-      ? { count: 0, below: height, bare: true }
-      : stepBelow(problem, joint, from, i, height, nominal, allowed);
+      ? { count: 0, thin: null, below: height, bare: true }
+      : stepBelow(problem, joint, from, i, height, allowed);
     if (!step) return null;
     heights.unshift(height);
     counts.unshift(step.count);
+    thins.unshift(step.thin !== null);
     const depth = problem.stops[i - 1]?.beamDepth ?? 0;
     height = step.below - depth;
     bare = step.bare && depth === 0;
   }
-  return { cost: last.cost, heights, counts };
+  return { cost: last.cost, heights, counts, thins };
 }
 
 function isCost(found: Cost | null, cost: Cost): boolean {
@@ -155,6 +159,7 @@ function isCost(found: Cost | null, cost: Cost): boolean {
 
 interface Step {
   readonly count: number;
+  readonly thin: ThinCourse | null;
   readonly below: number;
   readonly bare: boolean;
 }
@@ -165,23 +170,25 @@ function stepBelow(
   from: Stage,
   index: number,
   height: number,
-  gauge: number,
   allowed: CountAllowed,
 ): Step | null {
+  const gauge = problem.unit + problem.joint.nominal;
   let best: (Step & { cost: Cost; off: number }) | null = null;
   for (const [pieces, leastCount] of [
     [from.begun, 0],
     [from.bare, 1],
   ] as const) {
-    for (const count of countsFrom(pieces, height, height, problem.unit, joint)) {
-      if (count < leastCount || !allowed(index, count)) continue;
-      const limits = heightLimits(count, problem.unit, joint);
-      const wish = height - count * gauge;
+    for (const make of makesFrom(pieces, height, height, problem, joint)) {
+      const { count, thin } = make;
+      if (count < leastCount || !allowed(index, count, thin !== null)) continue;
+      const limits = heightLimits(count, problem.unit, joint, thin);
+      const wish = height - count * gauge + (thin ? problem.unit - thin.most : 0);
       const found = cheapestOf(pieces, height - limits.most, height - limits.least, wish);
       if (!found) continue;
-      const off = count === 0 ? 0 : Math.abs(jointOf(found.height, height, count, gauge));
-      const order = best ? compareCosts(found.cost, best.cost) || off - best.off : -1;
-      if (order < 0) best = { count, below: found.height, bare: leastCount === 1, cost: found.cost, off };
+      const cost = thin ? { ...found.cost, soft: found.cost.soft + 1 } : found.cost;
+      const off = count === 0 ? 0 : stepOf(jointRange(height - found.height, make, problem.unit, joint), problem);
+      const order = best ? compareCosts(cost, best.cost) || off - best.off : -1;
+      if (order < 0) best = { count, thin, below: found.height, bare: leastCount === 1, cost, off };
     }
   }
   return best;
@@ -208,13 +215,8 @@ function cheapestOf(
   return best;
 }
 
-/** The joints of a plan's intervals that hold a course, from the bottom up, in ticks, not rounded. */
-export function jointsOf(problem: Problem, plan: Plan): number[] {
-  let below: number = problem.start;
-  return plan.counts.flatMap((count, i) => {
-    const from = below;
-    const height = plan.heights[i] as number;
-    below = height + (problem.stops[i] as Stop).beamDepth;
-    return count === 0 ? [] : [jointOf(from, height, count, problem.unit)];
-  });
+/** How far from nominal the best of an interval's joints is. */
+function stepOf(range: JointLimits, problem: Problem): number {
+  const { nominal } = problem.joint;
+  return Math.max(0, range.least - nominal, nominal - range.most);
 }

@@ -1,17 +1,19 @@
 /** The ranking of a drawing's coursing, with what has to be left out where the whole can't be searched. */
 import type { WallType } from '../drawing/schema';
-import { ticks, type Ticks } from '../length/ticks';
+import { mm, ticks, type Ticks } from '../length/ticks';
 import type { Reason } from '../reasons';
 import { MOST_COURSES, type Gathered } from './controls';
-import type { Control, Problem, Stop } from './problem';
+import type { Control, Problem, Stop, ThinCourse } from './problem';
 import { rankOnce } from './rememberRanking';
 import type { Ranking } from './rankPlans';
+import type { Proof } from './types';
 
 export interface Settled {
   readonly problem: Problem;
   readonly ranking: Ranking;
   readonly left: readonly Control[];
   readonly openTop: Ticks | null;
+  readonly proof: Proof;
   readonly reasons: readonly Reason[];
 }
 
@@ -24,7 +26,9 @@ const NOTHING: Ranking = { plans: [], complete: true, proved: false };
  */
 export function settle(type: WallType, start: Ticks, gathered: Gathered, most: number): Settled {
   const { openTop } = gathered;
-  let problem: Problem = { unit: type.unit.height, joint: usableJoint(type), start, stops: gathered.stops };
+  const thin = usableThin(type);
+  const { stops } = gathered;
+  let problem: Problem = { unit: type.unit.height, joint: usableJoint(type), start, stops, ...(thin ? { thin } : {}) };
   let left: readonly Control[] = gathered.left;
   const reasons: Reason[] = [];
   const tallest = Math.max(openTop ?? 0, problem.stops[problem.stops.length - 1]?.height ?? 0);
@@ -38,8 +42,10 @@ export function settle(type: WallType, start: Ticks, gathered: Gathered, most: n
     ranking = rankOnce(problem, most);
   }
   if (ranking.plans.length > 0) {
-    if (left.length > gathered.left.length || !ranking.proved) reasons.push(BOUND_REACHED);
-    return { problem, ranking, left, openTop, reasons };
+    const dropped = left.length > gathered.left.length;
+    if (dropped || !ranking.proved) reasons.push(BOUND_REACHED);
+    const proof = dropped || gathered.tooMany ? 'held' : ranking.proved ? 'all' : 'heights';
+    return { problem, ranking, left, openTop, proof, reasons };
   }
   left = [...left, ...problem.stops.flatMap((stop) => stop.controls)];
   problem = { ...problem, stops: [] };
@@ -49,6 +55,7 @@ export function settle(type: WallType, start: Ticks, gathered: Gathered, most: n
     ranking: rankOnce(problem, 1),
     left,
     openTop: ticks(Math.min(tallest, reach)),
+    proof: 'none',
     reasons: [{ code: 'noCoursesFit', weight: 'blocked', thing: { kind: 'wallType', id: type.id } }],
   };
 }
@@ -64,6 +71,18 @@ function usableJoint(type: WallType): Problem['joint'] {
     least: ticks(Math.max(least, nominal - height)),
     most: ticks(Math.min(most, nominal + height)),
   };
+}
+
+/** Courses taller than this are never thinned: costs in parts stay whole numbers up to it (see `partsOf`). */
+const TALLEST_THINNED = mm(10_000);
+
+/** What a thinner course may be: lower than a unit, and in no way where units or joints are past any that there are. */
+function usableThin(type: WallType): ThinCourse | null {
+  if (!type.thinCourse) return null;
+  const { height } = type.unit;
+  const most = ticks(Math.min(type.thinCourse.most, height - 1));
+  if (most < type.thinCourse.least || height + usableJoint(type).most > TALLEST_THINNED) return null;
+  return { least: type.thinCourse.least, most };
 }
 
 /** Half of the soft stops that are no beam's, the lightest first. */

@@ -21,10 +21,12 @@ export interface CourseInterval {
   readonly fromHeight: Ticks;
   readonly toHeight: Ticks;
   readonly count: number;
-  /** The joint exactly: `(toHeight − fromHeight − count × unit) / count`, in ticks, not rounded. */
+  /** The joint exactly, in ticks, not rounded: `(toHeight − fromHeight − count × unit) / count` where every course is whole. */
   readonly joint: number;
   readonly firstCourse: number;
   readonly lastCourse: number;
+  /** Height of the unit of its last course, where that is a thinner one: `joint` is then what every joint is, the last included. */
+  readonly thin?: Ticks;
 }
 
 /** What became of one height that the courses had to meet. */
@@ -63,12 +65,30 @@ export interface Lift {
 export interface CoursingAnswer {
   readonly intervals: readonly CourseInterval[];
   readonly controls: readonly ControlResult[];
-  /**
-   * In strict order: hard heights missed; soft misses, weight × ticks, those beyond the tolerance tenfold; largest step
-   * of a joint from the nominal, in ticks; unevenness, the thickest joint less the thinnest, in ticks.
-   */
-  readonly cost: readonly [number, number, number, number];
+  readonly cost: CoursingCost;
 }
+
+/**
+ * What an answer is judged by, in strict order, the least first: hard heights missed, as many as there are; ticks they
+ * are missed by; soft misses, weight × ticks, those beyond the tolerance tenfold; thinner courses; largest step of a
+ * joint from the nominal, in ticks; unevenness, the thickest joint less the thinnest, in ticks. Every part is
+ * a linear function of the heights, once the counts of courses are chosen.
+ */
+export type CoursingCost = readonly [
+  hardMissed: number,
+  hardTicks: number,
+  soft: number,
+  thin: number,
+  step: number,
+  spread: number,
+];
+
+/**
+ * How far the answer is known to be the best. `all`: in every part of its cost. `heights`: no answer misses less or has
+ * fewer thinner courses, but the work ran out before its joints were proved. `held`: so of the heights that
+ * were held, but the work ran out before the lightest could be.  `none`: no count of courses fits.
+ */
+export type Proof = 'all' | 'heights' | 'held' | 'none';
 
 export interface Coursing {
   readonly unitHeight: Ticks;
@@ -77,6 +97,8 @@ export interface Coursing {
   readonly answer: CoursingAnswer;
   /** The next best answers that really differ, best first. */
   readonly others: readonly CoursingAnswer[];
+  /** Absent where the courses were not chosen by `planCourses`. */
+  readonly proof?: Proof;
   /** Top of the masonry or of the last beam. */
   readonly top: Ticks;
   readonly reasons: readonly Reason[];

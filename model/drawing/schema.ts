@@ -42,6 +42,16 @@ export const wallTypeSchema = z.strictObject({
   bedding: z
     .strictObject({ least: sizeSchema, most: sizeSchema })
     .refine((b) => b.least <= b.most, 'bedding needs least ≤ most'),
+  /**
+   * A thinner course, where the site allows one to each height that courses must meet: the least and most height of its
+   * unit. Alike for a split unit that comes in one height, apart where units are ripped to fit. Absent: every course is whole.
+   */
+  thinCourse: z
+    .strictObject({ least: positiveSizeSchema, most: positiveSizeSchema })
+    .refine((thin) => thin.least <= thin.most, 'a thinner course needs least ≤ most')
+    .optional(),
+  /** Height of the first course's units, where they are others than the rest. */
+  firstCourse: z.strictObject({ height: positiveSizeSchema }).optional(),
   /** Offset of each course over the one below, as a part of the unit's module. */
   bondOffset: z.enum(['half', 'third', 'quarter']),
   /** Least lap of a unit over the one below. */

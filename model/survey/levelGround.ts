@@ -47,7 +47,7 @@ export function levelGround(drawing: Drawing, walls: Walls, survey: Survey): Gro
     profileByRun,
     heightByCorner,
     leastBedding: type.bedding.least,
-    firstCourseTop: ticks(type.bedding.least + type.unit.height),
+    firstCourseTop: ticks(type.bedding.least + (type.firstCourse ?? type.unit).height),
     reasons,
   };
 }

@@ -22,7 +22,7 @@ export function evenCourses(count: number, unit: Ticks, joint: Ticks, bedding: T
     unitHeight: unit,
     courses,
     lifts: [lift],
-    answer: { intervals: [], controls: [], cost: [0, 0, 0, 0] },
+    answer: { intervals: [], controls: [], cost: [0, 0, 0, 0, 0, 0] },
     others: [],
     top,
     reasons: [],
