@@ -81,6 +81,7 @@ function CommandRow({ context }: { context: ActionContext }) {
     <View
       style={{
         flexDirection: 'row',
+        flexWrap: 'wrap',
         alignItems: 'center',
         gap: space.xs,
         paddingHorizontal: space.s,
@@ -89,7 +90,8 @@ function CommandRow({ context }: { context: ActionContext }) {
     >
       <ActionButton action={undo} context={context} />
       <ActionButton action={redo} context={context} />
-      <ActionButton action={fit} context={context} />
+      {/* A door has the most commands of its own: they and these fit one row of a phone without this one. */}
+      {isDoor ? null : <ActionButton action={fit} context={context} />}
       <ActionButton action={snapping} context={context} />
       {penSeen ? <ActionButton action={penDraws} context={context} /> : null}
       <View style={{ flex: 1 }} />
