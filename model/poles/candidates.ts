@@ -28,7 +28,7 @@ export const USUAL_CANDIDATES: CandidateOptions = {
 export const WIDE_CANDIDATES: CandidateOptions = {
   turnMost: 90,
   turnStep: 1,
-  reaches: [66, 62, 70, 58, 75, 54, 80, 50, 85, 46, 90, 42, 95, 38, 100, 33, 110, 120, 130, 150],
+  reaches: [66, 60, 72, 75, 55, 50, 80, 45, 85, 40, 90, 95, 36, 100, 33, 110, 120, 130, 150],
 };
 
 /** The reach that a brace is best at, in per cent of its fixing height (typical: half the height to the whole of it). */

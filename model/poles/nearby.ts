@@ -127,6 +127,18 @@ export class Nearby {
     return over;
   }
 
+  /** Everything that refuses a brace with this foot. */
+  refusers(foot: PlanPoint): ThingRef[] {
+    const line: BraceLine = { from: this.at, foot };
+    const { x, y } = this.at;
+    const found: ThingRef[] = this.crossesBoundary(line) ? [{ kind: 'boundary', id: 'boundary' }] : [];
+    for (const obstacle of this.obstacles) {
+      if (apart(obstacle.box, this.kit.clearance, x, y, foot.x, foot.y) || this.isPlain(obstacle, foot)) continue;
+      if (verdictOf(line, obstacle, this.poleId, this.kit) === 'refused') found.push(obstacle.thing);
+    }
+    return found;
+  }
+
   /** True where the obstacle surely says nothing; of a wall, exactly where it says nothing. */
   private isPlain({ kind, flat, box }: Obstacle, foot: PlanPoint): boolean {
     const { x, y } = this.at;

@@ -16,7 +16,8 @@ import {
   type CandidateOptions,
 } from './candidates';
 import { bracesConflict, type BraceLine } from './clearance';
-import { turnedFor, whyBlocked } from './explain';
+import type { Budget } from './culprits';
+import { EXPLAIN_WORK, turnedFor, whyBlocked } from './explain';
 import { groundOf, obstacleOf, obstaclesOf, type Ground } from './obstacles';
 import { PoleBraces, type AngleLimits, type PoleSite } from './poleBraces';
 import { USUAL_BOUND, type SearchBound } from './group';
@@ -142,6 +143,7 @@ function searchAll(
   stood: readonly Stood[],
   ground: Ground,
   options: PoleOptions,
+  budget: Budget,
   reasons: Reason[],
 ): Search | null {
   const kit = drawing.poleKit;
@@ -167,7 +169,7 @@ function searchAll(
       const braces = bracesAt(site, ground, options.wide);
       sites.push(braces.site);
       if (braces.site.limits === LOOSE_ANGLES) {
-        const why = whyBlocked(drawing, walls, { ...braces.site, limits }, ground);
+        const why = whyBlocked(drawing, walls, { ...braces.site, limits }, ground, budget);
         reasons.push({ ...why, code: 'braceAngleOut', weight: 'warning', rule: 'braceAngleLeast' });
       }
       return braces;
@@ -187,6 +189,7 @@ function bracesByPole(
   walls: Walls,
   search: Search,
   ground: Ground,
+  budget: Budget,
   reasons: Reason[],
 ): Map<string, readonly Brace[]> {
   const placedLines: BraceLine[] = search.placed.pairs.includes(null) ? linesPlaced(search) : [];
@@ -208,7 +211,7 @@ function bracesByPole(
     if (pole.own()) {
       const against = group.flatMap((j) => (j === i ? [] : (search.sites[j]?.poleId ?? []))).map(poleRef);
       reasons.push({ code: 'braceBlocked', weight: 'blocked', thing: poleRef(site.poleId), against });
-    } else reasons.push(whyBlocked(drawing, walls, site, ground));
+    } else reasons.push(whyBlocked(drawing, walls, site, ground, budget));
     const single = lonelyBrace(pole, placedLines, site.kit.clearance);
     if (!single) return;
     placedLines.push({ from: pole.at, foot: single[0].foot });
@@ -242,8 +245,11 @@ export function placePoles(drawing: Drawing, walls: Walls, options: PoleOptions 
   const stood = standAll(drawing, walls, groundOf(fixed, drawing.boundary), reasons);
   const poleObstacles = stood.map(({ seat, standing }) => obstacleOf('pole', poleRef(seat.id), standing.ring));
   const ground = groundOf([...fixed, ...poleObstacles], drawing.boundary);
-  const search = searchAll(drawing, walls, stood, ground, options, reasons);
-  const braces = search ? bracesByPole(drawing, walls, search, ground, reasons) : new Map<string, readonly Brace[]>();
+  const budget = { left: EXPLAIN_WORK };
+  const search = searchAll(drawing, walls, stood, ground, options, budget, reasons);
+  const braces = search
+    ? bracesByPole(drawing, walls, search, ground, budget, reasons)
+    : new Map<string, readonly Brace[]>();
   const poles = stood.map((each) => storyPole(each, each.seat.vertex, braces.get(each.seat.id) ?? []));
   const idsOf = (group: readonly number[]) => group.flatMap((i) => search?.sites[i]?.poleId ?? []);
   for (const group of search?.placed.bounded ?? []) {

@@ -142,7 +142,7 @@ export interface Standing extends Stand {
 }
 
 /** What the section stands in, its own frames apart. */
-function standsIn(ring: readonly PlanPoint[], ground: Ground): ThingRef[] {
+export function standsIn(ring: readonly PlanPoint[], ground: Ground): ThingRef[] {
   const found: ThingRef[] = [];
   const box = boxOf(ring);
   if (!box) return found;
