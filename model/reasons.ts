@@ -24,6 +24,11 @@ export type ReasonCode =
   | 'surveyAssumed'
   | 'cornerNotRead'
   | 'beddingOverMost'
+  | 'rereadingsDiffer'
+  | 'levelsNotClosed'
+  | 'misclosureUnchecked'
+  | 'misclosureOverMost'
+  | 'collimationOverMost'
   // coursing and lifts
   | 'heightBelowFirstCourse'
   | 'hardHeightNotMet'

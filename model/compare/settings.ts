@@ -95,8 +95,10 @@ export function compareSettings(before: Drawing, after: Drawing): Change[] {
 }
 
 export function compareSurveys(before: Survey, after: Survey): Change[] {
-  const matched = matchById(before.readings, after.readings);
+  const matched = matchById<{ readonly id: string }>(before.readings, after.readings);
   const changed = matched.both.filter(([was, now]) => !sameData(was, now)).length;
-  const count = matched.added.length + matched.removed.length + changed;
+  // What is not a reading (the method, the benchmark, the closing) counts as one change.
+  const otherwise = sameData({ ...before, readings: [] }, { ...after, readings: [] }) ? 0 : 1;
+  const count = matched.added.length + matched.removed.length + changed + otherwise;
   return count === 0 ? [] : [plain('survey', SITE, { count: String(count) })];
 }

@@ -3,8 +3,11 @@ import type { Drawing } from '../drawing/schema';
 import { feet, inches, mm } from '../length/ticks';
 import type { RuleId } from './ids';
 
-/** `ticks` for lengths; `ratio` of one length to another; `degrees`; a plain `number`. */
-export type RuleUnit = 'ticks' | 'ratio' | 'degrees' | 'number';
+/**
+ * `ticks` for lengths; `ratio` of one length to another; `degrees`; a plain `number`; `mmPerRootKm` for the misclosure
+ * of levels, millimetres × √(kilometres levelled); `microgramsPerCubicMetre` of air.
+ */
+export type RuleUnit = 'ticks' | 'ratio' | 'degrees' | 'number' | 'mmPerRootKm' | 'microgramsPerCubicMetre';
 
 /** `code`: a clause read in the code itself. `guidance`: published advice, or a code known only at second hand. */
 export type RuleStanding = 'code' | 'guidance' | 'commonPractice';
@@ -21,6 +24,12 @@ export interface Rule {
 
 const TMS = 'TMS 602, as explained by the Mason Contractors Association (secondary)';
 const PRACTICE = 'common practice, no source';
+const LABC = 'LABC Warranty Technical Manual v8, ch. 1 (UK)';
+const MINKE = 'Minke, Building with Earth, p. 140 (earthquake guidance)';
+const NMAC_23 = 'New Mexico Earthen Building Materials Code (2021), NMAC 14.7.4.23 A';
+const BEAM = 'New Mexico practice for earth walls (secondary)';
+const MUD = 'Practical Action, "Mud as a mortar", p. 4-5';
+const SILICA = '29 CFR 1926.1153, over 8 hours';
 
 export const RULES: Readonly<Record<RuleId, Rule>> = {
   liftToThickness: {
@@ -35,7 +44,7 @@ export const RULES: Readonly<Record<RuleId, Rule>> = {
     id: 'lateralSupportMost',
     value: feet(24),
     unit: 'ticks',
-    source: 'New Mexico Earthen Building Materials Code (2021), NMAC 14.7.4.23 A',
+    source: NMAC_23,
     standing: 'code',
   },
   leastLapPart: {
@@ -123,9 +132,79 @@ export const RULES: Readonly<Record<RuleId, Rule>> = {
     id: 'lintelBearingLeast',
     value: mm(400),
     unit: 'ticks',
-    source: 'Minke, Building with Earth, p. 140 (earthquake guidance)',
+    source: MINKE,
     standing: 'guidance',
   },
+  levelMisclosure: {
+    id: 'levelMisclosure',
+    value: 12,
+    unit: 'mmPerRootKm',
+    source: 'NOAA/FGCS third order: 12 mm √K, K in kilometres (secondary)',
+    standing: 'guidance',
+  },
+  collimationMost: {
+    id: 'collimationMost',
+    value: 0.0001,
+    unit: 'ratio',
+    source: `${PRACTICE}: 1 mm in 10 m`,
+    standing: 'commonPractice',
+  },
+  rereadingMost: {
+    id: 'rereadingMost',
+    value: inches(1 / 8),
+    unit: 'ticks',
+    source: PRACTICE,
+    standing: 'commonPractice',
+  },
+  plumbToleranceTwenty: {
+    id: 'plumbToleranceTwenty',
+    value: inches(3 / 8),
+    unit: 'ticks',
+    source: TMS,
+    standing: 'guidance',
+  },
+  firstBedJointMostGrouted: {
+    id: 'firstBedJointMostGrouted',
+    value: inches(5 / 4),
+    unit: 'ticks',
+    source: TMS,
+    standing: 'guidance',
+  },
+  shortLevelMost: { id: 'shortLevelMost', value: mm(10), unit: 'ticks', source: LABC, standing: 'guidance' },
+  longLevelMost: { id: 'longLevelMost', value: mm(15), unit: 'ticks', source: LABC, standing: 'guidance' },
+  jointFromMeanMost: { id: 'jointFromMeanMost', value: mm(5), unit: 'ticks', source: LABC, standing: 'guidance' },
+  squareMost: { id: 'squareMost', value: inches(1 / 4), unit: 'ticks', source: PRACTICE, standing: 'commonPractice' },
+  openingWidthMost: { id: 'openingWidthMost', value: mm(1200), unit: 'ticks', source: MINKE, standing: 'guidance' },
+  openingPartMost: { id: 'openingPartMost', value: 1 / 3, unit: 'ratio', source: MINKE, standing: 'guidance' },
+  pierWidthLeast: { id: 'pierWidthLeast', value: mm(1000), unit: 'ticks', source: MINKE, standing: 'guidance' },
+  pierPartLeast: { id: 'pierPartLeast', value: 1 / 3, unit: 'ratio', source: MINKE, standing: 'guidance' },
+  storeysMost: { id: 'storeysMost', value: 2, unit: 'number', source: NMAC_23, standing: 'code' },
+  twoStoreyThicknessBelow: {
+    id: 'twoStoreyThicknessBelow',
+    value: inches(14),
+    unit: 'ticks',
+    source: NMAC_23,
+    standing: 'code',
+  },
+  twoStoreyThicknessAbove: {
+    id: 'twoStoreyThicknessAbove',
+    value: inches(10),
+    unit: 'ticks',
+    source: NMAC_23,
+    standing: 'code',
+  },
+  beamDepthLeast: { id: 'beamDepthLeast', value: inches(6), unit: 'ticks', source: BEAM, standing: 'guidance' },
+  beamWidthLeast: { id: 'beamWidthLeast', value: inches(10), unit: 'ticks', source: BEAM, standing: 'guidance' },
+  earthJointLeast: { id: 'earthJointLeast', value: mm(10), unit: 'ticks', source: MUD, standing: 'guidance' },
+  grainToJointMost: { id: 'grainToJointMost', value: 1 / 3, unit: 'ratio', source: MUD, standing: 'guidance' },
+  silicaActionLevel: {
+    id: 'silicaActionLevel',
+    value: 25,
+    unit: 'microgramsPerCubicMetre',
+    source: SILICA,
+    standing: 'guidance',
+  },
+  silicaLimit: { id: 'silicaLimit', value: 50, unit: 'microgramsPerCubicMetre', source: SILICA, standing: 'guidance' },
 };
 
 /** The value in force on this drawing: the site's own where it has changed the rule. */
@@ -136,4 +215,20 @@ export function ruleValue(drawing: Pick<Drawing, 'ruleValues'>, id: RuleId): num
 /** Whether the site has its own value for this rule. */
 export function ruleChanged(drawing: Pick<Drawing, 'ruleValues'>, id: RuleId): boolean {
   return ruleValue(drawing, id) !== RULES[id].value;
+}
+
+/** A rule as it stands on a drawing. */
+export interface RuleInForce extends Rule {
+  /** The number that is checked against: the site's own where it has one. */
+  readonly inForce: number;
+  /** The site's own value; null where it takes the registry's. */
+  readonly own: number | null;
+}
+
+/** Every rule with its value, unit, source and standing, and the site's own value where it has set one. */
+export function rulesInForce(drawing: Pick<Drawing, 'ruleValues'>): readonly RuleInForce[] {
+  return Object.values(RULES).map((rule) => {
+    const own = drawing.ruleValues[rule.id] ?? null;
+    return { ...rule, own, inForce: own ?? rule.value };
+  });
 }

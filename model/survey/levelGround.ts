@@ -3,22 +3,26 @@ import type { Drawing } from '../drawing/schema';
 import type { Survey } from '../drawing/surveySchema';
 import { inches, mm, ticks, type Ticks } from '../length/ticks';
 import type { Reason } from '../reasons';
+import { ruleValue } from '../rules/registry';
 import type { Walls } from '../walls/types';
 import { coursedType } from './coursedType';
 import { fillCorners } from './fillCorners';
+import { bookReasons } from './bookReasons';
 import { placeReadings, type PlacedReading } from './placeReadings';
+import { takeReadings } from './takeReadings';
 import type { Ground, GroundStation, ProfilePoint } from './types';
 
 /**
- * Levels the foundation from readings measured down from one level line. The smallest reading is the high point and
+ * Levels the foundation from readings measured down from one level line, or from a level book reduced to the same. The smallest reading is the high point and
  * becomes height zero; every other place is lower by the difference, and its bedding is thicker by the same. The
  * first-course top is the high point + least bedding + one unit, one level all the way round (common practice, no source).
  * With no reading on the drawing the foundation is taken as level, 48 in or 1 200 mm below the level line.
  */
 export function levelGround(drawing: Drawing, walls: Walls, survey: Survey): Ground {
   const type = coursedType(drawing);
-  const { placed, reasons: placing } = placeReadings(walls, survey);
-  const reasons: Reason[] = [...placing];
+  const { readings, book } = takeReadings(survey, drawing.ruleValues);
+  const { placed, reasons: placing } = placeReadings(walls, readings);
+  const reasons: Reason[] = [...placing, ...(book ? bookReasons(drawing, book) : [])];
   const assumed = placed.length === 0;
   const least = assumed
     ? assumedLevelLine(drawing)
@@ -26,7 +30,17 @@ export function levelGround(drawing: Drawing, walls: Walls, survey: Survey): Gro
   if (assumed) reasons.push({ code: 'surveyAssumed', weight: 'note', thing: { kind: 'site', id: 'site' } });
 
   const stations = placed.map((one) => toStation(one, least, type.bedding));
+  const rereadingMost = ruleValue(drawing, 'rereadingMost');
   for (const station of stations) {
+    if (station.spread > rereadingMost) {
+      reasons.push({
+        code: 'rereadingsDiffer',
+        weight: 'note',
+        thing: { kind: 'station', id: station.readingId },
+        rule: 'rereadingMost',
+        amount: station.spread,
+      });
+    }
     if (station.over > 0) {
       reasons.push({
         code: 'beddingOverMost',
@@ -48,6 +62,7 @@ export function levelGround(drawing: Drawing, walls: Walls, survey: Survey): Gro
     heightByCorner,
     leastBedding: type.bedding.least,
     firstCourseTop: ticks(type.bedding.least + (type.firstCourse ?? type.unit).height),
+    book,
     reasons,
   };
 }
@@ -62,7 +77,8 @@ function heightOf(down: Ticks, least: Ticks): Ticks {
 }
 
 function toStation(placed: PlacedReading, least: Ticks, limits: { least: Ticks; most: Ticks }): GroundStation {
-  const { reading, at } = placed;
+  const { reading, at, earlier } = placed;
+  const downs = [reading, ...earlier].map(({ down }) => down);
   const bedding = ticks(limits.least + (reading.down - least));
   return {
     readingId: reading.id,
@@ -72,6 +88,8 @@ function toStation(placed: PlacedReading, least: Ticks, limits: { least: Ticks; 
     height: heightOf(reading.down, least),
     bedding,
     over: ticks(Math.max(0, bedding - limits.most)),
+    earlier: earlier.map(({ id, down }) => ({ readingId: id, down })),
+    spread: ticks(downs.reduce((a, b) => Math.max(a, b), -Infinity) - downs.reduce((a, b) => Math.min(a, b), Infinity)),
   };
 }
 

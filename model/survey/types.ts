@@ -2,6 +2,7 @@ import type { PlanPoint } from '../geometry/point';
 import type { Ticks } from '../length/ticks';
 import type { Station } from '../drawing/surveySchema';
 import type { Reason } from '../reasons';
+import type { LevelBook } from './levelBook';
 
 export interface GroundStation {
   readonly readingId: string;
@@ -13,6 +14,10 @@ export interface GroundStation {
   readonly bedding: Ticks;
   /** How much the bedding is over its most; 0 when within. */
   readonly over: Ticks;
+  /** What was read here before, first to last, as far down from the level line: kept, but not in force. */
+  readonly earlier: readonly { readonly readingId: string; readonly down: Ticks }[];
+  /** Between the largest and smallest of all the readings here; 0 for one. */
+  readonly spread: Ticks;
 }
 
 export interface ProfilePoint {
@@ -36,5 +41,7 @@ export interface Ground {
   readonly heightByCorner: ReadonlyMap<string, Ticks>;
   readonly leastBedding: Ticks;
   readonly firstCourseTop: Ticks;
+  /** The rod readings worked out; null where the foundation was measured down. */
+  readonly book: LevelBook | null;
   readonly reasons: readonly Reason[];
 }

@@ -43,11 +43,12 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
   const [adding, setAdding] = useState(false);
   const [listed, setListed] = useState(false);
   const phone = layout.name === 'phone';
-  const editable = may(role, 'editSurvey');
+  const byRod = survey.method === 'rod';
+  const editable = may(role, 'editSurvey') && !byRod;
   const { units, tapeStep: step } = drawing;
   const { walls, ground } = setOut;
 
-  const book = listStations(walls, survey);
+  const book = listStations(walls, survey, drawing.ruleValues);
   const entries = withAdded(book.entries, added, (runId) => {
     const run = walls.runById.get(runId);
     return run ? { run: run.name, letter: walls.cornerById.get(run.ends[0].cornerId)?.letter ?? '' } : null;
@@ -185,7 +186,7 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
             {profile}
             {editable ? null : (
               <View style={{ padding: space.l, paddingBottom: 0 }}>
-                <Caution weight="note" text={t('levels.readOnly')} />
+                <Caution weight="note" text={t(byRod ? 'levels.byRod' : 'levels.readOnly')} />
               </View>
             )}
             {list}
@@ -197,7 +198,7 @@ export function LevelsScreen({ siteId }: { siteId: string }) {
             {profile}
             {editable ? null : (
               <View style={{ padding: space.l, paddingBottom: 0 }}>
-                <Caution weight="note" text={t('levels.readOnly')} />
+                <Caution weight="note" text={t(byRod ? 'levels.byRod' : 'levels.readOnly')} />
               </View>
             )}
             {list}

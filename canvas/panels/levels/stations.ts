@@ -1,7 +1,9 @@
 /** The stations of a site in the order in which one walks round the walls. */
+import type { Drawing } from '../../../model/drawing/schema';
 import type { Reading, Station, Survey } from '../../../model/drawing/surveySchema';
 import type { Ticks } from '../../../model/length/ticks';
 import { placeReadings, type PlacedReading } from '../../../model/survey/placeReadings';
+import { takeReadings } from '../../../model/survey/takeReadings';
 import type { RunGeometry, Walls } from '../../../model/walls/types';
 
 export interface StationEntry {
@@ -56,8 +58,9 @@ function inOrder(walls: Walls): readonly (RunGeometry | { readonly cornerId: str
 }
 
 /** Every corner, read or not, and every station that was read along a run; of a station read twice, its last reading. */
-export function listStations(walls: Walls, survey: Survey): StationBook {
-  const { placed, reasons } = placeReadings(walls, survey);
+export function listStations(walls: Walls, survey: Survey, ruleValues: Drawing['ruleValues'] = {}): StationBook {
+  const { readings } = takeReadings(survey, ruleValues);
+  const { placed, reasons } = placeReadings(walls, readings);
   const atCorner = new Map<string, Reading>();
   const alongRun = new Map<string, PlacedReading[]>();
   for (const one of placed) {
@@ -72,7 +75,7 @@ export function listStations(walls: Walls, survey: Survey): StationBook {
     return [{ key: stationKey(station), station, letter, along: null, reading }];
   });
   const offIds = new Set(reasons.filter(({ code }) => code === 'readingOffDrawing').map(({ thing }) => thing.id));
-  return { entries, off: survey.readings.filter(({ id }) => offIds.has(id)) };
+  return { entries, off: readings.filter(({ id }) => offIds.has(id)) };
 }
 
 function along(run: RunGeometry, walls: Walls, placed: readonly PlacedReading[]): StationEntry[] {

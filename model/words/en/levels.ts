@@ -42,6 +42,7 @@ export const levels = {
   offDrawing_other: '{{count}} readings belong to no corner or wall run of this drawing.',
   dropOff: 'Remove them',
   profile: 'Profile of the foundation along the walls, drawn taller than it is. The stations are listed below.',
+  byRod: 'These levels were read by rod; each station is shown as far below the level line as its book makes it.',
   readOnly: 'Your role reads the levels; a mason, designer or lead enters them.',
   empty: {
     title: 'Nothing to level yet',

@@ -134,6 +134,25 @@ export const reasons = {
     plain: 'Bedding at {{running}} is thicker than its most.',
     full: 'Bedding at {{running}} is {{amount}} over its most: thicken it in layers, grind the high stretch, or start a levelling course.',
   },
+  rereadingsDiffer: {
+    plain: '{{thing}} was taken more than once, and the readings differ: the last one counts.',
+    full: '{{thing}} was taken more than once, {{amount}} apart: the last one counts. Read it again.',
+  },
+  levelsNotClosed: {
+    plain: 'The levels do not come back to a known height, so that nothing shows a misread rod.',
+  },
+  misclosureUnchecked: {
+    plain: 'How far the levels may miss can’t be said without the length levelled.',
+    full: 'The levels close with a miss of {{amount}}. Whether that is allowed can’t be said without the length levelled.',
+  },
+  misclosureOverMost: {
+    plain: 'The levels miss the known height by more than the rule allows: level the round again.',
+    full: 'The levels miss the known height by {{amount}} more than the rule allows: level the round again.',
+  },
+  collimationOverMost: {
+    plain: 'The level is out of adjustment: keep backsights and foresights alike in length, or have it adjusted.',
+    full: 'The level is out of adjustment by {{amount}} in 10 m more than the rule allows: keep backsights and foresights alike in length, or have it adjusted.',
+  },
 
   heightBelowFirstCourse: {
     plain: '{{thing}} is below the top of the first course.',

@@ -3,7 +3,7 @@ import { withoutReadings, withReading } from '../../../canvas/panels/levels/read
 import { listStations, nextUnread, stationKey } from '../../../canvas/panels/levels/stations';
 import { newDrawing } from '../../../model/drawing/defaults';
 import type { Drawing } from '../../../model/drawing/schema';
-import { EMPTY_SURVEY, type Station, type Survey } from '../../../model/drawing/surveySchema';
+import { EMPTY_SURVEY, type Reading, type Station, type Survey } from '../../../model/drawing/surveySchema';
 import { feet, inches } from '../../../model/length/ticks';
 import { layOutWalls } from '../../../model/walls/layOutWalls';
 
@@ -94,15 +94,32 @@ describe('the stations of a level book', () => {
   });
 });
 
+function measured(of: Survey): readonly Reading[] {
+  return of.method === 'measureDown' ? of.readings : [];
+}
+
 describe('changing a survey', () => {
   it('puts a reading in place of its own, leaving the others and the original alone', () => {
     const before = survey(['a', corner('A'), 48], ['b', corner('B'), 47]);
     const after = withReading(before, 'a', corner('A'), inches(46));
-    expect(after.readings.map(({ id, down }) => [id, down])).toEqual([
+    expect(measured(after).map(({ id, down }) => [id, down])).toEqual([
       ['a', inches(46)],
       ['b', inches(47)],
     ]);
-    expect(before.readings[0]?.down).toBe(inches(48));
+    expect(measured(before)[0]?.down).toBe(inches(48));
     expect(withoutReadings(after, ['b', 'none']).readings.map(({ id }) => id)).toEqual(['a']);
+  });
+
+  it('leaves a rod survey as it is: its rows belong to their set-ups', () => {
+    const byRod: Survey = {
+      version: 1,
+      method: 'rod',
+      benchmark: { name: 'Nail', height: inches(0) },
+      closing: null,
+      share: 'setUps',
+      readings: [{ id: 'a', station: corner('A'), sight: 'back', rod: inches(48) }],
+    };
+    expect(withReading(byRod, 'a', corner('A'), inches(46))).toBe(byRod);
+    expect(withoutReadings(byRod, ['a'])).toBe(byRod);
   });
 });

@@ -64,8 +64,8 @@ describe('saving a draft', () => {
   it('saves the drawing and the survey apart, each on its own version', async () => {
     const b = bench();
     b.draft.edit('add', (d) => withWindow(d, 'AB', 2, 3));
-    b.draft.editSurvey((s) => ({
-      ...s,
+    b.draft.editSurvey(() => ({
+      ...EMPTY_SURVEY,
       readings: [{ id: 'r', station: { kind: 'corner', cornerId: 'A' }, down: feet(4) }],
     }));
     await b.pass();
@@ -133,8 +133,8 @@ describe('saving a draft', () => {
   it('saves a mason’s readings and never a drawing', async () => {
     const kept = withWindow(square, 'AB', 6, 2);
     const b = bench('mason', { drawing: { value: kept, baseVersion: 2, attempt: null }, survey: null });
-    b.draft.editSurvey((s) => ({
-      ...s,
+    b.draft.editSurvey(() => ({
+      ...EMPTY_SURVEY,
       readings: [{ id: 'r', station: { kind: 'corner', cornerId: 'A' }, down: feet(4) }],
     }));
     await b.pass();

@@ -145,10 +145,10 @@ describe('the draft on the screen', () => {
     expect(s.get().drawing).toBe(square);
     expect(s.get().mode).toBe('view');
     const reading = { id: 'r', station: { kind: 'corner' as const, cornerId: 'A' }, down: feet(4) };
-    s.editSurvey((survey) => ({ ...survey, readings: [reading] }));
+    s.editSurvey(() => ({ ...EMPTY_SURVEY, readings: [reading] }));
     expect(s.get().survey.readings).toEqual([reading]);
     const o = store(square, 'observer');
-    o.editSurvey((survey) => ({ ...survey, readings: [reading] }));
+    o.editSurvey(() => ({ ...EMPTY_SURVEY, readings: [reading] }));
     expect(o.get().survey).toBe(EMPTY_SURVEY);
   });
 
