@@ -89,7 +89,15 @@ export function tryBrace(line: BraceLine, poleId: string, kit: PoleKit, ground: 
 }
 
 /** True where the point (x, y) lies nearer than √`square` to the segment from (ax, ay) by (ux, uy). */
-function pointNear(x: number, y: number, ax: number, ay: number, ux: number, uy: number, square: number): boolean {
+export function pointNear(
+  x: number,
+  y: number,
+  ax: number,
+  ay: number,
+  ux: number,
+  uy: number,
+  square: number,
+): boolean {
   const px = x - ax;
   const py = y - ay;
   const along = px * ux + py * uy;

@@ -1,8 +1,9 @@
 /** The cheapest placing of a group of poles whose braces compete for the same ground. */
 import { distance } from '../geometry/vec';
 import type { Candidate } from './candidates';
-import { bracesConflict, type BraceLine } from './clearance';
-import { cheapestPair, pairOf, pairWith, rankedBy, rankedWith, type Ranked } from './pairs';
+import { bracesConflict } from './clearance';
+import { placeInTurn } from './inTurn';
+import { pairOf, pairWith, rankedBy, rankedWith, type Ranked } from './pairs';
 import type { Pair, PoleBraces } from './poleBraces';
 
 /**
@@ -33,7 +34,7 @@ export interface SearchBound {
   readonly inAll: number;
 }
 
-export const USUAL_BOUND: SearchBound = { most: 3_000_000, inAll: 9_000_000 };
+export const USUAL_BOUND: SearchBound = { most: 1_000_000, inAll: 3_000_000 };
 
 export interface Solved {
   readonly pairs: ReadonlyMap<number, Pair>;
@@ -256,24 +257,4 @@ function settle(parts: readonly Part[], clearance: number, lower: number, spent:
     if (pair) pairs.set(member.index, pair);
   });
   return { pairs, cost, lower: Math.min(lower, cost), exact: false, spent };
-}
-
-/** Pairs for poles in turn, each the cheapest that keeps clear of `fixed` and of those before it; null where none does. */
-export function placeInTurn(
-  poles: readonly PoleBraces[],
-  fixed: readonly BraceLine[],
-  clearance: number,
-): readonly (Pair | null)[] {
-  const placed = [...fixed];
-  return poles.map((pole) => {
-    const room = pole.longestReach + clearance + 1;
-    const near = placed.filter(({ from, foot }) => distance(from, pole.at) <= distance(from, foot) + room);
-    const refuse = (candidate: Candidate) => {
-      const line = { from: pole.at, foot: candidate.foot };
-      return near.some((other) => bracesConflict(line, other, clearance));
-    };
-    const pair = cheapestPair(pole, near.length > 0 ? refuse : undefined);
-    if (pair) placed.push(...pair.braces.map((brace) => ({ from: pole.at, foot: brace.foot })));
-    return pair;
-  });
 }

@@ -7,7 +7,7 @@ import { boxAround, type Box } from '../geometry/box';
 import type { PlanPoint } from '../geometry/point';
 import { whereIs } from '../geometry/polygon';
 import type { ThingRef } from '../things';
-import { leavesBoundary, verdictOf, type BraceLine } from './clearance';
+import { leavesBoundary, pointNear, verdictOf, type BraceLine } from './clearance';
 import { flatOf, type Ground, type Obstacle } from './obstacles';
 
 const NOTHING_OVER: readonly ThingRef[] = [];
@@ -119,7 +119,7 @@ export class Nearby {
     let over = NOTHING_OVER;
     for (const obstacle of this.obstacles) {
       if (apart(obstacle.box, this.kit.clearance, x, y, foot.x, foot.y) || this.isPlain(obstacle, foot)) continue;
-      if (obstacle.kind === 'wall') return null;
+      if (obstacle.kind === 'wall' || obstacle.kind === 'pole') return null;
       const verdict = verdictOf(line, obstacle, this.poleId, this.kit);
       if (verdict === 'refused') return null;
       if (verdict === 'over') over = [...over, obstacle.thing];
@@ -139,14 +139,27 @@ export class Nearby {
     return found;
   }
 
-  /** True where the obstacle surely says nothing; of a wall, exactly where it says nothing. */
+  /** True where the obstacle surely says nothing; of a wall or a pole, exactly where it says nothing. */
   private isPlain({ kind, flat, box }: Obstacle, foot: PlanPoint): boolean {
     const { x, y } = this.at;
-    if (kind === 'pole') return false;
+    if (kind === 'pole') return !this.comesNear(flat, foot);
     if (meetsEdge(flat, x, y, foot.x, foot.y) || within(flat, foot.x, foot.y)) return false;
     if (kind !== 'wall') return true;
     const { clearance } = this.kit;
     return apart(box, clearance, foot.x, foot.y, foot.x, foot.y) || !nearEdge(flat, foot.x, foot.y, clearance);
+  }
+
+  /** Whether a brace comes nearer to a ring than the clearance. */
+  private comesNear(flat: Float64Array, foot: PlanPoint): boolean {
+    const { x, y } = this.at;
+    const { clearance } = this.kit;
+    if (clearance === 0) return false;
+    if (meetsEdge(flat, x, y, foot.x, foot.y) || within(flat, foot.x, foot.y)) return true;
+    if (nearEdge(flat, x, y, clearance) || nearEdge(flat, foot.x, foot.y, clearance)) return true;
+    for (let i = 2; i < flat.length; i += 2)
+      if (pointNear(flat[i] as number, flat[i + 1] as number, x, y, foot.x - x, foot.y - y, clearance * clearance))
+        return true;
+    return false;
   }
 
   private crossesBoundary(line: BraceLine): boolean {

@@ -21,6 +21,7 @@ import { EXPLAIN_WORK, turnedFor, whyBlocked } from './explain';
 import { groundOf, obstacleOf, obstaclesOf, type Ground } from './obstacles';
 import { PoleBraces, type AngleLimits, type PoleSite } from './poleBraces';
 import { USUAL_BOUND, type SearchBound } from './group';
+import { rivalsOf } from './rivals';
 import { placeBraces, type Placed } from './search';
 import { nearJambs, standClear, takenOf, type Standing } from './section';
 import { seatsAlongRuns, seatsAtCorners, type Seat } from './seats';
@@ -174,7 +175,21 @@ function searchAll(
       }
       return braces;
     });
-  return { sites, poles, placed: placeBraces(poles, kit.clearance, options.bound) };
+  const placed = placeBraces(poles, kit.clearance, options.bound);
+  const left = leftOut(poles, placed);
+  if (left.size === 0 || placed.bounded.length > 0) return { sites, poles, placed };
+  // What the others' braces leave no usual place for may have a steeper or wider one.
+  const widened = poles.map((pole, i) =>
+    left.has(i) ? new PoleBraces({ ...pole.site, options: options.wide }, ground) : pole,
+  );
+  const again = placeBraces(widened, kit.clearance, options.bound);
+  if (leftOut(widened, again).size >= left.size) return { sites, poles, placed };
+  return { sites: widened.map((pole) => pole.site), poles: widened, placed: again };
+}
+
+/** Poles that could be braced were it not for the others. */
+function leftOut(poles: readonly PoleBraces[], placed: Placed): ReadonlySet<number> {
+  return new Set(poles.flatMap((pole, i) => (pole.own() && !placed.pairs[i] ? [i] : [])));
 }
 
 function linesPlaced(search: Search): BraceLine[] {
@@ -209,7 +224,8 @@ function bracesByPole(
     }
     const group = search.placed.groups.find((members) => members.includes(i)) ?? [];
     if (pole.own()) {
-      const against = group.flatMap((j) => (j === i ? [] : (search.sites[j]?.poleId ?? []))).map(poleRef);
+      const rivals = rivalsOf(i, group, search.poles, site.kit.clearance);
+      const against = rivals.flatMap((j) => search.sites[j]?.poleId ?? []).map(poleRef);
       reasons.push({ code: 'braceBlocked', weight: 'blocked', thing: poleRef(site.poleId), against });
     } else reasons.push(whyBlocked(drawing, walls, site, ground, budget));
     const single = lonelyBrace(pole, placedLines, site.kit.clearance);

@@ -3,7 +3,7 @@
  *
  * Every pole first takes its own cheapest pair. Where braces of different poles come too near one another, those poles
  * become one group and those braces are relevant; the group is solved again, exactly, with only the conflicts between its
- * relevant braces in force; and so on, joining groups and making braces relevant, until no conflict is left.
+ * relevant braces in force; and so on, joining groups two at a time and making braces relevant, until no conflict is left.
  *
  * That the result is the least for the whole site: let G1 … Gk be the final groups. In any placing of all poles without
  * conflicts, the poles of Gi have no conflict among their relevant braces, so they cost at least the optimum that was found
@@ -14,7 +14,8 @@
 import { boxOfSegment, inflate } from '../geometry/box';
 import { gridOf } from '../geometry/grid';
 import { bracesConflict, type BraceLine } from './clearance';
-import { placeInTurn, solveGroup, UNBRACED, type Member, type Part, type SearchBound, type Solved } from './group';
+import { placeInTurn } from './inTurn';
+import { solveGroup, UNBRACED, type Member, type Part, type SearchBound, type Solved } from './group';
 import type { Pair, PoleBraces } from './poleBraces';
 
 export interface Placed {
@@ -95,6 +96,12 @@ class Groups {
     this.parts.delete(gone);
   }
 
+  /** False for two groups of which one is to be solved again as it is: joined later, it brings a better bound along. */
+  mayJoin(a: number, b: number): boolean {
+    const [one, other] = [this.of[a] ?? a, this.of[b] ?? b];
+    return one === other || (!this.parts.has(one) && !this.parts.has(other));
+  }
+
   private open(group: number): Group[] {
     const parts = this.parts.get(group) ?? [];
     const whole = this.whole.get(group);
@@ -147,7 +154,14 @@ export function placeBraces(poles: readonly PoleBraces[], clearance: number, bou
   };
   let spent = 0;
   for (let round = 0; ; round += 1) {
-    for (const [a, b] of conflicts(poles, pairs, clearance)) {
+    const met = conflicts(poles, pairs, clearance);
+    if (spent > bound.inAll) {
+      for (const [a, b] of met) groups.join(a.pole, b.pole);
+      finish(poles, pairs, groups, clearance);
+      break;
+    }
+    for (const [a, b] of met) {
+      if (!groups.mayJoin(a.pole, b.pole)) continue;
       for (const { pole, which } of [a, b]) {
         const marks = relevant[pole];
         if (marks && marks[which] === null) marks[which] = round;
@@ -156,10 +170,6 @@ export function placeBraces(poles: readonly PoleBraces[], clearance: number, bou
     }
     const opened = groups.opened();
     if (opened.length === 0) break;
-    if (spent > bound.inAll) {
-      finish(poles, pairs, groups, clearance);
-      break;
-    }
     for (const [group, joined] of opened) {
       const parts = joined.map(({ poles: indices, lower }): Part => ({ members: indices.flatMap(member), lower }));
       const indices = joined.flatMap((part) => part.poles);
