@@ -1,4 +1,4 @@
-import { ForgotScreen } from '../../canvas/panels/auth/ForgotScreen';
+import { ForgotScreen } from '../../canvas/panels/shell/lazyScreens';
 
 export default function ForgotRoute() {
   return <ForgotScreen />;

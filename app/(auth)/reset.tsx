@@ -1,4 +1,4 @@
-import { ResetScreen } from '../../canvas/panels/auth/ResetScreen';
+import { ResetScreen } from '../../canvas/panels/shell/lazyScreens';
 
 export default function ResetRoute() {
   return <ResetScreen />;

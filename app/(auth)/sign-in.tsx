@@ -1,4 +1,4 @@
-import { SignInScreen } from '../../canvas/panels/auth/SignInScreen';
+import { SignInScreen } from '../../canvas/panels/shell/lazyScreens';
 
 export default function SignInRoute() {
   return <SignInScreen />;

@@ -1,4 +1,4 @@
-import { SignUpScreen } from '../../canvas/panels/auth/SignUpScreen';
+import { SignUpScreen } from '../../canvas/panels/shell/lazyScreens';
 
 export default function SignUpRoute() {
   return <SignUpScreen />;

@@ -1,4 +1,4 @@
-import { createContext, use, useEffect, useState, type ReactNode } from 'react';
+import { createContext, use, useEffect, useMemo, useState, type ReactNode } from 'react';
 import { themes, type Colours, type Strokes, type ThemeName } from './tokens';
 
 export interface Theme {
@@ -21,6 +21,17 @@ function storedTheme(): ThemeName {
   }
 }
 
+function remembering(choose: (name: ThemeName) => void) {
+  return function setTheme(next: ThemeName) {
+    choose(next);
+    try {
+      globalThis.localStorage?.setItem(STORED_AS, next);
+    } catch {
+      // As above: nowhere to remember it.
+    }
+  };
+}
+
 /** Holds the chosen theme for everything inside it and remembers it in this browser. */
 export function ThemeProvider({ children }: { children: ReactNode }) {
   const [name, setName] = useState(storedTheme);
@@ -37,16 +48,9 @@ export function ThemeProvider({ children }: { children: ReactNode }) {
     document.querySelector('meta[name="theme-color"]')?.setAttribute('content', colours.surface);
   }, [name]);
 
-  function setTheme(next: ThemeName) {
-    setName(next);
-    try {
-      globalThis.localStorage?.setItem(STORED_AS, next);
-    } catch {
-      // As above: nowhere to remember it.
-    }
-  }
+  const theme = useMemo(() => ({ name, ...themes[name], setTheme: remembering(setName) }), [name]);
 
-  return <ThemeContext value={{ name, ...themes[name], setTheme }}>{children}</ThemeContext>;
+  return <ThemeContext value={theme}>{children}</ThemeContext>;
 }
 
 /** The theme in force. Throws outside a ThemeProvider. */

@@ -1,38 +1,16 @@
-import { useMemo, useState, type ReactNode } from 'react';
+import { useMemo, type ReactNode } from 'react';
 import { View } from 'react-native';
 import { drawingOutlines } from '../../../model/drawing/emptyOutline';
 import type { Drawing } from '../../../model/drawing/schema';
 import type { DraftConflict } from '../../store/draftStore';
 import { Button } from '../../ui/Button';
 import { Dialog } from '../../ui/Dialog';
-import { Banner } from '../../ui/States';
 import { radius, space } from '../../ui/tokens';
 import { useTheme } from '../../ui/theme';
 import { Txt } from '../../ui/Txt';
 import { say, useWords } from '../../ui/words';
 import { OutlinePicture } from '../sites/OutlinePicture';
 import { clashWords } from './clashWords';
-import { useDraft, useWorkspace } from './workspace';
-
-/** Asks, wherever in the site the person is, which version to go on with when two were saved at once. */
-export function ConflictWatch() {
-  const conflicts = useDraft((state) => state.conflicts);
-  const { resolve } = useWorkspace();
-  const t = useWords();
-  const [put, putOff] = useState<DraftConflict | null>(null);
-  const clash = conflicts[0];
-  if (!clash) return null;
-  if (put?.conflict.theirs === clash.conflict.theirs)
-    return (
-      <Banner
-        icon="warning"
-        tone="caution"
-        text={t('plan.conflict.put')}
-        action={<Button label={t('plan.conflict.resolve')} onPress={() => putOff(null)} />}
-      />
-    );
-  return <ConflictDialog clash={clash} onChoose={(choice) => resolve(clash, choice)} onLater={() => putOff(clash)} />;
-}
 
 export interface ConflictDialogProps {
   readonly clash: DraftConflict;

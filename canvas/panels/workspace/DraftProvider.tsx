@@ -9,7 +9,7 @@ import { useSite } from '../../client/sites';
 import { Failed, Loading } from '../../ui/States';
 import { useWords } from '../../ui/words';
 import { useLatest } from '../../viewport/useLatest';
-import { ConflictWatch } from './ConflictDialog';
+import { ConflictWatch } from './ConflictWatch';
 import { recallLocal } from './localDrafts';
 import { openDraft, type OpenDraft } from './openDraft';
 import { WorkspaceContext, type Workspace } from './workspace';

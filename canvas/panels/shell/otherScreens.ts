@@ -1,19 +1,19 @@
 /**
- * Every screen of a site and the list's own dialogs, behind one door. The bundler puts whatever two lazy chunks share into the page's first load, so the
- * drawing's packages and the solver stay out of it only while a single chunk, this one, reaches them.
+ * Every screen of a site besides the plan, and the list's own dialogs: one chunk, loaded after those of the plan and of the
+ * forms (`metro.config.js` keeps what they share there). Each must be the only one to reach what is its own: the bundler puts whatever two
+ * lazy chunks share into the page's first load.
  */
-import './siteWords';
+import './otherWords';
 
 export { CompareScreen } from '../compare/CompareScreen';
 export { CrewScreen } from '../crew/CrewScreen';
 export { ElevationScreen } from '../elevation/ElevationScreen';
 export { LevelsScreen } from '../levels/LevelsScreen';
 export { MoreScreen } from '../more/MoreScreen';
-export { PlanScreen } from '../plan/PlanScreen';
 export { PoleScreen } from '../pole/PoleScreen';
 export { RevisionScreen } from '../revisions/RevisionScreen';
 export { RevisionsScreen } from '../revisions/RevisionsScreen';
 export { TakeoffScreen } from '../takeoff/TakeoffScreen';
 export { AccountDialog } from '../sites/AccountDialog';
 export { NewSiteDialog } from '../sites/NewSiteDialog';
-export { SiteShell } from './SiteShell';
+export { ConflictDialog } from '../workspace/ConflictDialog';
