@@ -5,7 +5,7 @@ import { printSheets, type SheetsInput } from '../../server/sheets/printSheets';
 import { standardScales } from '../../server/sheets/paper';
 import { dayOf } from '../../server/sheets/sheet';
 import { readingsAt, rowOfRooms, slantedStudio, toolStore } from '../model/figures/scenes';
-import { readAll, readPdf, strokesOf, type Pdf, type Stroke } from './pdf';
+import { readAll, readPdf, strokesOf, type Pdf, type Stroke } from '../helpers/pdf';
 
 const revision = {
   number: 3,
