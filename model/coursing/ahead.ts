@@ -1,7 +1,7 @@
 /** What the stops above each stop cost at least, wherever that stop lies: it lets a search drop dead ends early. */
 import { charged, lowestOf, prune, slideUp, sumOf, type Cost, type Piece } from './costPieces';
 import { heightLimits, makesWithin } from './fitInterval';
-import { chargeOf, partsOf, windowOf, type Problem, type Stop } from './problem';
+import { chargeOf, partsOf, thinCost, windowOf, type Problem, type Stop } from './problem';
 import type { Work } from './search';
 
 /**
@@ -47,7 +47,7 @@ function comeDown(
     work.left -= above.length;
     if (work.left < 0) return [];
     const risen = slideUp(above, limits.least + stop.beamDepth, limits.most + stop.beamDepth, lo, hi);
-    arrivals.push(charged(risen, thin ? 1 : 0));
+    arrivals.push(charged(risen, thinCost(problem, thin)));
   }
   return lowestOf(arrivals);
 }

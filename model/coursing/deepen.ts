@@ -36,13 +36,12 @@ export function cheapestPlan(problem: Problem, range: CostRange, help: SearchHel
 function leastHard(problem: Problem, most: number, help: SearchHelp): number | null {
   const hardOnly: Problem = {
     ...problem,
+    thinIsFree: true,
     stops: problem.stops.map((stop) => (stop.hold === 'hard' ? stop : { ...stop, weight: 0 })),
   };
   const { work, allowed } = help;
-  // Soft heights weigh nothing here, but thinner courses still cost a part each.
-  const thinner = problem.thin ? problem.stops.length : 0;
   for (let missed = 0; missed <= most; missed++) {
-    const bound: Cost = { hard: missed === 0 ? 0 : (missed + 0.5) * HARD_MISS, soft: thinner };
+    const bound: Cost = { hard: missed === 0 ? 0 : (missed + 0.5) * HARD_MISS, soft: 0 };
     const plan = cheapestWithin(hardOnly, problem.joint, bound, allowed ? { work, allowed } : { work });
     if (plan) return plan.cost.hard;
   }

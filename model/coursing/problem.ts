@@ -40,6 +40,8 @@ export interface Problem {
   readonly stops: readonly Stop[];
   /** What one course of every interval, its last, may be; absent where every course is whole. */
   readonly thin?: ThinCourse;
+  /** Thinner courses cost nothing: for a search of the hard heights alone. */
+  readonly thinIsFree?: boolean;
 }
 
 /**
@@ -51,6 +53,11 @@ const PARTS = 128;
 /** Parts of one weighted tick in a problem's costs. */
 export function partsOf(problem: Problem): number {
   return problem.thin ? PARTS : 1;
+}
+
+/** What an interval's thinner course costs, if it has one. */
+export function thinCost(problem: Problem, thin: ThinCourse | null): number {
+  return thin === null || problem.thinIsFree ? 0 : 1;
 }
 
 /** A search's soft cost taken apart: weighted ticks, and thinner courses. */
@@ -69,12 +76,33 @@ export function missCost(control: Pick<Control, 'weight' | 'tolerance'>, miss: n
   return control.weight * (within + BEYOND_TOLERANCE * (off - within));
 }
 
-/** How far from its height a stop may be looked for: one course of the thickest joint either way. */
+/**
+ * Where a stop has to be looked for. In a best plan no stop lies further below its height than one course of the thickest
+ * joint, G, unless the stops above hold it down. For let it lie lower, and take with it the stops above up to the first
+ * interval that can lose a course: an interval can't where it has none, or only a lift's last or a thinner one. If each of
+ * them lies more than G too low, all can rise by that course, and the plan was not the best. From each to the next, that
+ * depth shrinks by no more than what the interval may be high less what is drawn between the two heights. So the stop lies
+ * within G and the most that such shrinking adds up to. The same holds upside down.
+ */
 export function windowOf(problem: Problem, index: number): { lo: number; hi: number } {
-  const stop = problem.stops[index] as Stop;
-  const beamsBelow = problem.stops.slice(0, index).filter((below) => below.beamDepth > 0).length;
-  const reach = (problem.unit + problem.joint.most) * (1 + 2 * beamsBelow) + 1;
-  return { lo: stop.height - reach, hi: stop.height + reach };
+  const { stops, unit, joint, thin } = problem;
+  const course = unit + joint.most;
+  const shrinks = (below: Stop, above: Stop): number => {
+    const highest = below.beamDepth > 0 ? course : thin ? thin.most + joint.most : 0;
+    return highest - (above.height - below.height - below.beamDepth);
+  };
+  let down = 0;
+  for (let i = index, sum = 0; i + 1 < stops.length; i++) {
+    sum += shrinks(stops[i] as Stop, stops[i + 1] as Stop);
+    down = Math.max(down, sum);
+  }
+  let up = 0;
+  for (let i = index, sum = 0; i > 0; i--) {
+    sum += shrinks(stops[i - 1] as Stop, stops[i] as Stop);
+    up = Math.max(up, sum);
+  }
+  const { height } = stops[index] as Stop;
+  return { lo: height - course - down - 1, hi: height + course + up + 1 };
 }
 
 /** What holding the stop at each height within `lo`…`hi` costs, in the problem's parts. */

@@ -22,7 +22,7 @@ import {
   costOn,
 } from './costPieces';
 import { heightLimits, jointRange, makesWithin, type JointLimits, type Make } from './fitInterval';
-import { chargeOf, partsOf, windowOf, type Problem, type Stop, type ThinCourse } from './problem';
+import { chargeOf, partsOf, thinCost, windowOf, type Problem, type Stop, type ThinCourse } from './problem';
 
 /** Counts and heights of one answer, stop by stop. */
 export interface Plan {
@@ -111,7 +111,7 @@ function advance(
       if (limits.least > limits.most) continue;
       work.left -= pieces.length;
       if (work.left < 0) return { begun: [], bare: [] };
-      arrivals.push(charged(slideUp(pieces, limits.least, limits.most, lo, hi), thin ? 1 : 0));
+      arrivals.push(charged(slideUp(pieces, limits.least, limits.most, lo, hi), thinCost(problem, thin)));
     }
   }
   const begun = prune(sumOf(lowestOf(arrivals), charge), bound);
@@ -185,7 +185,7 @@ function stepBelow(
       const wish = height - count * gauge + (thin ? problem.unit - thin.most : 0);
       const found = cheapestOf(pieces, height - limits.most, height - limits.least, wish);
       if (!found) continue;
-      const cost = thin ? { ...found.cost, soft: found.cost.soft + 1 } : found.cost;
+      const cost = { hard: found.cost.hard, soft: found.cost.soft + thinCost(problem, thin) };
       const off = count === 0 ? 0 : stepOf(jointRange(height - found.height, make, problem.unit, joint), problem);
       const order = best ? compareCosts(cost, best.cost) || off - best.off : -1;
       if (order < 0) best = { count, thin, below: found.height, bare: leastCount === 1, cost, off };

@@ -74,7 +74,7 @@ function usableJoint(type: WallType): Problem['joint'] {
 }
 
 /** Courses taller than this are never thinned: costs in parts stay whole numbers up to it (see `partsOf`). */
-const TALLEST_THINNED = mm(10_000);
+const TALLEST_THINNED = mm(5000);
 
 /** What a thinner course may be: lower than a unit, and in no way where units or joints are past any that there are. */
 function usableThin(type: WallType): ThinCourse | null {

@@ -3,10 +3,15 @@
  * Every figure is a ratio or a size taken in one run; none is a wall-clock time to be compared across machines.
  */
 import { benchBundle } from './bundle';
-import type { Figure } from './figure';
+import { benchCoursing } from './coursing';
+import { isMissed, type Figure } from './figure';
 import { benchSolve } from './solve';
 
-const BENCHES: Record<string, () => Promise<Figure[]>> = { solve: benchSolve, bundle: benchBundle };
+const BENCHES: Record<string, () => Promise<Figure[]>> = {
+  solve: benchSolve,
+  coursing: benchCoursing,
+  bundle: benchBundle,
+};
 
 async function main(): Promise<void> {
   const json = process.argv.includes('--json');
@@ -19,16 +24,19 @@ async function main(): Promise<void> {
   }
   const figures: Figure[] = [];
   for (const name of names.length > 0 ? names : Object.keys(BENCHES)) figures.push(...(await BENCHES[name]!()));
-  const missed = (figure: Figure) => figure.most !== null && figure.value > figure.most;
   if (json)
-    process.stdout.write(`${JSON.stringify(figures.map((figure) => ({ ...figure, missed: missed(figure) })))}\n`);
+    process.stdout.write(`${JSON.stringify(figures.map((figure) => ({ ...figure, missed: isMissed(figure) })))}\n`);
   else {
     for (const figure of figures) {
-      const limit = figure.most === null ? '' : `  at most ${figure.most}${missed(figure) ? '  MISSED' : ''}`;
-      process.stdout.write(`${figure.name}  ${Number(figure.value.toPrecision(4))} ${figure.unit}${limit}\n`);
+      const most = figure.most === null ? '' : `  at most ${figure.most}`;
+      const least = figure.least === undefined ? '' : `  at least ${figure.least}`;
+      const missed = isMissed(figure) ? '  MISSED' : '';
+      process.stdout.write(
+        `${figure.name}  ${Number(figure.value.toPrecision(4))} ${figure.unit}${most}${least}${missed}\n`,
+      );
     }
   }
-  if (figures.some(missed)) process.exitCode = 1;
+  if (figures.some(isMissed)) process.exitCode = 1;
 }
 
 await main();
