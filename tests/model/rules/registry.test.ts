@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { RULE_IDS } from '../../../model/rules/ids';
-import { RULES, ruleChanged, ruleValue } from '../../../model/rules/registry';
+import { RULES, ruleChanged, rulesInForce, ruleValue } from '../../../model/rules/registry';
 import { rules as words } from '../../../model/words/en/rules';
 
 describe('the registry of rules', () => {
@@ -26,5 +26,15 @@ describe('the registry of rules', () => {
     expect(ruleValue(drawing, 'braceAngleLeast')).toBe(60);
     expect(ruleChanged(drawing, 'liftToThickness')).toBe(true);
     expect(ruleChanged(drawing, 'braceAngleLeast')).toBe(false);
+  });
+
+  it('lists every rule with the number in force and the site’s own, where it has one', () => {
+    const listed = rulesInForce({ ruleValues: { liftToThickness: 8, lineMost: RULES.lineMost.value } });
+    expect(listed.map(({ id }) => id).sort()).toEqual([...RULE_IDS].sort());
+    const byId = new Map(listed.map((rule) => [rule.id, rule]));
+    expect(byId.get('liftToThickness')).toMatchObject({ value: 10, own: 8, inForce: 8 });
+    // The same number set by the site is still the site's own.
+    expect(byId.get('lineMost')).toMatchObject({ own: RULES.lineMost.value });
+    expect(byId.get('lineSagMost')).toMatchObject({ own: null, inForce: 1016 });
   });
 });
