@@ -1,6 +1,7 @@
 /** Every word on screen, on paper and in mail, in English: one namespace a file. */
 import { auth } from './auth';
 import { common } from './common';
+import { coursing } from './coursing';
 import { crew } from './crew';
 import { lengths } from './lengths';
 import { levels } from './levels';
@@ -22,6 +23,7 @@ export const en = {
   sites,
   plan,
   walls,
+  coursing,
   poles,
   lengths,
   levels,
