@@ -13,6 +13,7 @@ export interface Block {
   readonly firstCourse: number;
   readonly lastCourse: number;
   readonly lintel: boolean;
+  readonly openingId: string;
 }
 
 /** A stretch in odd and even courses; both reach the same jambs, and differ only at corners. */
@@ -75,7 +76,7 @@ export function blocksOf(
       const add = (bottom: number, top: number, bearing: number, lintel: boolean) => {
         const [firstCourse, lastCourse] = coursesBetween(coursing, bottom, top);
         if (firstCourse <= lastCourse)
-          blocks.push({ from: from - bearing, to: to + bearing, firstCourse, lastCourse, lintel });
+          blocks.push({ from: from - bearing, to: to + bearing, firstCourse, lastCourse, lintel, openingId: id });
       };
       add(sill, head, 0, false);
       if (opening.lintel.depth > 0) add(head, head + opening.lintel.depth, opening.lintel.bearing, true);
