@@ -27,15 +27,16 @@ const METRIC_WALL: WallType = {
   name: '240 mm earth block',
   unitName: 'Earth block',
   mortarName: 'Stabilised earth mortar',
-  unit: { length: mm(295), width: mm(240), height: mm(90) },
+  unit: { length: mm(390), width: mm(240), height: mm(90) },
   laid: 'stretcher',
   headJoint: { nominal: mm(10), least: mm(7), most: mm(13) },
   bedJoint: { nominal: mm(10), least: mm(7), most: mm(13) },
   bedding: { least: mm(10), most: mm(20) },
   bondOffset: 'half',
-  // A turned corner leaves 305 − 250 = 55 mm; a quarter of the unit would be 73.75 mm.
-  leastLap: mm(50),
-  leastPiece: mm(70),
+  // A quarter of the unit's length (NMAC 14.7.4.11 E). A turned corner laps 390 − 240 − 10 = 140 mm, and a joint over the
+  // middle of a stem 115 mm.
+  leastLap: mm(97.5),
+  leastPiece: mm(90),
 };
 
 const IMPERIAL_KIT: PoleKit = {

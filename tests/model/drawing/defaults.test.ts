@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { newBondBeam, newControlHeight, newDrawing, newOpening } from '../../../model/drawing/defaults';
 import { drawingOutlines } from '../../../model/drawing/emptyOutline';
@@ -9,8 +10,11 @@ import {
   openingSchema,
   type Drawing,
 } from '../../../model/drawing/schema';
+import { EMPTY_SURVEY } from '../../../model/drawing/surveySchema';
 import { parseStoredDrawing } from '../../../model/drawing/upgrade';
 import { feet, inches, mm, ticks } from '../../../model/length/ticks';
+import { solve } from '../../../model/setOut';
+import { rectangle } from '../../helpers/drawings';
 
 const UNITS = ['imperial', 'metric'] as const;
 
@@ -39,13 +43,27 @@ describe('a new drawing', () => {
     }
   });
 
-  it('laps a corner by no less than its least lap', () => {
+  it('laps a corner by no less than its least lap, a quarter of the unit (NMAC 14.7.4.11 E)', () => {
     for (const units of UNITS) {
       const [type] = newDrawing(units).wallTypes;
       if (!type) throw new Error('no wall type');
-      // Over a return of width + joint the next course's head joint falls length − width further.
-      expect(type.unit.length - type.unit.width).toBeGreaterThanOrEqual(type.leastLap);
+      const { unit, headJoint, leastLap } = type;
+      // The return and its joint lie under the corner's unit; what is left of the unit is its lap, joint edge to joint edge.
+      expect(unit.length - unit.width - headJoint.nominal).toBeGreaterThanOrEqual(leastLap);
+      expect(4 * leastLap).toBe(unit.length);
     }
+  });
+
+  it('lays a first rectangle of any size with nothing to warn of', () => {
+    const side = fc.integer({ min: mm(2500), max: mm(12_000) });
+    fc.assert(
+      fc.property(fc.constantFrom(...UNITS), side, side, (units, width, depth) => {
+        const drawn = rectangle(width / 16_256, depth / 16_256, newDrawing(units).wallTypes[0]);
+        const drawing: Drawing = { ...newDrawing(units), corners: drawn.corners, runs: drawn.runs };
+        expect(solve(drawing, EMPTY_SURVEY).bond.reasons).toEqual([]);
+      }),
+      { numRuns: 40 },
+    );
   });
 
   it('cuts two poles from one stock length', () => {
