@@ -11,7 +11,12 @@ export function sagExact(span: number, weight: number, pull: number): number {
   return ((weight / 1000) * metres * metres * TICKS_PER_METRE) / (8 * pull);
 }
 
-/** The same, rounded once to ticks. */
+/** The pull, in newtons, that holds the sag to `sag` without a trig: T = w L² / (8 s). Null where no pull does: a sag of nothing. */
+export function pullFor(span: number, weight: number, sag: number): number | null {
+  return sag > 0 ? sagExact(span, weight, 1) / sag : null;
+}
+
+/** The sag, rounded once to ticks. */
 export function sagOf(span: Ticks, weight: number, pull: number): Ticks {
   return roundTicks(sagExact(span, weight, pull));
 }

@@ -5,7 +5,7 @@ import type { PoleSet } from '../poles/types';
 import type { Reason } from '../reasons';
 import { ruleValue } from '../rules/registry';
 import type { Walls } from '../walls/types';
-import { sagExact, sagOf } from './sag';
+import { pullFor, sagExact, sagOf } from './sag';
 import { spansOf } from './spans';
 import type { LineRun, Lines } from './types';
 
@@ -43,6 +43,7 @@ export function stringLines(drawing: Drawing, walls: Walls, poles: PoleSet): Lin
       sag,
       trigs: Array.from({ length: parts - 1 }, (_, i) => roundTicks(((i + 1) * span.length) / parts)),
       sagWithTrigs,
+      pullWithoutTrigs: pullFor(span.length, lineWeight, sagMost),
     };
   });
   return { lines, reasons };

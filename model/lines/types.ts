@@ -18,6 +18,8 @@ export interface LineRun {
   readonly trigs: readonly Ticks[];
   /** Largest sag with those trigs. */
   readonly sagWithTrigs: Ticks;
+  /** Pull that would hold the line to its most sag without trigs, in newtons; null where none does. */
+  readonly pullWithoutTrigs: number | null;
 }
 
 export interface Lines {

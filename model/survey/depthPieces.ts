@@ -18,20 +18,26 @@ function part(piece: DepthPiece, from: number, to: number): DepthPiece {
   return { from, to, start: depthAt(piece, from), end: depthAt(piece, to) };
 }
 
-/** The pieces without what lies within the gaps, `[from, to]` in order and apart. */
+/** The pieces without what lies within the gaps, `[from, to]`. Both in order along the run; one pass over each. */
 export function withoutGaps(
   pieces: readonly DepthPiece[],
   gaps: readonly (readonly [number, number])[],
 ): readonly DepthPiece[] {
-  return gaps.reduce<readonly DepthPiece[]>(
-    (left, [from, to]) =>
-      left.flatMap((piece) => {
-        if (piece.to <= from || piece.from >= to) return [piece];
-        const before = piece.from < from ? [part(piece, piece.from, from)] : [];
-        return piece.to > to ? [...before, part(piece, to, piece.to)] : before;
-      }),
-    pieces,
-  );
+  const left: DepthPiece[] = [];
+  let next = 0;
+  for (const piece of pieces) {
+    let from = piece.from;
+    while (next < gaps.length && gaps[next]![0] < piece.to) {
+      const [start, end] = gaps[next]!;
+      if (start > from) left.push(part(piece, from, start));
+      from = Math.max(from, end);
+      // A gap that goes on past this piece is the next one's too.
+      if (end >= piece.to) break;
+      next += 1;
+    }
+    if (from < piece.to) left.push(from === piece.from ? piece : part(piece, from, piece.to));
+  }
+  return left;
 }
 
 /** The parts of the pieces that are deeper than a level. */

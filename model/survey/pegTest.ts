@@ -31,7 +31,11 @@ export function checkPegs({ midway, near }: PegTest): Collimation {
   };
 }
 
-/** The rod as a level in adjustment would have read it from that distance. */
+/** A slope beyond 1 in 100 is a misread peg and no state of a level: nothing is corrected by it (common practice, no source). */
+const MOST_SLOPE = 0.01;
+
+/** The rod as a level in adjustment would have read it from that distance; as read where the slope can't be a level's. */
 export function correctedRod(rod: Ticks, distance: Ticks | undefined, slope: number | null): Ticks {
-  return distance === undefined || slope === null ? rod : roundTicks(rod - slope * distance);
+  const known = distance !== undefined && slope !== null && Math.abs(slope) <= MOST_SLOPE;
+  return known ? roundTicks(rod - slope * distance) : rod;
 }

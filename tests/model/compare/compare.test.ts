@@ -186,6 +186,25 @@ describe('poles to mark again', () => {
     );
   });
 
+  it('counts a change of the benchmark or of the method as one of the survey', () => {
+    const low = { ...rectangle(), controlHeights: [plate] };
+    const byRod = (height: number): Survey => ({
+      version: 1,
+      method: 'rod',
+      benchmark: { name: 'Nail', height: inches(height) },
+      closing: null,
+      share: 'distance',
+      readings: [{ id: 'r', station: null, sight: 'back', rod: inches(50) }],
+    });
+    const counts = (before: Survey, after: Survey) =>
+      compareDrawings(state(low, before), state(low, after))
+        .changes.filter(({ code }) => code === 'survey')
+        .map(({ names }) => names['count']);
+    expect(counts(byRod(0), byRod(1))).toEqual(['1']);
+    expect(counts(byRod(0), byRod(0))).toEqual([]);
+    expect(counts(EMPTY_SURVEY, byRod(0))).toEqual(['2']);
+  });
+
   it('has all marks to add on a pole that is new', () => {
     const before = { ...rectangle(), controlHeights: [plate] };
     const after = { ...ell(), controlHeights: [plate] };

@@ -78,6 +78,21 @@ describe('stringLines', () => {
     ]);
   });
 
+  it('says how hard to pull instead: with that, the sag is just the most', () => {
+    const drawing = freeWall(420);
+    const walls = layOutWalls(drawing);
+    const [line] = stringLines(drawing, walls, polesAt(drawing, ['c1', 'c2'])).lines;
+    const metres = new Fraction(420).mul(254).div(10_000);
+    // w L² / (8 s), s = 1/16 in in metres.
+    const most = new Fraction(254, 160_000);
+    const pull = new Fraction('13.3').div(1000).mul(metres).mul(metres).div(8).div(most);
+    expect(line!.pullWithoutTrigs).toBeCloseTo(pull.valueOf(), 9);
+    const harder = { ...drawing, poleKit: { ...drawing.poleKit, linePull: line!.pullWithoutTrigs! + 0.001 } };
+    expect(stringLines(harder, walls, polesAt(drawing, ['c1', 'c2'])).lines[0]!.trigs).toEqual([]);
+    const never = { ...drawing, ruleValues: { lineSagMost: 0 } };
+    expect(stringLines(never, walls, polesAt(drawing, ['c1', 'c2'])).lines[0]!.pullWithoutTrigs).toBeNull();
+  });
+
   it('warns where no number of trigs can hold the sag', () => {
     const drawing = { ...freeWall(420), ruleValues: { lineSagMost: 0 } };
     const walls = layOutWalls(drawing);

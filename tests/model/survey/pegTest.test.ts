@@ -59,6 +59,12 @@ describe('the two-peg check', () => {
     expect(wanted).toEqual({ a: mm(1400), b: mm(1200) });
   });
 
+  it('corrects nothing by a slope that is no level’s but a misread peg', () => {
+    const misread = { ...pegs, near: { ...pegs.near, a: mm(2538) } };
+    expect(checkPegs(misread).slope).toBeCloseTo(1.012 / 60, 12);
+    expect(checkPegs(misread).wanted).toEqual({ a: mm(2538), b: mm(1326) });
+  });
+
   it('takes the error out of every rod whose distance is known, and says that the level wants adjusting', () => {
     const drawing = rectangle(240, 120);
     const survey: RodSurvey = {
