@@ -22,9 +22,18 @@ export const DIRECTIONS = [
 /** zod belongs to the schemas: elsewhere in the model a computation would start to depend on parsing. */
 const zodOnly = { group: ['zod', 'zod/*'], message: 'zod stands in model/drawing and model/contracts only.' };
 /** A screen never computes: routes may know the contracts' types and nothing else of the model. */
-const solvers = ['bond', 'coursing', 'poles', 'marks', 'survey', 'lines', 'takeoff', 'compare', 'walls', 'setOut'].flatMap(
-  (part) => [`**/model/${part}`, `**/model/${part}/**`],
-);
+const solvers = [
+  'bond',
+  'coursing',
+  'poles',
+  'marks',
+  'survey',
+  'lines',
+  'takeoff',
+  'compare',
+  'walls',
+  'setOut',
+].flatMap((part) => [`**/model/${part}`, `**/model/${part}/**`]);
 
 /** @param {{folder: string, never: string[], packages: string[]}} direction */
 function directionRules({ folder, never, packages }, extra = []) {

@@ -1,14 +1,15 @@
 import { useState } from 'react';
 import { View } from 'react-native';
+import { z } from 'zod';
 import { requestReset } from '../../client/session';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
-import { Field } from '../../ui/Field';
+import { FormField } from '../../ui/FormField';
 import { Txt } from '../../ui/Txt';
-import { useForm } from '../../ui/useForm';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
 import { AuthFrame } from './AuthFrame';
-import { checkEmail } from './checks';
+import { emailField } from './checks';
 import { LocalHints } from './LocalHints';
 import { TextLink } from './TextLink';
 import { useAuthProblem } from './useAuthProblem';
@@ -19,16 +20,14 @@ export function ForgotScreen() {
   const [refused, setRefused] = useState<string | null>(null);
   const [sentTo, setSentTo] = useState<string | null>(null);
 
-  const form = useForm({
+  const form = useCheckedForm({
+    schema: () => z.object({ email: emailField(t) }),
     initial: { email: '' },
-    checks: {
-      email: (value) => checkEmail(t, value),
-    },
-    onSubmit: async ({ email }) => {
+    onSend: async ({ email }) => {
       setRefused(null);
       try {
         await requestReset(email);
-        setSentTo(email.trim());
+        setSentTo(email);
       } catch (error) {
         setRefused(problem(error));
       }
@@ -51,8 +50,9 @@ export function ForgotScreen() {
       <Txt size="large" tone="soft">
         {t('auth.forgot.text')}
       </Txt>
-      <Field
-        {...form.field('email')}
+      <FormField
+        form={form}
+        name="email"
         label={t('auth.fields.email')}
         inputMode="email"
         autoComplete="email"
@@ -63,7 +63,7 @@ export function ForgotScreen() {
           <Caution text={refused} />
         </View>
       ) : null}
-      <Button kind="filled" label={t('auth.forgot.action')} busy={form.busy} onPress={form.submit} />
+      <Button kind="filled" label={t('auth.forgot.action')} busy={form.busy} onPress={form.send} />
       <TextLink href="/sign-in" label={t('auth.forgot.back')} />
     </AuthFrame>
   );

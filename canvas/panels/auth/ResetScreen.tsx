@@ -1,15 +1,17 @@
 import { useLocalSearchParams, useRouter } from 'expo-router';
 import { useState } from 'react';
 import { View } from 'react-native';
+import { z } from 'zod';
 import { AuthError, resetPassword } from '../../client/session';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
+import { FormField } from '../../ui/FormField';
 import { toast } from '../../ui/toasts';
 import { Txt } from '../../ui/Txt';
-import { useForm } from '../../ui/useForm';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
 import { AuthFrame } from './AuthFrame';
-import { checkNewPassword } from './checks';
+import { newPasswordField } from './checks';
 import { PasswordField } from './PasswordField';
 import { TextLink } from './TextLink';
 import { useAuthProblem } from './useAuthProblem';
@@ -23,12 +25,10 @@ export function ResetScreen() {
   const [refused, setRefused] = useState<string | null>(null);
   const [old, setOld] = useState(false);
 
-  const form = useForm({
+  const form = useCheckedForm({
+    schema: () => z.object({ password: newPasswordField(t) }),
     initial: { password: '' },
-    checks: {
-      password: (value) => checkNewPassword(t, value),
-    },
-    onSubmit: async ({ password }) => {
+    onSend: async ({ password }) => {
       setRefused(null);
       try {
         await resetPassword(token ?? '', password);
@@ -51,8 +51,10 @@ export function ResetScreen() {
 
   return (
     <AuthFrame title={t('auth.reset.title')}>
-      <PasswordField
-        {...form.field('password')}
+      <FormField
+        form={form}
+        as={PasswordField}
+        name="password"
         label={t('auth.fields.newPassword')}
         hint={t('auth.fields.passwordHint')}
         autoComplete="new-password"
@@ -62,7 +64,7 @@ export function ResetScreen() {
           <Caution text={refused} />
         </View>
       ) : null}
-      <Button kind="filled" label={t('auth.reset.action')} busy={form.busy} onPress={form.submit} />
+      <Button kind="filled" label={t('auth.reset.action')} busy={form.busy} onPress={form.send} />
     </AuthFrame>
   );
 }

@@ -1,15 +1,16 @@
 import { useState } from 'react';
 import { View } from 'react-native';
+import { z } from 'zod';
 import { signIn } from '../../client/session';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
-import { Field } from '../../ui/Field';
+import { FormField } from '../../ui/FormField';
 import { space } from '../../ui/tokens';
 import { Txt } from '../../ui/Txt';
-import { useForm } from '../../ui/useForm';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
 import { AuthFrame } from './AuthFrame';
-import { checkEmail } from './checks';
+import { emailField, passwordField } from './checks';
 import { LocalHints } from './LocalHints';
 import { PasswordField } from './PasswordField';
 import { TextLink } from './TextLink';
@@ -20,13 +21,10 @@ export function SignInScreen() {
   const problem = useAuthProblem();
   const [refused, setRefused] = useState<string | null>(null);
 
-  const form = useForm({
+  const form = useCheckedForm({
+    schema: () => z.object({ email: emailField(t), password: passwordField(t) }),
     initial: { email: '', password: '' },
-    checks: {
-      email: (value) => checkEmail(t, value),
-      password: (value) => value !== '' || t('auth.problems.passwordNeeded'),
-    },
-    onSubmit: async ({ email, password }) => {
+    onSend: async ({ email, password }) => {
       setRefused(null);
       try {
         await signIn(email, password);
@@ -38,20 +36,27 @@ export function SignInScreen() {
 
   return (
     <AuthFrame title={t('auth.signIn.title')}>
-      <Field
-        {...form.field('email')}
+      <FormField
+        form={form}
+        name="email"
         label={t('auth.fields.email')}
         inputMode="email"
         autoComplete="email"
         autoCapitalize="none"
       />
-      <PasswordField {...form.field('password')} label={t('auth.fields.password')} autoComplete="current-password" />
+      <FormField
+        form={form}
+        as={PasswordField}
+        name="password"
+        label={t('auth.fields.password')}
+        autoComplete="current-password"
+      />
       {refused ? (
         <View role="alert">
           <Caution text={refused} />
         </View>
       ) : null}
-      <Button kind="filled" label={t('auth.signIn.action')} busy={form.busy} onPress={form.submit} />
+      <Button kind="filled" label={t('auth.signIn.action')} busy={form.busy} onPress={form.send} />
       <View>
         <TextLink href="/forgot" label={t('auth.signIn.forgot')} />
         <View style={{ flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', columnGap: space.s }}>

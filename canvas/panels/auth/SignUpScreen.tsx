@@ -1,15 +1,16 @@
 import { useState } from 'react';
 import { View } from 'react-native';
+import { z } from 'zod';
 import { signUp } from '../../client/session';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
-import { Field } from '../../ui/Field';
+import { FormField } from '../../ui/FormField';
 import { space } from '../../ui/tokens';
 import { Txt } from '../../ui/Txt';
-import { useForm } from '../../ui/useForm';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
 import { AuthFrame } from './AuthFrame';
-import { checkEmail, checkNewPassword } from './checks';
+import { emailField, newPasswordField, personNameField } from './checks';
 import { PasswordField } from './PasswordField';
 import { TextLink } from './TextLink';
 import { useAuthProblem } from './useAuthProblem';
@@ -19,14 +20,10 @@ export function SignUpScreen() {
   const problem = useAuthProblem();
   const [refused, setRefused] = useState<string | null>(null);
 
-  const form = useForm({
+  const form = useCheckedForm({
+    schema: () => z.object({ name: personNameField(t), email: emailField(t), password: newPasswordField(t) }),
     initial: { name: '', email: '', password: '' },
-    checks: {
-      name: (value) => value.trim() !== '' || t('auth.problems.nameNeeded'),
-      email: (value) => checkEmail(t, value),
-      password: (value) => checkNewPassword(t, value),
-    },
-    onSubmit: async ({ name, email, password }) => {
+    onSend: async ({ name, email, password }) => {
       setRefused(null);
       try {
         await signUp(name, email, password);
@@ -38,22 +35,26 @@ export function SignUpScreen() {
 
   return (
     <AuthFrame title={t('auth.signUp.title')}>
-      <Field
-        {...form.field('name')}
+      <FormField
+        form={form}
+        name="name"
         label={t('auth.fields.name')}
         hint={t('auth.fields.nameHint')}
         autoComplete="name"
         maxLength={80}
       />
-      <Field
-        {...form.field('email')}
+      <FormField
+        form={form}
+        name="email"
         label={t('auth.fields.email')}
         inputMode="email"
         autoComplete="email"
         autoCapitalize="none"
       />
-      <PasswordField
-        {...form.field('password')}
+      <FormField
+        form={form}
+        as={PasswordField}
+        name="password"
         label={t('auth.fields.password')}
         hint={t('auth.fields.passwordHint')}
         autoComplete="new-password"
@@ -63,7 +64,7 @@ export function SignUpScreen() {
           <Caution text={refused} />
         </View>
       ) : null}
-      <Button kind="filled" label={t('auth.signUp.action')} busy={form.busy} onPress={form.submit} />
+      <Button kind="filled" label={t('auth.signUp.action')} busy={form.busy} onPress={form.send} />
       <View style={{ flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', columnGap: space.s }}>
         <Txt tone="soft" size="large">
           {t('auth.signUp.haveAccount')}

@@ -1,16 +1,18 @@
-import { ROLES, type Role } from '../../../model/contracts/common';
+import { Controller } from 'react-hook-form';
+import { z } from 'zod';
+import { ROLES, roleSchema } from '../../../model/contracts/common';
 import { ApiError } from '../../client/api';
 import { errorWords } from '../../client/errorWords';
 import { useInvite } from '../../client/invitations';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
 import { Dialog } from '../../ui/Dialog';
-import { Field } from '../../ui/Field';
+import { FormField } from '../../ui/FormField';
 import { toast } from '../../ui/toasts';
 import { Txt } from '../../ui/Txt';
-import { useForm } from '../../ui/useForm';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
-import { checkEmail } from '../auth/checks';
+import { emailField } from '../auth/checks';
 import { RoleList } from './RoleList';
 
 /** Asks for an address and a role, and sends the invitation by mail. */
@@ -18,16 +20,14 @@ export function InviteDialog({ siteId, onClose }: { siteId: string; onClose: () 
   const t = useWords();
   const invite = useInvite(siteId);
 
-  const form = useForm<{ email: string; role: Role }>({
+  const form = useCheckedForm({
+    schema: () => z.object({ email: emailField(t), role: roleSchema }),
     initial: { email: '', role: 'mason' },
-    checks: {
-      email: (value) => checkEmail(t, value),
-    },
-    onSubmit: ({ email, role }) =>
+    onSend: ({ email, role }) =>
       invite
-        .mutateAsync({ email: email.trim(), role })
+        .mutateAsync({ email, role })
         .then(() => {
-          toast(t('crew.sent', { email: email.trim() }));
+          toast(t('crew.sent', { email }));
           onClose();
         })
         // Shown below, from the mutation.
@@ -43,24 +43,26 @@ export function InviteDialog({ siteId, onClose }: { siteId: string; onClose: () 
       actions={
         <>
           <Button label={t('common.cancel')} onPress={onClose} />
-          <Button kind="filled" label={t('crew.send')} busy={invite.isPending} onPress={form.submit} />
+          <Button kind="filled" label={t('crew.send')} busy={invite.isPending} onPress={form.send} />
         </>
       }
     >
       <Txt tone="soft">{t('crew.inviteText')}</Txt>
-      <Field
-        {...form.field('email')}
+      <FormField
+        form={form}
+        name="email"
         label={t('crew.email')}
         inputMode="email"
         autoComplete="off"
         autoCapitalize="none"
         autoFocus
       />
-      <RoleList
-        label={t('crew.role')}
-        roles={ROLES}
-        value={form.values.role}
-        onChange={(role) => form.set('role', role)}
+      <Controller
+        control={form.control}
+        name="role"
+        render={({ field }) => (
+          <RoleList label={t('crew.role')} roles={ROLES} value={field.value} onChange={field.onChange} />
+        )}
       />
       {invite.isError ? <Caution text={already ? t('crew.already') : errorWords(t, invite.error)} /> : null}
     </Dialog>

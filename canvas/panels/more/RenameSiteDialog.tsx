@@ -1,29 +1,28 @@
+import { z } from 'zod';
 import type { Site } from '../../../model/contracts/sites';
 import { errorWords } from '../../client/errorWords';
 import { useRenameSite } from '../../client/sites';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
 import { Dialog } from '../../ui/Dialog';
-import { Field } from '../../ui/Field';
+import { FormField } from '../../ui/FormField';
 import { toast } from '../../ui/toasts';
-import { useForm } from '../../ui/useForm';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
-import { checkSiteName } from '../sites/checkSiteName';
+import { siteNameField } from '../sites/siteNameField';
 
 export function RenameSiteDialog({ site, onClose }: { site: Site; onClose: () => void }) {
   const t = useWords();
   const rename = useRenameSite(site.id);
 
-  const form = useForm({
+  const form = useCheckedForm({
+    schema: () => z.object({ name: siteNameField(t) }),
     initial: { name: site.name },
-    checks: {
-      name: (value) => checkSiteName(t, value),
-    },
-    onSubmit: ({ name }) =>
+    onSend: ({ name }) =>
       rename
-        .mutateAsync({ name: name.trim() })
+        .mutateAsync({ name })
         .then(() => {
-          toast(t('sites.rename.done', { name: name.trim() }));
+          toast(t('sites.rename.done', { name }));
           onClose();
         })
         // Shown below, from the mutation.
@@ -38,11 +37,11 @@ export function RenameSiteDialog({ site, onClose }: { site: Site; onClose: () =>
       actions={
         <>
           <Button label={t('common.cancel')} onPress={onClose} />
-          <Button kind="filled" label={t('sites.rename.action')} busy={rename.isPending} onPress={form.submit} />
+          <Button kind="filled" label={t('sites.rename.action')} busy={rename.isPending} onPress={form.send} />
         </>
       }
     >
-      <Field {...form.field('name')} label={t('sites.newSite.name')} autoFocus maxLength={80} />
+      <FormField form={form} name="name" label={t('sites.newSite.name')} autoFocus maxLength={80} />
       {rename.isError ? <Caution text={errorWords(t, rename.error)} /> : null}
     </Dialog>
   );

@@ -1,14 +1,16 @@
 import { useState } from 'react';
+import { z } from 'zod';
+import { newRevisionSchema } from '../../../model/contracts/drawings';
 import { ApiError } from '../../client/api';
 import { useSaveRevision } from '../../client/revisions';
 import { newWriteId } from '../../client/writeId';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
 import { Dialog } from '../../ui/Dialog';
-import { Field } from '../../ui/Field';
+import { FormField } from '../../ui/FormField';
 import { toast } from '../../ui/toasts';
 import { Txt } from '../../ui/Txt';
-import { useForm } from '../../ui/useForm';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
 import { useDraftActions, useSetOut } from '../workspace/workspace';
 
@@ -24,9 +26,10 @@ export function SaveRevisionDialog(props: { siteId: string; number: number; onCl
   const [writeId] = useState(newWriteId);
   const wrong = reasons.filter(({ weight }) => weight !== 'note').length;
 
-  const form = useForm({
+  const form = useCheckedForm({
+    schema: () => z.object({ note: newRevisionSchema.shape.note }),
     initial: { note: '' },
-    onSubmit: async ({ note }) => {
+    onSend: async ({ note }) => {
       setRefused(null);
       if ((await flush()) !== 'saved') {
         setRefused(t('revisions.save.unsaved'));
@@ -34,7 +37,7 @@ export function SaveRevisionDialog(props: { siteId: string; number: number; onCl
       }
       const { drawing, survey } = versions();
       try {
-        await save.mutateAsync({ writeId, note: note.trim(), drawingVersion: drawing, surveyVersion: survey });
+        await save.mutateAsync({ writeId, note, drawingVersion: drawing, surveyVersion: survey });
         toast(t('revisions.save.saved', { number }));
         onClose();
       } catch (error) {
@@ -52,18 +55,14 @@ export function SaveRevisionDialog(props: { siteId: string; number: number; onCl
       actions={
         <>
           <Button label={t('common.cancel')} onPress={onClose} />
-          <Button
-            kind="filled"
-            label={t('revisions.save.confirm', { number })}
-            busy={form.busy}
-            onPress={form.submit}
-          />
+          <Button kind="filled" label={t('revisions.save.confirm', { number })} busy={form.busy} onPress={form.send} />
         </>
       }
     >
       <Txt tone="soft">{t('revisions.save.text')}</Txt>
-      <Field
-        {...form.field('note')}
+      <FormField
+        form={form}
+        name="note"
         label={t('revisions.save.note')}
         placeholder={t('revisions.save.notePlaceholder')}
         maxLength={500}

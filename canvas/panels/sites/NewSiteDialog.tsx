@@ -1,29 +1,29 @@
 import { useRouter } from 'expo-router';
-import type { Units } from '../../../model/drawing/schema';
+import { Controller } from 'react-hook-form';
+import { z } from 'zod';
+import { unitsSchema } from '../../../model/drawing/schema';
 import { errorWords } from '../../client/errorWords';
 import { useAddSite } from '../../client/sites';
 import { Button } from '../../ui/Button';
 import { Caution } from '../../ui/Caution';
 import { Choice } from '../../ui/Choice';
 import { Dialog } from '../../ui/Dialog';
-import { Field } from '../../ui/Field';
-import { useForm } from '../../ui/useForm';
+import { FormField } from '../../ui/FormField';
+import { useCheckedForm } from '../../ui/useCheckedForm';
 import { useWords } from '../../ui/words';
-import { checkSiteName } from './checkSiteName';
+import { siteNameField } from './siteNameField';
 
 export function NewSiteDialog({ onClose }: { onClose: () => void }) {
   const t = useWords();
   const router = useRouter();
   const add = useAddSite();
 
-  const form = useForm<{ name: string; units: Units }>({
+  const form = useCheckedForm({
+    schema: () => z.object({ name: siteNameField(t), units: unitsSchema }),
     initial: { name: '', units: 'imperial' },
-    checks: {
-      name: (value) => checkSiteName(t, value),
-    },
-    onSubmit: ({ name, units }) =>
+    onSend: ({ name, units }) =>
       add
-        .mutateAsync({ name: name.trim(), units })
+        .mutateAsync({ name, units })
         .then((site) => {
           onClose();
           router.push({ pathname: '/sites/[siteId]/plan', params: { siteId: site.id } });
@@ -40,25 +40,32 @@ export function NewSiteDialog({ onClose }: { onClose: () => void }) {
       actions={
         <>
           <Button label={t('common.cancel')} onPress={onClose} />
-          <Button kind="filled" label={t('sites.newSite.action')} busy={add.isPending} onPress={form.submit} />
+          <Button kind="filled" label={t('sites.newSite.action')} busy={add.isPending} onPress={form.send} />
         </>
       }
     >
-      <Field
-        {...form.field('name')}
+      <FormField
+        form={form}
+        name="name"
         label={t('sites.newSite.name')}
         hint={t('sites.newSite.nameHint')}
         autoFocus
         maxLength={80}
       />
-      <Choice
-        label={t('sites.newSite.units')}
-        value={form.values.units}
-        onChange={(units) => form.set('units', units)}
-        options={[
-          { value: 'imperial', label: t('common.units.imperial') },
-          { value: 'metric', label: t('common.units.metric') },
-        ]}
+      <Controller
+        control={form.control}
+        name="units"
+        render={({ field }) => (
+          <Choice
+            label={t('sites.newSite.units')}
+            value={field.value}
+            onChange={field.onChange}
+            options={[
+              { value: 'imperial', label: t('common.units.imperial') },
+              { value: 'metric', label: t('common.units.metric') },
+            ]}
+          />
+        )}
       />
       {add.isError ? <Caution text={errorWords(t, add.error)} /> : null}
     </Dialog>
