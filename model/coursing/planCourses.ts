@@ -41,6 +41,7 @@ export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Cou
     lifts,
     answer: built.answer,
     others: differing(built, others, drawing.tapeStep),
+    othersComplete: ranking.complete,
     proof: settled.proof,
     top: lastLift?.beam?.top ?? lastLift?.top ?? ground.firstCourseTop,
     reasons: [...gathered.reasons, ...settled.reasons, ...missed, ...tall],

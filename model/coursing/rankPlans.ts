@@ -14,8 +14,14 @@ interface Branch {
   readonly rated: RatedPlan | null;
 }
 
-/** Pieces of cost made in looking for the best plan, in refining it, and in looking for the others. */
-const WORK = { best: 2_000_000, refined: 1_000_000, others: 1_000_000 };
+/** Most pieces of cost made in looking for the best plan, in refining it, and in looking for the others. */
+export interface WorkLimits {
+  readonly best: number;
+  readonly refined: number;
+  readonly others: number;
+}
+
+const WORK: WorkLimits = { best: 2_000_000, refined: 1_000_000, others: 1_000_000 };
 
 export interface Ranking {
   readonly plans: readonly RatedPlan[];
@@ -45,21 +51,21 @@ export function mostSoftOfOthers(problem: Problem, best: Plan): number {
  * are within `mostSoftOfOthers`. The plans without the best one's counts are parted by the first stop
  * where they differ, and each part is searched in the same exact way (Lawler's partition).
  */
-export function rankPlans(problem: Problem, most: number): Ranking {
+export function rankPlans(problem: Problem, most: number, limits: WorkLimits = WORK): Ranking {
   const hardStops = problem.stops.filter((stop) => stop.hold === 'hard').length;
-  const best: Work = { left: WORK.best };
+  const best: Work = { left: limits.best };
   const first = cheapestPlan(problem, { missed: hardStops, leastSoft: 0, mostSoft: ANY_SOFT }, { work: best });
   if (!first) return { plans: [], complete: best.left >= 0, proved: false };
   const missed = Math.floor(first.cost.hard / HARD_MISS);
   const range: CostRange = { missed, leastSoft: first.cost.soft, mostSoft: mostSoftOfOthers(problem, first) };
-  const refining: Work = { left: WORK.refined };
+  const refining: Work = { left: limits.refined };
   const ahead = missed === 0 ? costAhead(problem, range.mostSoft, refining) : null;
   const help = (work: Work, allowed: CountAllowed): SearchHelp =>
     ahead ? { work, allowed, ahead } : { work, allowed };
 
   const plans: RatedPlan[] = [];
   const open: Branch[] = [{ settled: [], barred: new Set(), plan: first, rated: null }];
-  const others: Work = { left: WORK.others };
+  const others: Work = { left: limits.others };
   while (open.length > 0 && plans.length < most) {
     if (others.left < 0) return { plans, complete: false, proved: refining.left >= 0 };
     const at = cheapestIndex(open);
@@ -82,7 +88,7 @@ export function rankPlans(problem: Problem, most: number): Ranking {
       if (plan) open.push({ settled, barred, plan, rated: null });
     }
   }
-  return { plans, complete: true, proved: refining.left >= 0 };
+  return { plans, complete: others.left >= 0, proved: refining.left >= 0 };
 }
 
 /** A count of courses, with or without a thinner one, as one number. */

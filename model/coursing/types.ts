@@ -97,6 +97,8 @@ export interface Coursing {
   readonly answer: CoursingAnswer;
   /** The next best answers that really differ, best first. */
   readonly others: readonly CoursingAnswer[];
+  /** False where the work ran out before every other answer was looked for: there may be more than these. */
+  readonly othersComplete?: boolean;
   /** Absent where the courses were not chosen by `planCourses`. */
   readonly proof?: Proof;
   /** Top of the masonry or of the last beam. */
