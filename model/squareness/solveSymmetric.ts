@@ -1,5 +1,8 @@
 /** Cholesky's factors of a symmetric positive definite matrix, and its solutions. */
 
+/** Rounding can take a damped pivot no lower than this; below it a quotient could leave the finite numbers. */
+const LEAST_PIVOT = 1e-13;
+
 /** Lower factor, row by row, of a matrix given by rows. Pivots are kept above zero: the caller has damped the matrix. */
 export function factor(matrix: readonly Float64Array[]): Float64Array[] {
   const n = matrix.length;
@@ -10,7 +13,7 @@ export function factor(matrix: readonly Float64Array[]): Float64Array[] {
       const other = lower[j] as Float64Array;
       let sum = matrix[i]![j] as number;
       for (let k = 0; k < j; k++) sum -= row[k]! * other[k]!;
-      row[j] = i === j ? Math.sqrt(Math.max(sum, Number.MIN_VALUE)) : sum / other[j]!;
+      row[j] = i === j ? Math.sqrt(Math.max(sum, LEAST_PIVOT)) : sum / other[j]!;
     }
   }
   return lower;
