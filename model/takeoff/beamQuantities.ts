@@ -3,14 +3,9 @@ import type { Coursing } from '../coursing/types';
 import type { Drawing } from '../drawing/schema';
 import { roundTicks, ticks, TICKS_PER_MM } from '../length/ticks';
 import { signedArea } from '../geometry/polygon';
-import type { RunGeometry, Walls } from '../walls/types';
+import type { Walls } from '../walls/types';
+import { barLength, planBars } from './barPlan';
 import type { Takeoff } from './types';
-
-/** Laps in one bar of a run: where stock lengths join along it, and one at its second corner where it meets another run. */
-function lapsInRun(run: RunGeometry, stock: number, lap: number): number {
-  const along = stock > lap ? Math.max(0, Math.ceil((run.centreLength - lap) / (stock - lap)) - 1) : 0;
-  return along + (run.ends[1].others.length > 0 ? 1 : 0);
-}
 
 /**
  * Each beam runs along every wall. Concrete is the walls' plan (mitred bodies, so a corner counts once) by the beam's
@@ -25,8 +20,16 @@ export function beamQuantities(drawing: Drawing, walls: Walls, coursing: Coursin
     const drawn = beam && beams.get(beam.id);
     if (!beam || !drawn) return [];
     const { count, lap } = drawn.bars;
-    const laps = walls.runs.reduce((sum, run) => sum + lapsInRun(run, drawing.poleKit.stockLength, lap), 0);
+    const { stockLength: stock, kerf } = drawing.poleKit;
     const concrete = (area * (beam.top - beam.soffit)) / TICKS_PER_MM ** 3;
-    return [{ beamId: beam.id, length: ticks(length), concrete, bar: roundTicks(count * (length + laps * lap)) }];
+    return [
+      {
+        beamId: beam.id,
+        length: ticks(length),
+        concrete,
+        bar: roundTicks(barLength(walls.runs, count, stock, lap)),
+        stock: planBars(walls.runs, count, { stock, lap, kerf }),
+      },
+    ];
   });
 }

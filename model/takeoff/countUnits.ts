@@ -4,14 +4,18 @@ import { unitSize } from '../bond/unitSize';
 import type { Coursing } from '../coursing/types';
 import type { Drawing } from '../drawing/schema';
 import type { Walls } from '../walls/types';
-import { firstFitFalling } from './cutPlan';
-import type { UnitCount } from './types';
+import { cutPlan } from './cutPlan';
+import type { CourseCount, UnitCount } from './types';
 
 export interface UnitCounts {
   readonly units: UnitCount;
   readonly unitsByRun: readonly { readonly runId: string; readonly count: UnitCount }[];
   readonly unitsByLift: readonly { readonly lift: number; readonly count: UnitCount }[];
+  readonly unitsByCourse: readonly CourseCount[];
 }
+
+/** Steps that one run's closers of one lift may take to prove their cutting plan. */
+const CLOSER_WORK = 20_000;
 
 const NONE: UnitCount = { whole: 0, closers: 0, cutFrom: 0, total: 0 };
 
@@ -46,13 +50,31 @@ function countLift(patterns: readonly BondPattern[], laid: ReadonlyMap<number, n
       if (piece.kind === 'unit') whole += times;
       if (piece.kind === 'closer') for (let i = 0; i < times; i += 1) closers.push(piece.end - piece.start);
     }
-  const cutFrom = firstFitFalling(closers, unit, kerf).length;
+  const cutFrom = cutPlan(closers, unit, kerf, CLOSER_WORK).stock.length;
   return { whole, closers: closers.length, cutFrom, total: whole + cutFrom };
 }
 
+/** Adds up every course over the runs; a run's patterns are counted once each. */
+function countCourses(bond: Bond, coursing: Coursing): CourseCount[] {
+  const counts = coursing.courses.map(({ number, lift }) => ({ course: number, lift, whole: 0, closers: 0 }));
+  for (const { patterns, patternByCourse } of bond.runs) {
+    const found = patterns.map(({ pieces }) => {
+      const closers = pieces.filter((piece) => piece.kind === 'closer').length;
+      return { closers, whole: pieces.filter((piece) => piece.kind === 'unit').length };
+    });
+    patternByCourse.forEach((pattern, i) => {
+      const [count, add] = [counts[i], found[pattern]];
+      if (!count || !add) return;
+      count.whole += add.whole;
+      count.closers += add.closers;
+    });
+  }
+  return counts;
+}
+
 /**
- * Counts what is laid. Closers are cut by first fit, longest first, each saw cut losing a kerf (the kit's): an offcut
- * long enough serves another closer of the same run and lift, where it falls, and is thrown away otherwise. So the
+ * Counts what is laid. Closers are cut by the plan that takes the fewest units, each saw cut losing a kerf (the kit's): an
+ * offcut long enough serves another closer of the same run and lift, where it falls, and is thrown away otherwise. So the
  * counts by run and by lift both add up to the whole.
  */
 export function countUnits(drawing: Drawing, walls: Walls, coursing: Coursing, bond: Bond): UnitCounts {
@@ -71,5 +93,5 @@ export function countUnits(drawing: Drawing, walls: Walls, coursing: Coursing, b
     return { runId: run.runId, count };
   });
   const unitsByLift = [...byLift].sort((a, b) => a[0] - b[0]).map(([lift, count]) => ({ lift, count }));
-  return { units: total, unitsByRun, unitsByLift };
+  return { units: total, unitsByRun, unitsByLift, unitsByCourse: countCourses(bond, coursing) };
 }

@@ -1,4 +1,6 @@
 /** Cutting plans: how many whole lengths it takes to make a set of cuts, each saw cut losing a kerf. */
+import { leastLengths, type Sized } from './binBound';
+import { completeBins, type Work } from './completeBins';
 
 /** One whole length: the cuts made from it and what is left. */
 export interface CutStock {
@@ -6,8 +8,19 @@ export interface CutStock {
   readonly left: number;
 }
 
-/** Up to this many cuts are planned exactly; beyond, first fit by falling length. */
-const EXACT_CUTS = 14;
+export interface CutPlan {
+  readonly stock: readonly CutStock[];
+  /** No plan has fewer lengths than this. */
+  readonly least: number;
+  /** Whether `stock` is proved to be the fewest; where not, the work ran out first. */
+  readonly proved: boolean;
+}
+
+/** Steps that a plan may take to prove its count, enough for most lists of sixty cuts of as many sizes. */
+const WORK = 2_000_000;
+
+/** Lists longer than this are left at first fit where the bound does not prove it. */
+const MOST_SEARCHED = 2000;
 
 /**
  * Takes a cut off what is left of a length. A cut that leaves nothing needs no saw beyond it, and one that leaves less
@@ -36,40 +49,43 @@ export function firstFitFalling(cuts: readonly number[], stock: number, kerf: nu
   return bins;
 }
 
+function sizesOf(sorted: readonly number[], kerf: number): Sized[] {
+  const sizes: { size: number; count: number }[] = [];
+  for (const cut of sorted) {
+    const last = sizes[sizes.length - 1];
+    if (last?.size === cut + kerf) last.count += 1;
+    else sizes.push({ size: cut + kerf, count: 1 });
+  }
+  return sizes;
+}
+
 /**
- * The fewest lengths that make the cuts, found by trying every way that differs, largest cut first, kept under the
- * count of the plan by first fit. Cuts longer than the stock are left out: whoever asks can count what came back.
+ * The fewest lengths that make the cuts. A length is cut into cuts and a kerf after each but the last, so that cuts grown
+ * by a kerf are to be packed into lengths grown by one. The plan by first fit is the answer where a bound says that
+ * no plan has fewer lengths; else every smaller count is tried from that bound up, within `work` steps. Cuts longer than
+ * the stock are left out: whoever asks can count what came back.
  */
-export function planCuts(cuts: readonly number[], stock: number, kerf: number): CutStock[] {
+export function cutPlan(cuts: readonly number[], stock: number, kerf: number, work = WORK): CutPlan {
   const sorted = cuts.filter((cut) => cut > 0 && cut <= stock).sort((a, b) => b - a);
-  let best = firstFitFalling(sorted, stock, kerf);
-  const need = sorted.reduce((sum, cut) => sum + cut, 0);
-  const bound = Math.ceil(need / stock);
-  if (sorted.length > EXACT_CUTS || best.length <= bound) return best;
-  const bins: { cuts: number[]; left: number }[] = [];
-  const place = (k: number): boolean => {
-    if (bins.length >= best.length) return false;
-    const cut = sorted[k];
-    if (cut === undefined) {
-      best = bins.map((bin) => ({ cuts: [...bin.cuts], left: bin.left }));
-      return best.length <= bound;
-    }
-    const tried = new Set<number>();
-    for (const bin of bins) {
-      if (bin.left < cut || tried.has(bin.left)) continue;
-      tried.add(bin.left);
-      const before = bin.left;
-      bin.cuts.push(cut);
-      bin.left = leftAfter(before, cut, kerf);
-      if (place(k + 1)) return true;
-      bin.cuts.pop();
-      bin.left = before;
-    }
-    bins.push({ cuts: [cut], left: leftAfter(stock, cut, kerf) });
-    if (place(k + 1)) return true;
-    bins.pop();
-    return false;
-  };
-  place(0);
-  return best;
+  const quick = firstFitFalling(sorted, stock, kerf);
+  if (sorted.length === 0) return { stock: quick, least: 0, proved: true };
+  const sizes = sizesOf(sorted, kerf);
+  let least = leastLengths(sizes, stock + kerf);
+  const budget: Work = { left: sorted.length > MOST_SEARCHED ? 0 : work };
+  for (; least < quick.length; least += 1) {
+    const found = completeBins(sizes, stock + kerf, least, budget);
+    if (found === 'work') return { stock: quick, least, proved: false };
+    if (!found) continue;
+    const bins = found.map((bin) => {
+      const made = bin.map((size) => size - kerf);
+      return { cuts: made, left: made.reduce((left, cut) => leftAfter(left, cut, kerf), stock) };
+    });
+    return { stock: bins, least, proved: true };
+  }
+  return { stock: quick, least: quick.length, proved: true };
+}
+
+/** The lengths of the best plan found within the usual work. */
+export function planCuts(cuts: readonly number[], stock: number, kerf: number): readonly CutStock[] {
+  return cutPlan(cuts, stock, kerf).stock;
 }

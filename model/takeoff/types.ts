@@ -17,10 +17,27 @@ export interface MortarVolume {
   readonly head: number;
 }
 
+export interface CourseCount {
+  /** 1 at the bottom. */
+  readonly course: number;
+  readonly lift: number;
+  readonly whole: number;
+  readonly closers: number;
+}
+
+/** So many stock lengths, each cut alike. */
+export interface StockPlan {
+  readonly count: number;
+  readonly cuts: readonly Ticks[];
+  readonly left: Ticks;
+}
+
 export interface Takeoff {
   readonly units: UnitCount;
   readonly unitsByRun: readonly { readonly runId: string; readonly count: UnitCount }[];
   readonly unitsByLift: readonly { readonly lift: number; readonly count: UnitCount }[];
+  /** What each course takes: whole units and closers. Units cut for closers are shared between courses, so none are said. */
+  readonly unitsByCourse: readonly CourseCount[];
   readonly mortar: MortarVolume;
   /** Concrete of the bond beams, and their bar: total length with laps. */
   readonly beams: readonly {
@@ -28,6 +45,8 @@ export interface Takeoff {
     readonly length: Ticks;
     readonly concrete: number;
     readonly bar: Ticks;
+    /** Stock lengths to buy for the bar, plans alike counted together; empty where the stock is no longer than a lap. */
+    readonly stock: readonly StockPlan[];
   }[];
   readonly lintels: readonly { readonly length: Ticks; readonly depth: Ticks; readonly count: number }[];
   readonly poles: {
