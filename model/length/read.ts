@@ -118,7 +118,7 @@ function refuse(trouble: Trouble): ReadLength {
  * is for the asker to say.
  */
 export function readLength(text: string, site: { readonly units: LengthUnits }): ReadLength {
-  const { negative, tokens, problem } = tokenise(text);
+  const { negative, tokens, problem } = tokenise(text, site.units);
   if (problem) return refuse(problem);
   const quantities = groupQuantities(tokens);
   if ('problem' in quantities) return refuse(quantities);

@@ -1,5 +1,7 @@
 /** Splits a written length into numbers, units and dashes, each with its place in the text. */
 
+import type { LengthUnits } from './units';
+
 /** What can be wrong with a written length; worded by the dictionary under `lengths.problems`. */
 export const LENGTH_PROBLEMS = [
   'empty',
@@ -75,14 +77,21 @@ const UNITS: Readonly<Record<string, UnitName>> = {
   m: 'm',
 };
 
-const FOOT_MARKS = /^['′’‘ʹ´`]/;
+const FOOT_MARKS = /^['′’‘ʹʼ´`]/;
 /** Two foot marks together are one inch mark. */
-const INCH_MARKS = /^(?:["″”“ʺ]|['′’‘ʹ´`]{2})/;
+const INCH_MARKS = /^(?:["″”“ʺˮ]|['′’‘ʹʼ´`]{2})/;
 const MINUS = /^[-−–]/;
 const DASH = /^[-−–—]/;
 const SLASH = /^\s*[/⁄∕]\s*/;
 const SPACE = /^\s+/;
+/** A comma with a number after it. */
+const COMMA = /^,\s+(?=[\d.½⅓⅔¼¾⅕⅖⅗⅘⅙⅚⅛⅜⅝⅞⅒])/;
 const WORD = /^[A-Za-zµ]+\.?/;
+/** Digits in threes, as metric drawings set them apart; a fraction's digits are none. */
+const GROUPED = /^\d{1,3}(?:\s\d{3})+(?!\d|\s*[/⁄∕])/;
+/** What follows a metric number: its decimals, then its unit. */
+const METRIC_UNIT = /^(?:[.,]\d*)?\s*(?:mm|cm|m)(?![A-Za-z])/i;
+const NO_UNIT = /^(?:[.,]\d*)?\s*$/;
 
 function decimal(whole: string, part: string): Amount {
   return { top: BigInt(`${whole}${part}` || '0'), bottom: 10n ** BigInt(part.length) };
@@ -116,10 +125,23 @@ function readNumber(rest: string, at: number): Found | Trouble | null {
   if (!slash) return { token: { kind: 'number', at, amount: decimal(whole, ''), form: 'whole' }, length: whole.length };
   const below = whole.length + slash[0].length;
   const bottom = /^\d+/.exec(rest.slice(below))?.[0];
-  if (bottom === undefined) return { at: at + whole.length, problem: 'fractionUnfinished' };
+  if (bottom === undefined) return { at: at + whole.length + slash[0].search(/\S/), problem: 'fractionUnfinished' };
   if (BigInt(bottom) === 0n) return { at: at + below, problem: 'zeroDenominator' };
   const amount = { top: BigInt(whole), bottom: BigInt(bottom) };
   return { token: { kind: 'number', at, amount, form: 'fraction' }, length: below + bottom.length };
+}
+
+/** `1 200 mm` is one number; so is `1 200` where bare numbers are millimetres. Elsewhere they are two. */
+function readGrouped(rest: string, at: number, units: LengthUnits): Found | Trouble | null {
+  const digits = GROUPED.exec(rest)?.[0];
+  if (digits === undefined) return null;
+  const after = rest.slice(digits.length);
+  if (!METRIC_UNIT.test(after) && !(units === 'metric' && NO_UNIT.test(after))) return null;
+  const joined = digits.replace(/\s/g, '');
+  const gaps = digits.length - joined.length;
+  const found = readNumber(joined + after, at);
+  if (!found) return null;
+  return 'problem' in found ? { ...found, at: found.at + gaps } : { ...found, length: found.length + gaps };
 }
 
 function readUnit(rest: string, at: number): Found | Trouble | null {
@@ -135,8 +157,8 @@ function readUnit(rest: string, at: number): Found | Trouble | null {
     : { token: { kind: 'unit', at, unit }, length: word.length };
 }
 
-/** Splits a text; stops at the first thing that can't be part of a length. */
-export function tokenise(text: string): Tokens {
+/** Splits a text; stops at the first thing that can't be part of a length. `units` are those of a bare number. */
+export function tokenise(text: string, units: LengthUnits): Tokens {
   const tokens: Token[] = [];
   let negative = false;
   const stop = (at: number, problem: LengthProblem): Tokens => ({ negative, tokens, problem: { at, problem } });
@@ -151,11 +173,17 @@ export function tokenise(text: string): Tokens {
   while (at < text.length) {
     const rest = text.slice(at);
     const space = SPACE.exec(rest);
+    // `5 feet, 4 inches`: the comma only parts what its unit has ended.
+    const parting = tokens[tokens.length - 1]?.kind === 'unit' && COMMA.test(rest);
+    if (parting) {
+      at++;
+      continue;
+    }
     if (space) {
       at += space[0].length;
       continue;
     }
-    const found = readNumber(rest, at) ?? readUnit(rest, at);
+    const found = readGrouped(rest, at, units) ?? readNumber(rest, at) ?? readUnit(rest, at);
     if (found && 'problem' in found) return stop(found.at, found.problem);
     if (found) {
       tokens.push(found.token);

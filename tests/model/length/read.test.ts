@@ -40,6 +40,10 @@ describe('a length as typed on an imperial site', () => {
     ['5 ft 4 in', '64'],
     ['5 feet', '60'],
     ['1 foot 1 inch', '13'],
+    ['5 feet, 4 inches', '64'],
+    ['5ʼ 4ˮ', '64'],
+    [`5'-4-3/8"`, '515/8'],
+    ['5 100/128', '740/128'],
     ['5ft4', '64'],
     ['0', '0'],
     ['.5', '1/2'],
@@ -60,6 +64,19 @@ describe('a length as typed on an imperial site', () => {
       expect(readLength('35cm', site)).toEqual({ ok: true, ticks: 224_000 });
       expect(readLength('1 m 20 cm', site)).toEqual({ ok: true, ticks: 768_000 });
     }
+  });
+
+  it('reads digits set apart in threes where they can only be one metric number', () => {
+    for (const site of [imperial, metric]) {
+      expect(readLength('1 200 mm', site)).toEqual({ ok: true, ticks: 768_000 });
+      expect(readLength('1 000 200,5 mm', site)).toEqual({ ok: true, ticks: 640_128_320 });
+      expect(readLength('1\u202f200 mm', site)).toEqual({ ok: true, ticks: 768_000 });
+      expect(readLength('1 200,125 mm', site)).toEqual({ ok: false, at: 5, problem: 'ambiguousComma' });
+      expect(readLength('1 20 mm', site)).toEqual({ ok: false, at: 2, problem: 'unexpectedNumber' });
+      expect(readLength('1 200 ft', site)).toEqual({ ok: false, at: 2, problem: 'unexpectedNumber' });
+    }
+    expect(readLength('1 200', metric)).toEqual({ ok: true, ticks: 768_000 });
+    expect(readLength('1 200', imperial)).toEqual({ ok: false, at: 2, problem: 'unexpectedNumber' });
   });
 
   it('gives a bare number the unit of the site', () => {
@@ -116,7 +133,7 @@ describe('a length that can’t be read', () => {
     ['4 9/8', 'fractionTooLarge', 2],
     ['4 8/8', 'fractionTooLarge', 2],
     ['5/', 'fractionUnfinished', 1],
-    ['5 /"', 'fractionUnfinished', 1],
+    ['5 /"', 'fractionUnfinished', 2],
     [`5' 12"`, 'inchesTooLarge', 3],
     ['5-12', 'inchesTooLarge', 2],
     ['1,200', 'ambiguousComma', 1],
@@ -125,6 +142,22 @@ describe('a length that can’t be read', () => {
     ['1'.repeat(41), 'tooLong', 40],
   ])('says what is wrong with %j: %s at %i', (text, problem, at) => {
     expect(readLength(text, imperial)).toEqual({ ok: false, problem, at });
+  });
+
+  it('points at a character that does not belong, wherever it stands', () => {
+    const texts = [`5' 4 3/8"`, '5-4 3/8', '64.375', '1.2 m', '350 mm', '1 200 mm', '4½', '-4 3/8'];
+    for (const text of texts) {
+      for (let at = 0; at <= text.length; at++) {
+        for (const foreign of ['#', '*', '=', '٣', '\u{1F9F1}']) {
+          const read = readLength(text.slice(0, at) + foreign + text.slice(at), metric);
+          // A fraction that is broken off before it is pointed at by its line.
+          const line = text.indexOf('/');
+          const expected = line >= 0 && at === line + 1 ? [at, line] : [at];
+          expect(read.ok).toBe(false);
+          if (!read.ok) expect(expected).toContain(read.at);
+        }
+      }
+    }
   });
 
   it('has words for every problem', () => {

@@ -83,12 +83,15 @@ describe('a length in writing', () => {
         { numRuns: 300 },
       );
     }
-    // And densely over the first two feet.
+    // And every single step over a ten-foot pole, up and down.
     for (const format of FORMATS) {
-      for (let step = 0; step <= inches(24); step += format.step) {
-        const length = shownLength(ticks(step), format);
-        expect(readLength(writeLength(length, format), format)).toEqual({ ok: true, ticks: length });
+      const wrong: number[] = [];
+      for (let length = -inches(120); length <= inches(120); length += format.step) {
+        const whole = shownLength(ticks(length), format);
+        const read = readLength(writeLength(whole, format), format);
+        if (!read.ok || read.ticks !== whole) wrong.push(whole);
       }
+      expect(wrong).toEqual([]);
     }
   });
 
@@ -125,6 +128,18 @@ describe('a length read aloud', () => {
 
   it('says inches alone where the style is inches', () => {
     expect(sayLength(inches(64.375), 'imperial', sixteenth, 'inches')).toBe('sixty-four and three eighths inches');
+  });
+
+  it('says no two steps of a tape alike, over a ten-foot pole', () => {
+    for (const { units, step, style } of FORMATS) {
+      const said = new Map<string, number>();
+      for (let length = 0; length <= inches(120); length += step) {
+        const words = sayLength(ticks(length), units, step, style);
+        expect([words, said.get(words)]).toEqual([words, undefined]);
+        said.set(words, length);
+      }
+      expect(said.size).toBe(Math.floor(inches(120) / step) + 1);
+    }
   });
 
   it('says metric lengths', () => {
