@@ -13,20 +13,48 @@ const config = getDefaultConfig(__dirname);
 // A cache of this checkout's own: the default is a shared temporary folder that a second user cannot write to.
 config.cacheStores = [new FileStore({ root: path.join(__dirname, 'node_modules/.cache/metro') })];
 
-// What packages bring along and nothing of ours calls, by who asks for it: zod's locales (about 400 kB; people read our own
-// words), its JSON Schemas and its compiler (the content security policy forbids it), and the router's tab bars
-// and its page of all routes.
+// What packages bring along and nothing of ours reaches, by who asks for it. Each stand-in says so if it is reached after all.
 const standIns = [
+  // zod's locales (about 400 kB; people read our own words), its JSON Schemas, and its compiler (the content security policy forbids it).
   { from: /[\\/]zod[\\/]v4[\\/]/, name: /locales\/index\.c?js$/, file: 'canvas/client/zodEnglish.ts' },
   {
     from: /[\\/]zod[\\/]v4[\\/]/,
     name: /\/(?:json-schema-processors|json-schema-generator|to-json-schema|from-json-schema|compile|deep-partial|in-out)\.c?js$/,
     file: 'canvas/client/zodWithout.ts',
   },
+  // The router's tab bars, tool bars, link previews and zooms, its page of all routes, and the navigation that it replaced by its own.
   {
-    from: /[\\/]expo-router[\\/]build[\\/](?:exports|getRoutes|ExpoRoot|views[\\/]ErrorBoundary|views[\\/]Toast)\.js$/,
-    name: /\/(?:layouts\/Tabs|layouts\/experimental-stack|react-navigation\/bottom-tabs|views\/Sitemap|views\/Unmatched)$/,
+    from: /[\\/]expo-router[\\/]build[\\/](?:exports|index|getRoutes|ExpoRoot|views[\\/]\w+|layouts[\\/].*|link[\\/]\w+)\.js$/,
+    name: /\/(?:layouts\/Tabs|layouts\/experimental-stack|react-navigation\/bottom-tabs|views\/Sitemap|views\/Unmatched|Unmatched|standard-navigation|color|native-tabs\/NativeTabTrigger|toolbar|StackSearchBar|LinkWithPreview|elements|link-apple-zoom|link-apple-zoom-target)$/,
     file: 'canvas/client/routerWithout.ts',
+  },
+  {
+    from: /[\\/]expo-router[\\/]build[\\/]react-navigation[\\/](?:native|core|routers)[\\/]index\.js$/,
+    name: /\/(?:createStaticNavigation|StaticNavigation|Link|NavigationContainer|ServerContainer|useLinkBuilder|useLinkProps|useLinkTo|getStateFromPath|getPathFromState|DrawerRouter|TabRouter)$/,
+    file: 'canvas/client/routerWithout.ts',
+  },
+  {
+    from: /[\\/]expo-router[\\/]build[\\/]screensFeatureFlags\.js$/,
+    name: /^react-native-screens$/,
+    file: 'canvas/client/routerWithout.ts',
+  },
+  {
+    from: /[\\/]react-navigation[\\/]native-stack[\\/]/,
+    name: /\/views\/NativeStackView$/,
+    file: 'canvas/client/stackView.tsx',
+  },
+  // The router asks for the whole of React Native; in development its own notices use some of this.
+  {
+    built: true,
+    from: /[\\/]react-native-web[\\/]dist[\\/]index\.js$/,
+    name: /\/exports\/(?:Alert|Animated|Button|CheckBox|Clipboard|FlatList|ImageBackground|InputAccessoryView|InteractionManager|KeyboardAvoidingView|LayoutAnimation|Modal|PanResponder|Picker|ProgressBar|RefreshControl|SafeAreaView|SectionList|Share|Switch|Touchable\w*|Vibration|VirtualizedList|YellowBox)$/,
+    file: 'canvas/client/nativeWithout.ts',
+  },
+  {
+    built: true,
+    from: /[\\/]react-native-gesture-handler[\\/].*[\\/]findNodeHandle\.web\.js$/,
+    name: /\/exports\/FlatList$|FlatList\/index/,
+    file: 'canvas/client/nativeWithout.ts',
   },
   // Gesture handler asks for reanimated to run gestures as worklets; ours run in plain JavaScript, which it does without.
   {
@@ -42,7 +70,9 @@ const standIns = [
   },
 ];
 config.resolver.resolveRequest = (context, moduleName, platform) => {
-  const standIn = standIns.find(({ from, name }) => from.test(context.originModulePath) && name.test(moduleName));
+  const standIn = standIns.find(
+    ({ from, name, built }) => from.test(context.originModulePath) && name.test(moduleName) && !(built && context.dev),
+  );
   if (standIn) return { type: 'sourceFile', filePath: path.join(__dirname, standIn.file) };
   return context.resolveRequest(context, moduleName, platform);
 };
