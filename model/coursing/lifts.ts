@@ -1,20 +1,22 @@
 /** The lifts of the building, and those that rise too high between two bond beams. */
 import type { Drawing } from '../drawing/schema';
-import { roundTicks, ticks } from '../length/ticks';
+import { roundTicks, ticks, type Ticks } from '../length/ticks';
 import type { Reason } from '../reasons';
 import { ruleValue } from '../rules/registry';
 import type { Walls } from '../walls/types';
 import type { PlanLift } from './layCourses';
-import type { Lift } from './types';
+import type { Course, Lift } from './types';
 
 /**
  * Holds each lift against the rule `liftToThickness`: its masonry, measured to the underside of the bond beam (NMAC
- * 14.7.4.23 A), is no taller than so many times the thinnest wall.
+ * 14.7.4.23 A), is no taller than so many times the thinnest wall. Where it is, the nearest height that would do is that
+ * of the highest course line that a beam may be set on.
  */
 export function checkLifts(
   drawing: Drawing,
   walls: Walls,
   planned: readonly PlanLift[],
+  courses: readonly Course[],
 ): { lifts: Lift[]; reasons: Reason[] } {
   const thinnest = walls.runs.reduce((least, run) => Math.min(least, run.thickness), Infinity);
   const ratio = ruleValue(drawing, 'liftToThickness');
@@ -30,10 +32,17 @@ export function checkLifts(
         ...(beam ? { against: [{ kind: 'bondBeam', id: beam.id } as const] } : {}),
         rule: 'liftToThickness',
         amount: ticks(over),
-        nearest: { below: ticks(base + most), above: null },
+        nearest: { below: highestLine(courses, number, base + most), above: null },
       });
     }
     return { number, base, top, beam, most, firstCourse, lastCourse };
   });
   return { lifts, reasons };
+}
+
+/** The highest course top of a lift at or below a height; null where even its first course is above. */
+function highestLine(courses: readonly Course[], lift: number, most: number): Ticks | null {
+  let highest: Ticks | null = null;
+  for (const course of courses) if (course.lift === lift && course.top <= most) highest = course.top;
+  return highest;
 }

@@ -31,7 +31,7 @@ export function planCourses(drawing: Drawing, walls: Walls, ground: Ground): Cou
   const chosen = best ?? rate(problem, { cost: { hard: 0, soft: 0 }, heights: [], counts: [], thins: [] });
   const parts: Parts = { problem, left, openTop, bedding: ground.leastBedding };
   const built = buildAnswer(parts, chosen);
-  const { lifts, reasons: tall } = checkLifts(drawing, walls, built.lifts);
+  const { lifts, reasons: tall } = checkLifts(drawing, walls, built.lifts, built.courses);
   const missed = missedReasons(built.answer, left.length);
   const others = [...rest.map((plan) => buildAnswer(parts, plan)), ...lettingGo(parts, built)];
   const lastLift = lifts[lifts.length - 1];

@@ -208,6 +208,9 @@ describe('planCourses', () => {
       },
     ]);
     expect(codes(plan({ ...walls, bondBeams: [beam(104)], ruleValues: { liftToThickness: 12 } }))).toEqual([]);
+    // At 9.95 times the thickness no beam may be set above 99 1/2 in: the course line below it is at 96.
+    const [reason] = plan({ ...walls, bondBeams: [beam(104)], ruleValues: { liftToThickness: 9.95 } }).reasons;
+    expect(reason?.nearest).toEqual({ below: inches(96), above: null });
   });
 
   it('goes up to 10 ft or 3 m where nothing drawn ends the wall, and says so', () => {
