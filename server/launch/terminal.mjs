@@ -33,7 +33,10 @@ const programs = new Set();
 
 /** Ends the programs still running, when the command itself is stopped. */
 export function stopPrograms() {
-  for (const child of programs) child.kill('SIGTERM');
+  for (const child of programs) {
+    // Its whole group: npx leaves its child behind otherwise.
+    if (child.pid) process.kill(-child.pid, 'SIGTERM');
+  }
 }
 
 /**
@@ -45,7 +48,12 @@ export function stopPrograms() {
  */
 export function runProgram(command, args, { cwd, env, toDo, show = false }) {
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { cwd, env: { ...process.env, ...env }, stdio: ['ignore', 'pipe', 'pipe'] });
+    const child = spawn(command, args, {
+      cwd,
+      env: { ...process.env, ...env },
+      stdio: ['ignore', 'pipe', 'pipe'],
+      detached: true,
+    });
     programs.add(child);
     let words = '';
     for (const stream of [child.stdout, child.stderr]) {
