@@ -5,11 +5,13 @@
 import { benchBundle } from './bundle';
 import { benchCoursing } from './coursing';
 import { isMissed, type Figure } from './figure';
+import { benchPoles } from './poles';
 import { benchSolve } from './solve';
 
 const BENCHES: Record<string, () => Promise<Figure[]>> = {
   solve: benchSolve,
   coursing: benchCoursing,
+  poles: benchPoles,
   bundle: benchBundle,
 };
 
