@@ -104,7 +104,7 @@ function braceOf(
     turned: candidate.turned,
     turnedFor: turnedFor(site, candidate, which, ground),
     over: candidate.over,
-    ties: tiesOf(candidate.foot, cornerIds, walls),
+    ties: tiesOf(candidate.foot, cornerIds, walls, ground),
   };
 }
 

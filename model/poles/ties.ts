@@ -1,8 +1,11 @@
 /** A brace's foot by two tape distances from named corners. */
-import type { PlanPoint } from '../geometry/point';
+import { boxOfSegment } from '../geometry/box';
+import type { PlanPoint, Vec } from '../geometry/point';
 import { cross, distance, dot, sub } from '../geometry/vec';
 import { roundTicks } from '../length/ticks';
 import type { Walls } from '../walls/types';
+import type { Ground } from './obstacles';
+import { partsInside } from './plane';
 import type { Tie } from './types';
 
 /** Two tapes fix a foot well where they cross at 30° or more: below that a small slip of either moves it far. */
@@ -27,19 +30,25 @@ export function cornersAround(runIds: readonly string[], walls: Walls): string[]
   return [...found].slice(0, CORNERS_MOST);
 }
 
-/**
- * The two corners that fix a foot best: the shortest pair of tapes among those that cross at 30° or more, else the pair
- * that crosses nearest to square. Empty where the drawing has no two corners out of line with the foot.
- */
-export function tiesOf(foot: PlanPoint, cornerIds: readonly string[], walls: Walls): readonly Tie[] {
-  const corners = cornerIds
-    .flatMap((id) => walls.cornerById.get(id) ?? [])
-    .map((corner) => ({ corner, away: sub(corner.at, foot), tape: distance(corner.at, foot) }))
-    .filter((each) => each.tape > 0)
-    .sort((a, b) => a.tape - b.tape || a.corner.letter.localeCompare(b.corner.letter));
-  let best: { pair: typeof corners; sine: number; length: number } | null = null;
-  corners.forEach((a, i) => {
-    for (const b of corners.slice(i + 1)) {
+/** True where a tape from a corner to a foot would run through the body of a wall. */
+function runsThrough(corner: PlanPoint, foot: PlanPoint, ground: Ground): boolean {
+  return ground
+    .near(boxOfSegment(corner, foot))
+    .some((obstacle) => obstacle.kind === 'wall' && partsInside(corner, foot, obstacle.ring).length > 0);
+}
+
+interface Tape {
+  readonly cornerId: string;
+  readonly at: PlanPoint;
+  readonly away: Vec;
+  readonly tape: number;
+}
+
+/** The pair of tapes that fixes a foot best: the shortest of those that cross at 30° or more, else the nearest to square. */
+function bestPair(tapes: readonly Tape[]): { readonly pair: readonly [Tape, Tape]; readonly good: boolean } | null {
+  let best: { pair: readonly [Tape, Tape]; sine: number; length: number } | null = null;
+  for (const [i, a] of tapes.entries())
+    for (const b of tapes.slice(i + 1)) {
       const sine = Math.abs(cross(a.away, b.away)) / Math.hypot(cross(a.away, b.away), dot(a.away, b.away));
       const length = a.tape + b.tape;
       const better =
@@ -48,7 +57,26 @@ export function tiesOf(foot: PlanPoint, cornerIds: readonly string[], walls: Wal
         (best.sine < GOOD_SINE && sine > best.sine);
       if (better && sine > 0.01) best = { pair: [a, b], sine, length };
     }
-  });
-  const chosen = best as { pair: typeof corners } | null;
-  return (chosen?.pair ?? []).map(({ corner, tape }) => ({ cornerId: corner.cornerId, distance: roundTicks(tape) }));
+  return best && { pair: best.pair, good: best.sine >= GOOD_SINE };
+}
+
+/**
+ * The two corners that fix a foot best: the shortest pair of tapes that cross at 30° or more and pass no wall's body; where
+ * there is none, one that crosses well through a wall (its place is open until it is laid); else the pair that crosses
+ * nearest to square. Empty where the drawing has no two corners out of line with the foot.
+ */
+export function tiesOf(foot: PlanPoint, cornerIds: readonly string[], walls: Walls, ground: Ground): readonly Tie[] {
+  const tapes = cornerIds
+    .flatMap((id) => walls.cornerById.get(id) ?? [])
+    .map(({ cornerId, letter, at }) => ({ cornerId, letter, at, away: sub(at, foot), tape: distance(at, foot) }))
+    .filter((each) => each.tape > 0)
+    .sort((a, b) => a.tape - b.tape || (a.letter < b.letter ? -1 : 1));
+  const any = bestPair(tapes);
+  const through = ({ at }: Tape) => runsThrough(at, foot, ground);
+  let chosen = any;
+  if (any?.pair.some(through)) {
+    const clear = bestPair(tapes.filter((tape) => !through(tape)));
+    if (clear && (clear.good || !any.good)) chosen = clear;
+  }
+  return (chosen?.pair ?? []).map(({ cornerId, tape }) => ({ cornerId, distance: roundTicks(tape) }));
 }
