@@ -67,6 +67,12 @@ describe('work as laid', () => {
     ]);
   });
 
+  it('holds two readings of a course to each other once', () => {
+    expect(
+      short({ heights: [height('b', 120, 2, 8), height('a', 0, 2, 8)] }).filter(([kind]) => kind === 'level'),
+    ).toEqual([['level', 'a,b', 0, 0]]);
+  });
+
   it('takes the last of two readings of one course at one place', () => {
     expect(short({ heights: [height('a', 0, 2, 9), height('b', 0, 2, 8)] })).toEqual([['height', 'b', 0, 0]]);
   });

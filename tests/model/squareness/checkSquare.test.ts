@@ -98,6 +98,16 @@ describe('squareness', () => {
     expect(Math.abs(found.misread[0]!.by - inches(1))).toBeLessThan(inches(1 / 64));
   });
 
+  it('leaves out what is taped from a corner to itself, or to none', () => {
+    const odd = [
+      { id: 'AA', from: 'A', to: 'A', length: inches(5) },
+      { id: 'AZ', from: 'A', to: 'Z', length: inches(5) },
+    ];
+    const found = checkSquare(figure(...square), [...odd, ...tape(square, ALL)], limits);
+    expect(found.taped.map(({ id }) => id)).toEqual(ALL.split(' '));
+    expect(found.spare).toBe(1);
+  });
+
   it('says when the measurements leave the shape open', () => {
     const found = checkSquare(figure(...square), tape(square, 'AB BC CD DA'), limits);
     expect(found).toMatchObject({ spare: -1, fixed: false, single: null });

@@ -9,7 +9,7 @@ import { beddingChoices, grindBy } from '../../../model/survey/beddingChoices';
 import { levelGround } from '../../../model/survey/levelGround';
 import { solve } from '../../../model/setOut';
 import { layOutWalls } from '../../../model/walls/layOutWalls';
-import { freeWall, lShape, rectangle, withDoor } from '../../helpers/drawings';
+import { freeWall, lShape, rectangle, withDoor, withWindow } from '../../helpers/drawings';
 
 const CUBIC_INCH = 25.4 ** 3;
 const corner = (n: number): Station => ({ kind: 'corner', cornerId: `c${n}` });
@@ -43,6 +43,11 @@ describe('bedding along a run', () => {
     // Level: 1/2 in under 100 − 30 in of wall.
     const { bedding } = levelled(withDoor(freeWall(100), 'r1', 20, 30), read([corner(1), 48]));
     expect(bedding[0]!.volume / CUBIC_INCH).toBeCloseTo(70 * 10 * 0.5, 6);
+  });
+
+  it('goes on under a window', () => {
+    const drawing = withWindow(freeWall(100), 'r1', { at: 20, width: 30, sill: 24, head: 60 });
+    expect(levelled(drawing, read([corner(1), 48])).bedding[0]!.volume / CUBIC_INCH).toBeCloseTo(500, 6);
   });
 
   it('counts each corner of a level building once: the footprint’s area less the inside', () => {
@@ -130,6 +135,28 @@ describe('what to do where the bedding is too thick', () => {
     // 1 1/4 in is reached at 60 in.
     expect(layers.stretches).toEqual([{ runId: 'r1', from: inches(60), to: inches(100), deepest: inches(1.75) }]);
     expect(layers.mortar / CUBIC_INCH).toBeCloseTo(1125, 6);
+  });
+
+  it('tells a stretch once, through its stations, and no further than the run', () => {
+    // D of an L is reentrant: the bodies of C–D and D–E reach past it inside.
+    const low = levelled(
+      lShape(240, 160, 100, 80),
+      read(
+        [corner(1), 48],
+        [corner(2), 48],
+        [corner(3), 48],
+        [onRun(3, 80), 49],
+        [corner(4), 49.5],
+        [corner(5), 48],
+        [corner(6), 48],
+      ),
+    );
+    const layers = beddingChoices(low.drawing, low.walls, low.ground)[0]!;
+    // 1 1/4 in of bedding is 3/4 in down: at 60 in of C–D, and half way along D–E.
+    expect(layers.stretches).toEqual([
+      { runId: 'r3', from: inches(60), to: inches(100), deepest: inches(2) },
+      { runId: 'r4', from: 0, to: inches(40), deepest: inches(2) },
+    ]);
   });
 
   it('grinds the high stretch just so deep that the lowest place is within, and says what that saves', () => {

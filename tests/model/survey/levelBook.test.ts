@@ -96,6 +96,15 @@ describe('a level book', () => {
     expect(reduceBook(round(4), 13).closure.state).toBe('accepted');
   });
 
+  it('accepts a misclosure that is just what the rule allows', () => {
+    // 1 km: 12 mm.
+    const readings = round(12).readings;
+    const just = reduceBook(round(12, { readings, length: mm(1_000_000) }), 12);
+    expect(just.closure).toMatchObject({ state: 'accepted', misclosure: mm(12), allowed: mm(12) });
+    const over = round(12, { length: mm(1_000_000), closing: ticks(mm(10_000) - 1) });
+    expect(reduceBook(over, 12).closure.state).toBe('refused');
+  });
+
   it('can’t judge a miss without a length, nor close without the last foresight', () => {
     const readings = round(3).readings.map(({ distance: _, ...row }) => row);
     expect(reduceBook(round(3, { readings }), 12).closure).toMatchObject({ state: 'unchecked', allowed: null });
@@ -214,6 +223,25 @@ describe('a foundation read by rod', () => {
     expect(ground.stations[0]!.down).toBe(mm(1200));
   });
 
+  it('counts a corner that is the benchmark, and a turning point once, with its foresight', () => {
+    const survey = book([
+      ['back', 1500, corner(1)],
+      ['fore', 1450, corner(2)],
+      ['back', 1300, corner(2)],
+      ['intermediate', 1290, corner(3)],
+    ]);
+    const { stations } = levelGround(drawing, walls, survey);
+    expect(stations.map(({ readingId, height, earlier }) => [readingId, height, earlier.length])).toEqual([
+      ['s0', -mm(60), 0],
+      ['s1', -mm(10), 0],
+      ['s3', 0, 0],
+    ]);
+  });
+
+  it('has nothing to say of an empty book but that nothing was read', () => {
+    expect(levelGround(drawing, walls, book([])).reasons.map(({ code }) => code)).toEqual(['surveyAssumed']);
+  });
+
   it('says when the levels miss by too much, and by how much', () => {
     const { reasons, stations } = levelGround(drawing, walls, round(4));
     const over = mm(4) - allowedMisclosure(mm(100_000), 12);
@@ -232,17 +260,25 @@ describe('a foundation read by rod', () => {
     expect(levelGround(own, walls, round(4)).book?.closure.state).toBe('accepted');
   });
 
-  it('keeps both readings of a station: the last in force, the spread shown', () => {
+  it('keeps all readings of a station: the last in force, the spread shown', () => {
     const twice = book([
       ['back', 1500],
       ['intermediate', 1400, corner(1)],
       ['intermediate', 1400, corner(2)],
+      ['intermediate', 1405, corner(1)],
       ['intermediate', 1409, corner(1)],
     ]);
     const { stations, reasons } = levelGround(drawing, walls, twice);
     expect(stations.map(({ readingId, earlier, spread }) => [readingId, earlier, spread])).toEqual([
       ['s2', [], 0],
-      ['s3', [{ readingId: 's1', down: mm(1400) }], mm(9)],
+      [
+        's4',
+        [
+          { readingId: 's1', down: mm(1400) },
+          { readingId: 's3', down: mm(1405) },
+        ],
+        mm(9),
+      ],
     ]);
     expect(reasons.find(({ code }) => code === 'rereadingsDiffer')?.amount).toBe(mm(9));
   });
