@@ -157,6 +157,41 @@ describe('braces beside obstacles', () => {
   });
 });
 
+describe('a way through near an outside corner', () => {
+  /** A door in A–B whose way starts `edge` inches from A, with a working clearance of `clearance`. */
+  const beside = (edge: number, clearance: number) => {
+    const kit = { ...KIT, clearance: inches(clearance) };
+    const way = { used: true, width: inches(64), depth: inches(60) };
+    // The way of 64 in laps 14 in over each jamb of the opening of 36 in.
+    const set = place(withOpenings({ ...rectangle(), poleKit: kit }, door('AB', edge + 14, { way })));
+    const pole = set.poleById.get('A');
+    return { pole, south: pole?.braces.find((brace) => brace.inLineWith === 'DA') };
+  };
+
+  it('makes the brace turn that would pass within the clearance of it, where the pole itself stands clear', () => {
+    // The heel is 1 3/16 in west of A, so 6 1/4 in from a way that starts 5 1/16 in east of it.
+    const { pole, south } = beside(5 + 1 / 16, 7);
+    expect(pole?.setOff).toBeNull();
+    expect(south?.turned).toBeGreaterThan(0);
+    expect(south?.turnedFor).toEqual({ kind: 'opening', id: 'door-AB-19.0625' });
+    expect(south?.over).toEqual([]);
+  });
+
+  it('leaves the brace straight where it keeps the clearance', () => {
+    const { pole, south } = beside(5 + 1 / 16, 6);
+    expect(pole?.setOff).toBeNull();
+    expect(south?.turned).toBe(0);
+  });
+
+  it('sets the pole off where its steel or spacer would be in the way, as one that reaches just past the corner', () => {
+    // Leg 3 + spacer 1 from the corner, and the 1/2 in that the way laps past it.
+    const { pole, south } = beside(-0.5, 2);
+    expect(pole?.setOff).toEqual({ runId: 'AB', by: inches(4.5), for: { kind: 'opening', id: 'door-AB-13.5' } });
+    // 1 3/16 + 4 1/2 in west of A: 5 3/16 in from the way.
+    expect(south?.turned).toBe(0);
+  });
+});
+
 describe('poles of two buildings near one another', () => {
   /** Two rectangles side by side, 60 in apart: the facing corners' braces would meet in the lane. */
   const facing = (gap: number): Drawing => {

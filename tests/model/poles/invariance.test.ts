@@ -94,7 +94,7 @@ describe('the cost of a placing', () => {
           expect(outcome(place(shifted))).toEqual(outcome(place(drawing)));
         },
       ),
-      { numRuns: 15 },
+      { numRuns: 40, seed: 12, endOnFailure: true },
     );
   });
 
@@ -104,7 +104,7 @@ describe('the cost of a placing', () => {
         const turned = moved(drawing, ({ x, y }) => ({ x: ticks(0 - y), y: x }));
         expect(outcome(place(turned))).toEqual(outcome(place(drawing)));
       }),
-      { numRuns: 15 },
+      { numRuns: 40, seed: 12, endOnFailure: true },
     );
   });
 
@@ -113,7 +113,7 @@ describe('the cost of a placing', () => {
       fc.property(sites, (drawing) => {
         expect(outcome(place(mirrored(drawing)))).toEqual(outcome(place(drawing)));
       }),
-      { numRuns: 15 },
+      { numRuns: 40, seed: 12, endOnFailure: true },
     );
   });
 
@@ -134,7 +134,7 @@ describe('the cost of a placing', () => {
             pole.braces.map((brace) => brace.foot),
           );
       }),
-      { numRuns: 15 },
+      { numRuns: 40, seed: 12, endOnFailure: true },
     );
   });
 });
