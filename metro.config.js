@@ -56,6 +56,12 @@ const standIns = [
     name: /\/exports\/FlatList$|FlatList\/index/,
     file: 'canvas/client/nativeWithout.ts',
   },
+  // Reanimated's entering, leaving and changing places, animations written as styles, and animated kinds of views besides the plain one.
+  {
+    from: /[\\/]react-native-reanimated[\\/]lib[\\/]module[\\/](?:Animated|initializers|createAnimatedComponent[\\/]AnimatedComponent|css[\\/]component[\\/]AnimatedComponent)\.js$/,
+    name: /\/(?:component\/(?:FlatList|Image|ScrollView|Text)\.js|css\/svg\/index\.js|layoutReanimation\/(?:web\/index|web\/domUtils|SharedTransition)\.js|platform)$/,
+    file: 'canvas/client/motionWithout.ts',
+  },
   // Gesture handler asks for reanimated to run gestures as worklets; ours run in plain JavaScript, which it does without.
   {
     from: /[\\/]react-native-gesture-handler[\\/].*[\\/]reanimatedWrapper\.js$/,
