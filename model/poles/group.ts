@@ -34,7 +34,7 @@ export interface SearchBound {
   readonly inAll: number;
 }
 
-export const USUAL_BOUND: SearchBound = { most: 3_000_000, inAll: 9_000_000 };
+export const USUAL_BOUND: SearchBound = { most: 3_000_000, inAll: 3_000_000 };
 
 export interface Solved {
   readonly pairs: ReadonlyMap<number, Pair>;

@@ -4,7 +4,7 @@ import type { Drawing } from '../../../model/drawing/schema';
 import { inches, ticks } from '../../../model/length/ticks';
 import { layOutWalls } from '../../../model/walls/layOutWalls';
 import type { Walls } from '../../../model/walls/types';
-import { outline, plan, type Place } from './shapes';
+import { bodyAreas, outline, plan, wallType, type Place } from './shapes';
 
 /** Star-shaped outlines of 3 to 9 corners at any angles, and drawings of any runs at all between a few places. */
 const star = fc.array(fc.integer({ min: 150, max: 600 }), { minLength: 3, maxLength: 9 }).map((radii) =>
@@ -112,6 +112,40 @@ describe('walls laid out', () => {
       }),
       { numRuns: 100 },
     );
+  });
+
+  // Up to six corners: nearer to a straight line two thicknesses meet in a step, square ends and all.
+  it('of two thicknesses meet at any angle without a gap or an overlap, by a general geometry library', () => {
+    const types = [wallType('thin', 8), wallType('thick', 14)];
+    const mixed = fc
+      .array(fc.tuple(fc.integer({ min: 300, max: 420 }), fc.boolean()), { minLength: 4, maxLength: 6 })
+      .map((corners) => {
+        const drawing = outline(
+          corners.map(([radius], i): Place => {
+            const angle = (2 * Math.PI * i) / corners.length;
+            return [Math.round(radius * Math.cos(angle)), Math.round(radius * Math.sin(angle))];
+          }),
+          types,
+        );
+        const runs = drawing.runs.map((run, i) => ({ ...run, wallTypeId: corners[i]?.[1] ? 'thick' : 'thin' }));
+        return { ...drawing, runs };
+      });
+    let both = 0;
+    fc.assert(
+      fc.property(mixed, (drawing) => {
+        const walls = layOutWalls(drawing);
+        expect(walls.reasons).toEqual([]);
+        const [footprint] = walls.footprints;
+        const areas = bodyAreas(walls);
+        // Faces are rounded to the tick: an area may be out by a tick along the perimeter.
+        expect(Math.abs(areas.union - areas.sum)).toBeLessThan(walls.perimeter);
+        const between = (footprint?.areaOutside ?? 0) - (footprint?.areaInside ?? 0);
+        expect(Math.abs(areas.union - between)).toBeLessThan(walls.perimeter);
+        if (new Set(walls.runs.map((run) => run.thickness)).size === 2) both += 1;
+      }),
+      { numRuns: 100, seed: 6, endOnFailure: true },
+    );
+    expect(both).toBeGreaterThan(50);
   });
 
   it('have whole coordinates and no NaN, whatever is drawn', () => {
