@@ -15,6 +15,14 @@ const EVERY_PLACE = 8;
 /** Where joints may vary so much that more counts of units fit, only those with joints nearest to nominal are tried. */
 const MOST_COUNTS = 6;
 
+/**
+ * A course of more pieces than this takes up any length in its joints, or in one closer with nominal joints: joints off
+ * nominal would only let two courses drift apart along it. Fewer counts and no other joints are tried, so that
+ * the ways to lay a long course are as many as for a short one.
+ */
+const LONG = 40;
+const MOST_COUNTS_LONG = 3;
+
 interface Counted {
   readonly count: number;
   /** Joints between which the sum of the closers stays inside its limits. */
@@ -45,7 +53,8 @@ function countsFor(span: Span, closers: number, leastSum: number, mostSum: numbe
     if (least <= most) counted.push({ count, least, most, jointCount });
   }
   const off = ({ least, most }: Counted) => Math.abs(clamp(joint.nominal, least, most) - joint.nominal);
-  return counted.length > MOST_COUNTS ? counted.sort((a, b) => off(a) - off(b)).slice(0, MOST_COUNTS) : counted;
+  const enough = wholes > LONG ? MOST_COUNTS_LONG : MOST_COUNTS;
+  return counted.length > enough ? counted.sort((a, b) => off(a) - off(b)).slice(0, enough) : counted;
 }
 
 function clamp(value: number, least: number, most: number): number {
@@ -117,7 +126,8 @@ function oneCloser(span: Span, apart: number, limits: BondLimits, thorough: bool
     const left = spanLength(span) - (counted.count - 1) * unit;
     const near = clamp(limits.joint.nominal, counted.least, counted.most);
     const sizes = new Set<number>([Math.round(left - counted.jointCount * near)]);
-    for (const joint of thorough ? jointsToTry(counted, near) : []) {
+    const joints = counted.count > LONG ? [near] : jointsToTry(counted, near);
+    for (const joint of thorough ? joints : []) {
       sizes.add(Math.round(left - counted.jointCount * joint));
       for (const size of fittingClosers(apart, joint, limits)) sizes.add(size);
     }
