@@ -203,7 +203,8 @@ export function createDraftStore(start: DraftStart): DraftStore {
     setMode(mode) {
       cancel();
       if (mode === 'edit' && !mayEdit()) return;
-      set({ mode, tool: 'select', preview: null });
+      // Where nothing is drawn yet there is nothing to move: drawing begins with a wall.
+      set({ mode, tool: mode === 'edit' && get().drawing.runs.length === 0 ? 'run' : 'select', preview: null });
     },
     setTool: (tool) => set({ tool, preview: null }),
     setSnapping: (snapping) => set({ snapping }),

@@ -1,4 +1,5 @@
 /** Taps select; in the edit state, drags move what they began on: a corner, a run sideways, an opening along its run. */
+import { joinCorners, joinCornerToRun } from '../../model/drawing/edits/joinCorners';
 import { moveKeepClear, moveKeepClearPoint } from '../../model/drawing/edits/keepClears';
 import { moveCorner } from '../../model/drawing/edits/moveCorners';
 import { moveOpening } from '../../model/drawing/edits/openings';
@@ -11,7 +12,7 @@ import type { ThingRef } from '../../model/things';
 import { isDrag, type StrokeEvent } from '../input/events';
 import { EMPTY_PREVIEW } from '../store/preview';
 import { cornerById, neighboursOf, openingById, runLine } from './edits';
-import type { Tool, ToolHost } from './tool';
+import type { Caught, Tool, ToolHost } from './tool';
 
 type Grip =
   | { readonly kind: 'corner'; readonly id: string; readonly from: PlanPoint }
@@ -23,7 +24,13 @@ type Grip =
 type State =
   | { readonly name: 'idle' }
   | { readonly name: 'pointing'; readonly down: StrokeEvent; readonly thing: ThingRef | null }
-  | { readonly name: 'dragging'; readonly down: StrokeEvent; readonly grip: Grip; readonly asBegun: Drawing };
+  | {
+      readonly name: 'dragging';
+      readonly down: StrokeEvent;
+      readonly grip: Grip;
+      readonly asBegun: Drawing;
+      readonly caught: Caught | null;
+    };
 
 const LABELS: Readonly<Record<Grip['kind'], string>> = {
   corner: 'plan.did.moveCorner',
@@ -57,7 +64,7 @@ export function createSelectTool(host: ToolHost): Tool {
     return from ? { kind: 'point', id: thing.id, index, from } : { kind: 'keepClear', id: thing.id };
   }
 
-  function drag(grip: Grip, asBegun: Drawing, down: StrokeEvent, event: StrokeEvent): void {
+  function drag(grip: Grip, asBegun: Drawing, down: StrokeEvent, event: StrokeEvent): Caught | null {
     const delta = sub(event.plan, down.plan);
     const snapping = draft.get().snapping && !event.modifiers.alt;
     const reach = host.reach(event.pointer);
@@ -77,16 +84,17 @@ export function createSelectTool(host: ToolHost): Tool {
           : moveKeepClearPoint(d, grip.id, grip.index, caught.at),
       );
       draft.setPreview({ ...shown, at: caught.at, guides: caught.guides, caught: caught.word });
+      return caught;
     } else if (grip.kind === 'run') {
       const line = runLine(asBegun, grip.id);
-      if (!line) return;
+      if (!line) return null;
       const { at: by, word } = host.catchSlide({ runId: grip.id, raw: dot(delta, line.inward), reach, snapping });
       draft.update((d) => slideRun(d, grip.id, by));
       const at = { x: roundTicks(event.plan.x), y: roundTicks(event.plan.y) };
       draft.setPreview({ ...shown, at, caught: word, length: roundTicks(Math.abs(by)) });
     } else if (grip.kind === 'opening') {
       const line = runLine(asBegun, grip.runId);
-      if (!line) return;
+      if (!line) return null;
       const raw = grip.at + dot(delta, line.direction);
       const { runId, width, id: openingId } = grip;
       const caught = host.catchOpening({ runId, raw, width, reach, snapping, openingId });
@@ -97,6 +105,19 @@ export function createSelectTool(host: ToolHost): Tool {
       const by = { x: roundToStep(delta.x, asBegun.tapeStep), y: roundToStep(delta.y, asBegun.tapeStep) };
       draft.update((d) => moveKeepClear(d, grip.id, by));
       draft.setPreview(shown);
+    }
+    return null;
+  }
+
+  /** A corner let go of on another, or on a run, is joined to it: an outline closes, or a tee is made. */
+  function join(grip: Grip, caught: Caught | null): void {
+    if (grip.kind !== 'corner' || !caught) return;
+    const { cornerId, onRun } = caught;
+    if (cornerId !== null) {
+      draft.update((d) => joinCorners(d, grip.id, cornerId));
+      draft.select({ kind: 'corner', id: cornerId });
+    } else if (onRun) {
+      draft.update((d) => joinCornerToRun(d, grip.id, onRun.runId, onRun.at, host.newId));
     }
   }
 
@@ -130,12 +151,13 @@ export function createSelectTool(host: ToolHost): Tool {
           }
           draft.select(state.thing);
           draft.begin(LABELS[grip.kind]);
-          state = { name: 'dragging', down: state.down, grip, asBegun: draft.get().drawing };
+          state = { name: 'dragging', down: state.down, grip, asBegun: draft.get().drawing, caught: null };
         }
-        if (state.name === 'dragging') drag(state.grip, state.asBegun, state.down, event);
+        if (state.name === 'dragging') state = { ...state, caught: drag(state.grip, state.asBegun, state.down, event) };
         return 'keep';
       }
       if (state.name === 'dragging') {
+        join(state.grip, state.caught);
         draft.commit();
         draft.setPreview(null);
       } else if (state.name === 'pointing') {

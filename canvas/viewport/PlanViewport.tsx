@@ -1,12 +1,16 @@
 import { useEffect, useLayoutEffect, useMemo, useRef, useState, type ReactNode } from 'react';
 import { View, type LayoutChangeEvent, type ViewStyle } from 'react-native';
 import { Gesture, GestureDetector } from 'react-native-gesture-handler';
-import type { ViewSize } from './camera';
+import Animated from 'react-native-reanimated';
+import type { Camera, ViewSize } from './camera';
 import { createPaperHand, type PaperHandHost } from './paperHand';
+import { useGlide } from './useGlide';
 import { useLatest } from './useLatest';
 
 export interface PlanViewportProps extends PaperHandHost {
   readonly onSize: (size: ViewSize) => void;
+  /** Where a camera that moved by itself comes from; null where a hand moved it. */
+  readonly glideFrom?: Camera | null;
   /** Read aloud for the drawing as a whole. */
   readonly label: string;
   readonly children: ReactNode;
@@ -14,9 +18,10 @@ export interface PlanViewportProps extends PaperHandHost {
 
 /** The paper under the finger: one gesture detector around the whole picture, moved by a transform until a gesture ends. */
 export function PlanViewport(props: PlanViewportProps) {
-  const { camera, size, label, children, onSize } = props;
+  const { camera, size, label, children, onSize, glideFrom = null } = props;
   const area = useRef<View>(null);
   const wrapper = useRef<View>(null);
+  const glide = useGlide(camera, glideFrom);
   const latest = useLatest<PaperHandHost>(props);
   const [hand] = useState(() => createPaperHand(latest));
 
@@ -53,7 +58,7 @@ export function PlanViewport(props: PlanViewportProps) {
     <GestureDetector gesture={gesture} touchAction="none" userSelect="none">
       <View ref={area} onLayout={onLayout} role="img" aria-label={label} style={fill} collapsable={false}>
         <View ref={wrapper} style={layer} collapsable={false}>
-          {children}
+          <Animated.View style={[layer, glide]}>{children}</Animated.View>
         </View>
       </View>
     </GestureDetector>

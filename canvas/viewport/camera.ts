@@ -126,6 +126,39 @@ export function fitBox(box: Box, size: ViewSize, padding: Padding): Camera {
   return { x: (box.left + box.right) / 2 - offX / scale, y: (box.bottom + box.top) / 2 + offY / scale, scale };
 }
 
+/**
+ * The camera moved as little as it can be so that the places stand at least `margin` pixels inside the view; it steps back
+ * where they don't fit together. The same camera comes back where all of them are in sight, `edge` pixels inside.
+ */
+export function bringIntoView(
+  camera: Camera,
+  size: ViewSize,
+  places: readonly Vec[],
+  { edge, margin }: { readonly edge: number; readonly margin: number },
+): Camera {
+  const seen = places.map((at) => toScreen(camera, size, at));
+  const inside = ({ x, y }: ScreenPoint) => x >= edge && y >= edge && x <= size.width - edge && y <= size.height - edge;
+  if (seen.every(inside)) return camera;
+  const left = Math.min(...seen.map(({ x }) => x));
+  const right = Math.max(...seen.map(({ x }) => x));
+  const top = Math.min(...seen.map(({ y }) => y));
+  const bottom = Math.max(...seen.map(({ y }) => y));
+  const wide = Math.max(1, size.width - 2 * margin);
+  const high = Math.max(1, size.height - 2 * margin);
+  const factor = Math.min(1, wide / Math.max(1, right - left), high / Math.max(1, bottom - top));
+  if (factor < 1) {
+    const middleOf = toPlan(camera, size, { x: (left + right) / 2, y: (top + bottom) / 2 });
+    return { ...middleOf, scale: clampScale(camera.scale * factor) };
+  }
+  return panBy(camera, intoSpan(left, right, margin, size.width), intoSpan(top, bottom, margin, size.height));
+}
+
+/** How far to move what lies from `least` to `most` so that it stands `margin` inside a view. */
+function intoSpan(least: number, most: number, margin: number, view: number): number {
+  if (least < margin) return margin - least;
+  return most > view - margin ? view - margin - most : 0;
+}
+
 /** Keeps some of the box in sight: the middle of the view never leaves the box by more than half a view. */
 export function clampCamera(camera: Camera, box: Box, size: ViewSize): Camera {
   const halfWide = size.width / 2 / camera.scale;

@@ -34,6 +34,7 @@ export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
   const units = useDraft((state) => state.drawing.units);
   const step = useDraft((state) => state.drawing.tapeStep);
   const tool = useDraft((state) => state.tool);
+  const empty = useDraft((state) => state.drawing.runs.length === 0);
   const [keypad, setKeypad] = useState(false);
   const height = useEditHeight();
   const shown = keys && keypad && entry.drawing;
@@ -47,9 +48,13 @@ export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
       ) : tool === 'select' ? (
         <Ledger {...ledger} />
       ) : (
-        <Txt tone="soft" size="large" style={{ padding: space.l, height }}>
-          {t(`plan.toolTells.${tool}`)}
-        </Txt>
+        <View style={{ flexDirection: 'row', alignItems: 'flex-start', gap: space.m, padding: space.l, height }}>
+          <Txt tone="soft" size="large" style={{ flex: 1 }}>
+            {t(`plan.toolTells.${tool}`)}
+          </Txt>
+          {/* Before the first wall: what it is built of can be said here already. */}
+          {empty ? <Button label={t('plan.building')} onPress={ledger.onBuilding} /> : null}
+        </View>
       )}
       {shown ? (
         <TapeKeypad

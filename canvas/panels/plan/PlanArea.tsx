@@ -29,6 +29,7 @@ export function PlanArea({ camera, figure, onStroke }: PlanAreaProps) {
       <PlanViewport
         camera={shown ?? UNPLACED}
         size={camera.size}
+        glideFrom={camera.glideFrom}
         onSize={camera.onSize}
         onCamera={camera.setCamera}
         onStroke={onStroke}

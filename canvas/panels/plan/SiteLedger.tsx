@@ -16,11 +16,13 @@ export function SiteLedger({ onReasons, onBuilding }: LedgerProps) {
   const mayDraw = useDraft((state) => state.role === 'lead' || state.role === 'designer');
   if (drawing.runs.length === 0)
     return (
-      <View style={{ gap: space.xs }}>
-        <Txt size="title" weight="semibold">
-          {t('plan.empty.title')}
-        </Txt>
-        <Txt tone="soft">{mayDraw ? t('plan.empty.text') : t('plan.empty.viewText')}</Txt>
+      <View style={{ flexDirection: 'row', alignItems: 'center', gap: space.m }}>
+        <View style={{ flex: 1, minWidth: 0, gap: space.xs }}>
+          <Txt size="title" weight="semibold">
+            {t('plan.empty.title')}
+          </Txt>
+          <Txt tone="soft">{mayDraw ? t('plan.empty.text') : t('plan.empty.viewText')}</Txt>
+        </View>
         {editing ? <Button label={t('plan.building')} onPress={onBuilding} /> : null}
       </View>
     );

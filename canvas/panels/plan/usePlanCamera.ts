@@ -1,18 +1,33 @@
-import { useCallback, useRef, useState } from 'react';
+import { useCallback, useEffect, useRef, useState } from 'react';
 import { planFigure } from '../../../model/figures/plan';
 import { labelScale } from '../../figures/labelScale';
-import { clampCamera, zoomAbout, type Camera, type ViewSize } from '../../viewport/camera';
+import { bringIntoView, clampCamera, zoomAbout, type Camera, type ViewSize } from '../../viewport/camera';
 import { fitPlan, groundBox } from '../../viewport/fitPlan';
 import type { Solved } from '../../store/solver';
 import { useWorkspace } from '../workspace/workspace';
 
 const PADDING = { left: 20, top: 20, right: 20, bottom: 20 };
 const NO_SIZE: ViewSize = { width: 0, height: 0 };
+/** A corner nearer to the view's edge than this is out of sight; it is brought in by a quarter of the view. */
+const EDGE = 24;
+
+interface Held {
+  readonly camera: Camera | null;
+  readonly size: ViewSize;
+  readonly glideFrom: Camera | null;
+}
+
+/** The camera moved by itself. */
+function glidedTo(before: Held, camera: Camera): Held {
+  return camera === before.camera ? before : { ...before, camera, glideFrom: before.camera };
+}
 
 export interface PlanCamera {
   /** Null until the view has a size. */
   readonly camera: Camera | null;
   readonly size: ViewSize;
+  /** Where it was looked at from before the camera moved by itself: it glides from there. Null when a hand moved it. */
+  readonly glideFrom: Camera | null;
   readonly onSize: (size: ViewSize) => void;
   readonly setCamera: (camera: Camera) => void;
   readonly fit: () => void;
@@ -42,7 +57,7 @@ function heldTopLeft(camera: Camera, before: ViewSize, now: ViewSize): Camera {
 /** The camera over the plan: fitted when the view first has a size, and kept on what it shows as the view changes. */
 export function usePlanCamera(): PlanCamera {
   const { solver, draft } = useWorkspace();
-  const [state, setState] = useState<{ camera: Camera | null; size: ViewSize }>({ camera: null, size: NO_SIZE });
+  const [state, setState] = useState<Held>({ camera: null, size: NO_SIZE, glideFrom: null });
   /** True until the person has moved the paper: then a change of the view's size fits it anew. */
   const fitted = useRef(true);
 
@@ -55,11 +70,12 @@ export function usePlanCamera(): PlanCamera {
         if (before.camera && drawn && size.height < before.size.height) {
           // The keypad took the room: the corner that is being drawn from comes to the middle of what is left.
           fitted.current = false;
-          return { camera: { ...before.camera, x: drawn.from.x, y: drawn.from.y }, size };
+          return { camera: { ...before.camera, x: drawn.from.x, y: drawn.from.y }, size, glideFrom: null };
         }
-        if (solved && (before.camera === null || fitted.current)) return { camera: fitSolved(solved, size), size };
+        if (solved && (before.camera === null || fitted.current))
+          return { camera: fitSolved(solved, size), size, glideFrom: null };
         if (!before.camera) return { ...before, size };
-        return { camera: heldTopLeft(before.camera, before.size, size), size };
+        return { camera: heldTopLeft(before.camera, before.size, size), size, glideFrom: null };
       });
     },
     [solver, draft],
@@ -71,7 +87,8 @@ export function usePlanCamera(): PlanCamera {
       setState((before) => {
         const { solved } = solver.get();
         const box = solved && groundBox(solved.drawing, solved.setOut);
-        return { ...before, camera: box ? clampCamera(camera, box, before.size) : { ...camera } };
+        const kept = box ? clampCamera(camera, box, before.size) : { ...camera };
+        return { ...before, camera: kept, glideFrom: null };
       });
     },
     [solver],
@@ -81,7 +98,7 @@ export function usePlanCamera(): PlanCamera {
     fitted.current = true;
     setState((before) => {
       const { solved } = solver.get();
-      return solved && before.size.width > 0 ? { ...before, camera: fitSolved(solved, before.size) } : before;
+      return solved && before.size.width > 0 ? glidedTo(before, fitSolved(solved, before.size)) : before;
     });
   }, [solver]);
 
@@ -90,9 +107,31 @@ export function usePlanCamera(): PlanCamera {
     setState((before) => {
       const { camera, size } = before;
       const middle = { x: size.width / 2, y: size.height / 2 };
-      return camera ? { ...before, camera: zoomAbout(camera, size, middle, factor) } : before;
+      return camera ? glidedTo(before, zoomAbout(camera, size, middle, factor)) : before;
     });
   }, []);
+
+  // A typed length may end out of sight: where the run is drawn from, and to, come into view.
+  useEffect(
+    () =>
+      draft.api.subscribe(({ preview }, { preview: previous }) => {
+        const run = preview?.run;
+        if (!run) return;
+        const typed = run.heldLength !== null && run.heldLength !== previous?.run?.heldLength;
+        const goesOn = run.from !== previous?.run?.from;
+        if (!typed && !goesOn) return;
+        setState((before) => {
+          const { camera, size } = before;
+          if (!camera || size.width === 0) return before;
+          const margin = Math.min(size.width, size.height) / 4;
+          const places = typed ? [run.from, run.to] : [run.from];
+          const brought = bringIntoView(camera, size, places, { edge: EDGE, margin });
+          if (brought !== camera) fitted.current = false;
+          return glidedTo(before, brought);
+        });
+      }),
+    [draft],
+  );
 
   return { ...state, onSize, setCamera, fit, zoomBy };
 }

@@ -152,6 +152,15 @@ describe('the draft on the screen', () => {
     expect(o.get().survey).toBe(EMPTY_SURVEY);
   });
 
+  it('takes up the wall tool to draw where nothing stands yet, and the hand that moves where something does', () => {
+    const empty = store({ ...square, corners: [], runs: [] });
+    empty.setMode('edit');
+    expect(empty.get().tool).toBe('run');
+    const begun = store();
+    begun.setMode('edit');
+    expect(begun.get().tool).toBe('select');
+  });
+
   it('says of every field whether it is undone and where it is kept, and undoes only the drawing', () => {
     expect(Object.keys(FIELDS).sort()).toEqual(Object.keys(store().get()).sort());
     const undoable = Object.entries(FIELDS).filter(([, field]) => field.undoable);

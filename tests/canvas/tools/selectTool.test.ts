@@ -115,3 +115,40 @@ describe('moving by a drag', () => {
     expect(h.draft.get().preview).toBe(null);
   });
 });
+
+/*
+ *   D────────C
+ *            │    open: A and D are free ends
+ *   A────────B
+ */
+describe('letting go of a dragged corner', () => {
+  const open = building(
+    [
+      [0, 0],
+      [20, 0],
+      [20, 10],
+      [0, 10],
+    ],
+    false,
+  );
+
+  it('joins it to the corner it lands on, as one undo step', () => {
+    const h = hand(open).drag(0, 10, 0, 0);
+    expect(h.corners()).toEqual(['A 0,0', 'B 20,0', 'C 20,10']);
+    expect(h.draft.get().drawing.runs.map(({ from, to }) => `${from}${to}`)).toEqual(['AB', 'BC', 'CA']);
+    expect(h.draft.get().selection).toEqual({ kind: 'corner', id: 'A' });
+    expect(h.undoLabels()).toEqual(['plan.did.moveCorner']);
+    h.draft.undo();
+    expect(h.draft.get().drawing).toEqual(open);
+  });
+
+  it('makes a tee of the run it lands on', () => {
+    const h = hand(open).drag(0, 10, 8, 0);
+    const { corners, runs } = h.draft.get().drawing;
+    expect(corners).toHaveLength(4);
+    const met = corners.filter(({ id }) => runs.filter(({ from, to }) => from === id || to === id).length === 3);
+    expect(met).toHaveLength(1);
+    expect(met[0]?.y).toBe(0);
+    expect(Math.abs((met[0]?.x ?? 0) - feet(8))).toBeLessThan(feet(1));
+  });
+});
