@@ -12,6 +12,8 @@ import { isThere, runOf } from './there';
 export type Mode = 'view' | 'edit';
 export type ToolId = 'select' | 'run' | 'door' | 'window' | 'passage' | 'keepClear';
 
+export type AreaKind = 'keepClear' | 'boundary';
+
 export type DraftConflict =
   | { readonly part: 'drawing'; readonly conflict: Conflict<Drawing> }
   | { readonly part: 'survey'; readonly conflict: Conflict<Survey> };
@@ -25,6 +27,8 @@ export interface DraftState {
   readonly openPoleId: string | null;
   readonly mode: Mode;
   readonly tool: ToolId;
+  /** What the tool for areas draws. */
+  readonly area: AreaKind;
   readonly snapping: boolean;
   /** Whether the pen draws and fingers only move the paper; `unseen` until a pen has come near. */
   readonly pen: 'unseen' | 'draws' | 'asFinger';
@@ -49,6 +53,7 @@ export const FIELDS: Readonly<
   openPoleId: { undoable: false, kept: 'screen' },
   mode: { undoable: false, kept: 'screen' },
   tool: { undoable: false, kept: 'screen' },
+  area: { undoable: false, kept: 'screen' },
   snapping: { undoable: false, kept: 'screen' },
   pen: { undoable: false, kept: 'screen' },
   preview: { undoable: false, kept: 'screen' },
@@ -84,6 +89,7 @@ export interface DraftStore {
   openPole(poleId: string | null): void;
   setMode(mode: Mode): void;
   setTool(tool: ToolId): void;
+  setArea(area: AreaKind): void;
   setSnapping(on: boolean): void;
   setPen(pen: DraftState['pen']): void;
   setPreview(preview: Preview | null): void;
@@ -103,6 +109,7 @@ export function createDraftStore(start: DraftStart): DraftStore {
     openPoleId: null,
     mode: 'view',
     tool: 'select',
+    area: 'keepClear',
     snapping: true,
     pen: 'unseen',
     preview: null,
@@ -207,6 +214,7 @@ export function createDraftStore(start: DraftStart): DraftStore {
       set({ mode, tool: mode === 'edit' && get().drawing.runs.length === 0 ? 'run' : 'select', preview: null });
     },
     setTool: (tool) => set({ tool, preview: null }),
+    setArea: (area) => set({ area }),
     setSnapping: (snapping) => set({ snapping }),
     setPen: (pen) => set({ pen }),
     setPreview: (preview) => set({ preview }),

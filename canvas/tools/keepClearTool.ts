@@ -1,5 +1,5 @@
-/** Taps go round an area that must stay free; a tap on the first point closes it. */
-import { addKeepClear } from '../../model/drawing/edits/keepClears';
+/** Taps go round an area that must stay free, or the site's boundary; a tap on the first point closes it. */
+import { addKeepClear, setBoundary } from '../../model/drawing/edits/keepClears';
 import type { PlanPoint } from '../../model/geometry/point';
 import { distance } from '../../model/geometry/vec';
 import { isDrag, type StrokeEvent } from '../input/events';
@@ -32,13 +32,18 @@ export function createKeepClearTool(host: ToolHost): Tool {
   }
 
   function close(points: readonly PlanPoint[]): void {
-    const id = host.newId();
-    if (points.length >= 3) draft.edit('plan.did.keepClear', (d) => addKeepClear(d, { name: '', points }, () => id));
     drop();
-    if (points.length >= 3) {
+    if (points.length < 3) return;
+    if (draft.get().area === 'boundary') {
+      draft.edit('plan.did.boundary', (d) => setBoundary(d, points));
       draft.setTool('select');
-      draft.select({ kind: 'keepClear', id });
+      draft.select({ kind: 'boundary', id: 'boundary' });
+      return;
     }
+    const id = host.newId();
+    draft.edit('plan.did.keepClear', (d) => addKeepClear(d, { name: '', points }, () => id));
+    draft.setTool('select');
+    draft.select({ kind: 'keepClear', id });
   }
 
   function drop(): void {

@@ -1,6 +1,8 @@
 import type { ReactNode } from 'react';
 import { View } from 'react-native';
+import { Icon } from './Icon';
 import { IconButton } from './IconButton';
+import type { IconName } from './iconPaths';
 import { space } from './tokens';
 import { Txt } from './Txt';
 import { useTheme } from './theme';
@@ -9,6 +11,8 @@ import { useWords } from './words';
 export interface HeaderProps {
   readonly title: string;
   readonly subtitle?: string;
+  /** Before the second line, where it says that something is amiss. */
+  readonly subtitleIcon?: IconName;
   /** Buttons at the right; one filled at most. */
   readonly actions?: ReactNode;
   readonly onBack?: () => void;
@@ -17,12 +21,11 @@ export interface HeaderProps {
 }
 
 /** The top of every screen: what it is, a quiet second line, and its actions. */
-export function Header({ title, subtitle, actions, onBack, backLabel }: HeaderProps) {
+export function Header({ title, subtitle, subtitleIcon, actions, onBack, backLabel }: HeaderProps) {
   const { colours, strokes } = useTheme();
   const t = useWords();
   return (
     <View
-      role="banner"
       style={{
         flexDirection: 'row',
         alignItems: 'center',
@@ -42,9 +45,12 @@ export function Header({ title, subtitle, actions, onBack, backLabel }: HeaderPr
           {title}
         </Txt>
         {subtitle ? (
-          <Txt size="small" tone="soft" numberOfLines={1}>
-            {subtitle}
-          </Txt>
+          <View role="status" style={{ flexDirection: 'row', alignItems: 'center', gap: space.xs }}>
+            {subtitleIcon ? <Icon name={subtitleIcon} size={16} colour={colours.inkSoft} /> : null}
+            <Txt size="small" tone="soft" numberOfLines={1} style={{ flexShrink: 1 }}>
+              {subtitle}
+            </Txt>
+          </View>
         ) : null}
       </View>
       {actions ? <View style={{ flexDirection: 'row', alignItems: 'center', gap: space.s }}>{actions}</View> : null}

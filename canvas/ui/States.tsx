@@ -100,10 +100,13 @@ export function Banner(props: { icon: IconName; text: string; tone?: 'plain' | '
         borderColor: colours.rule,
       }}
     >
-      <Icon name={icon} size={20} colour={caution ? colours.caution : colours.ink} />
-      <Txt weight="medium" tone={caution ? 'caution' : 'ink'} style={{ flexShrink: 1, flexGrow: 1 }}>
-        {text}
-      </Txt>
+      {/* The icon stays beside its words; only what there is to do goes to a line of its own. */}
+      <View style={{ flexDirection: 'row', alignItems: 'center', gap: space.s, flexGrow: 1, flexBasis: 240 }}>
+        <Icon name={icon} size={20} colour={caution ? colours.caution : colours.ink} />
+        <Txt weight="medium" tone={caution ? 'caution' : 'ink'} style={{ flex: 1, minWidth: 0 }}>
+          {text}
+        </Txt>
+      </View>
       {action}
     </View>
   );

@@ -5,7 +5,6 @@ import { radius, space, touch } from './tokens';
 import { currentToast, dismissToast, watchToasts } from './toasts';
 import { Txt } from './Txt';
 import { useTheme } from './theme';
-import { useLayout } from './useLayout';
 
 export { toast } from './toasts';
 
@@ -15,7 +14,6 @@ const SHOWN_FOR_MS = 6000;
 export function ToastHost() {
   const message = useSyncExternalStore(watchToasts, currentToast, () => null);
   const { colours } = useTheme();
-  const phone = useLayout().name === 'phone';
   const id = message?.id;
   useEffect(() => {
     if (id === undefined) return;
@@ -30,7 +28,8 @@ export function ToastHost() {
         position: 'absolute',
         left: space.l,
         right: space.l,
-        bottom: phone ? 88 : space.xl,
+        // Under the header: what there is to press on a field screen lies at the foot.
+        top: 76,
         alignItems: 'center',
       }}
     >

@@ -14,7 +14,7 @@ function tell() {
   for (const listener of listeners) listener();
 }
 
-/** Says something in passing at the foot of the window, for a few seconds. */
+/** Says something in passing under the window's header, for a few seconds. */
 export function toast(text: string, options: Partial<Pick<ToastMessage, 'tone' | 'action'>> = {}): void {
   current = { id: nextId++, text, tone: options.tone ?? 'plain', action: options.action };
   tell();

@@ -5,6 +5,7 @@ import { finish, redo, undo } from '../../actions/historyActions';
 import { duplicate, flipHinge, openOtherWay, remove, turnRun } from '../../actions/thingActions';
 import { fit, penDraws, snapping } from '../../actions/viewActions';
 import { Button } from '../../ui/Button';
+import { Choice } from '../../ui/Choice';
 import { IconButton } from '../../ui/IconButton';
 import { Measurement } from '../../ui/Measurement';
 import { space } from '../../ui/tokens';
@@ -35,6 +36,7 @@ export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
   const step = useDraft((state) => state.drawing.tapeStep);
   const tool = useDraft((state) => state.tool);
   const empty = useDraft((state) => state.drawing.runs.length === 0);
+  const area = useDraft((state) => state.area);
   const [keypad, setKeypad] = useState(false);
   const height = useEditHeight();
   const shown = keys && keypad && entry.drawing;
@@ -49,9 +51,23 @@ export function DrawPanel({ context, entry, keys, ...ledger }: DrawPanelProps) {
         <Ledger {...ledger} />
       ) : (
         <View style={{ flexDirection: 'row', alignItems: 'flex-start', gap: space.m, padding: space.l, height }}>
-          <Txt tone="soft" size="large" style={{ flex: 1 }}>
-            {t(`plan.toolTells.${tool}`)}
-          </Txt>
+          <View style={{ flex: 1, gap: space.s }}>
+            <Txt tone="soft" size={tool === 'keepClear' ? 'body' : 'large'}>
+              {t(`plan.toolTells.${tool === 'keepClear' ? area : tool}`)}
+            </Txt>
+            {tool === 'keepClear' ? (
+              <Choice
+                label={t('plan.area')}
+                hideLabel
+                options={[
+                  { value: 'keepClear', label: t('plan.areas.keepClear') },
+                  { value: 'boundary', label: t('plan.areas.boundary') },
+                ]}
+                value={area}
+                onChange={(next) => context.draft.setArea(next)}
+              />
+            ) : null}
+          </View>
           {/* Before the first wall: what it is built of can be said here already. */}
           {empty ? <Button label={t('plan.building')} onPress={ledger.onBuilding} /> : null}
         </View>

@@ -7,7 +7,7 @@ import { useDraft } from '../workspace/workspace';
 import { OpeningLedger } from './OpeningLedger';
 import { PoleLedger } from './PoleLedger';
 import { RunLedger } from './RunLedger';
-import { KeepClearLedger, SiteLedger } from './SiteLedger';
+import { BoundaryLedger, KeepClearLedger, SiteLedger } from './SiteLedger';
 import { ThingReasons } from './ThingReasons';
 
 const PHONE_HEIGHT = 196;
@@ -63,6 +63,8 @@ function Inside({ selection, ...props }: LedgerProps & { selection: ThingRef | n
       return <OpeningLedger openingId={selection.id} {...props} />;
     case 'keepClear':
       return <KeepClearLedger id={selection.id} {...props} />;
+    case 'boundary':
+      return <BoundaryLedger />;
     default:
       return <SiteLedger {...props} />;
   }

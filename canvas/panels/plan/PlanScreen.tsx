@@ -8,7 +8,7 @@ import { useOnline } from '../../client/online';
 import { Button } from '../../ui/Button';
 import { Dialog } from '../../ui/Dialog';
 import { Header } from '../../ui/Header';
-import { Banner, Offline } from '../../ui/States';
+import { Banner } from '../../ui/States';
 import { useTheme } from '../../ui/theme';
 import { useLayout } from '../../ui/useLayout';
 import { useWords } from '../../ui/words';
@@ -24,6 +24,7 @@ import { DrawPanel } from './DrawPanel';
 import { Ledger } from './Ledger';
 import { PlanArea } from './PlanArea';
 import { ReasonsPanel } from './ReasonsPanel';
+import { RevisionButtons } from './RevisionButtons';
 import { SideColumn, type SideTab } from './SideColumn';
 import { usePlanCamera } from './usePlanCamera';
 import { usePlanFigure } from './usePlanFigure';
@@ -81,6 +82,7 @@ export function PlanScreen(_props: { siteId?: string }) {
           ) : (
             <>
               <ActionButton action={fit} context={hand.context} />
+              <RevisionButtons />
               {mayDraw ? <Button label={t('plan.draw')} kind="filled" onPress={() => actions.setMode('edit')} /> : null}
             </>
           )
@@ -115,29 +117,32 @@ export function PlanScreen(_props: { siteId?: string }) {
 function PlanHeader({ editing, actions }: { editing: boolean; actions: React.ReactNode }) {
   const t = useWords();
   const { siteName } = useWorkspace();
-  const line = useDraftLine();
+  const status = useSaveStatus();
+  const draftLine = useDraftLine();
+  const noSignal = !useOnline() || status === 'offline';
+  // In the header's own line: a strip of its own would move the plan.
+  const line = noSignal ? t('plan.noSignal') : draftLine;
+  const icon = noSignal ? 'offline' : undefined;
   const tool = useDraft((state) => state.tool);
   const drawing = useDraft((state) => state.preview?.run != null);
   const letter = useDraft((state) => {
     const from = state.preview?.run?.from;
     return from ? (state.drawing.corners.find((one) => one.x === from.x && one.y === from.y)?.letter ?? null) : null;
   });
-  if (!editing) return <Header title={siteName} subtitle={line} actions={actions} />;
+  if (!editing) return <Header title={siteName} subtitle={line} subtitleIcon={icon} actions={actions} />;
   const title =
     tool === 'run' && letter !== null ? t('plan.toolTitle.runFrom', { letter }) : t(`plan.toolTitle.${tool}`);
   const tells = tool === 'run' && drawing ? t('plan.toolTells.runNext') : line;
-  return <Header title={title} subtitle={tells} actions={actions} />;
+  return <Header title={title} subtitle={tells} subtitleIcon={tells === line ? icon : undefined} actions={actions} />;
 }
 
 /** What keeps the draft from being saved, where something does. */
 function SaveBanners() {
   const t = useWords();
-  const online = useOnline();
   const status = useSaveStatus();
   const failed = useSolveFailed();
   return (
     <>
-      {status === 'offline' || !online ? <Offline /> : null}
       {status === 'refused' ? <Banner icon="warning" tone="caution" text={t('plan.refused')} /> : null}
       {failed ? <Banner icon="warning" tone="caution" text={t('plan.solveFailed')} /> : null}
     </>

@@ -5,6 +5,7 @@ import { space } from '../../ui/tokens';
 import { Txt } from '../../ui/Txt';
 import { useWords } from '../../ui/words';
 import { useDraft, useSolved } from '../workspace/workspace';
+import { CompareDraft } from './RevisionButtons';
 import { BigLength } from './BigLength';
 import type { LedgerProps } from './Ledger';
 
@@ -43,7 +44,9 @@ export function SiteLedger({ onReasons, onBuilding }: LedgerProps) {
         length={setOut.walls.perimeter}
         after={<Button label={t('plan.building')} onPress={onBuilding} />}
       />
-      <ReasonsButton onPress={onReasons} />
+      {/* While drawing there is room for what is wrong, not for saying that nothing is. */}
+      {editing && setOut.reasons.length === 0 ? null : <ReasonsButton onPress={onReasons} />}
+      {editing ? null : <CompareDraft />}
     </>
   );
 }
@@ -65,6 +68,15 @@ export function ReasonsButton({ onPress }: { onPress: () => void }) {
       onPress={onPress}
       style={{ justifyContent: 'flex-start', paddingHorizontal: 0 }}
     />
+  );
+}
+
+export function BoundaryLedger() {
+  const t = useWords();
+  return (
+    <Txt size="title" weight="semibold" style={{ minHeight: 48 }}>
+      {t('plan.ledger.boundary')}
+    </Txt>
   );
 }
 

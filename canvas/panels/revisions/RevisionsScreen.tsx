@@ -1,3 +1,4 @@
+import { useRouter } from 'expo-router';
 import { useState } from 'react';
 import { View } from 'react-native';
 import { may } from '../../../model/contracts/common';
@@ -25,7 +26,7 @@ import { SetAsideList } from './SetAsideList';
 type Open = { readonly kind: 'save' } | { readonly kind: 'restore'; readonly revision: RevisionSummary };
 
 /** The site's revisions: saving the draft as one, seeing, comparing and restoring them, and what was set aside. */
-export function RevisionsScreen({ siteId }: { siteId: string }) {
+export function RevisionsScreen({ siteId, save: asked = false }: { siteId: string; save?: boolean }) {
   const t = useWords();
   const revisions = useRevisions(siteId);
   const draft = useFetchedDraft(siteId).data;
@@ -33,7 +34,13 @@ export function RevisionsScreen({ siteId }: { siteId: string }) {
   const online = useOnline();
   const { colours } = useTheme();
   const [open, setOpen] = useState<Open | null>(null);
-  const close = () => setOpen(null);
+  const router = useRouter();
+  // Come here to save: the address says so until it is done or given up.
+  const saving = asked || open?.kind === 'save';
+  const close = () => {
+    setOpen(null);
+    if (asked) router.setParams({ save: undefined });
+  };
   const saves = site !== undefined && may(site.role, 'saveRevision');
   const list = revisions.data ?? [];
   const next = (list[0]?.number ?? 0) + 1;
@@ -93,7 +100,7 @@ export function RevisionsScreen({ siteId }: { siteId: string }) {
       ) : (
         <Loading />
       )}
-      {open?.kind === 'save' ? <SaveRevisionDialog siteId={siteId} number={next} onClose={close} /> : null}
+      {saving && saves && revisions.data ? <SaveRevisionDialog siteId={siteId} number={next} onClose={close} /> : null}
       {open?.kind === 'restore' ? (
         <RestoreDialog siteId={siteId} number={open.revision.number} onClose={close} />
       ) : null}

@@ -25,6 +25,12 @@ export const plan = {
   },
   refused: 'The server did not accept the last change. It is kept on this device; undo it, or ask the site’s lead.',
 
+  noSignal: 'No signal: kept on this device',
+  saveRevision: 'Save revision {{number}}',
+  compareDraft: 'Compare with revision {{number}}',
+  area: 'What to draw',
+  areas: { keepClear: 'Keep clear', boundary: 'Boundary' },
+
   draw: 'Draw',
   done: 'Done',
   marks: 'Marks',
@@ -59,6 +65,7 @@ export const plan = {
     sill: 'Sill',
     head: 'Head',
     keepClear: 'Keep-clear',
+    boundary: 'Site boundary',
     site: 'Outside, all round',
     runs_one: '{{count}} wall run',
     runs_other: '{{count}} wall runs',
@@ -101,6 +108,7 @@ export const plan = {
     window: 'Tap the run that the window stands in',
     passage: 'Tap the run that the passage goes through',
     keepClear: 'Tap round the area; tap its first point to close it',
+    boundary: 'Tap round the site; tap its first point to close it',
   },
   toolTitle: {
     select: 'Drawing',
@@ -137,6 +145,7 @@ export const plan = {
     drawRun: 'wall run',
     placeOpening: 'opening',
     keepClear: 'keep-clear',
+    boundary: 'site boundary',
     moveCorner: 'corner moved',
     slideRun: 'run moved',
     slideOpening: 'opening moved',

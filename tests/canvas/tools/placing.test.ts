@@ -92,3 +92,18 @@ describe('drawing a keep-clear', () => {
     expect(h.draft.get().preview?.outline).toHaveLength(2);
   });
 });
+
+describe('drawing the site boundary', () => {
+  it('sets it by the same taps as a keep-clear, as one undo step, and adds no area', () => {
+    const h = hand(square);
+    h.draft.setSnapping(false);
+    h.draft.setArea('boundary');
+    h.tool('keepClear').tap(-5, -5).tap(30, -5).tap(30, 20).tap(-5, 20).tap(-5, -5);
+    expect(h.draft.get().drawing.boundary).toHaveLength(4);
+    expect(h.draft.get().drawing.keepClears).toEqual(square.keepClears);
+    expect(h.draft.get().selection).toEqual({ kind: 'boundary', id: 'boundary' });
+    expect(h.undoLabels()).toEqual(['plan.did.boundary']);
+    h.draft.undo();
+    expect(h.draft.get().drawing.boundary).toBe(null);
+  });
+});
