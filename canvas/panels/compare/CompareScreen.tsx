@@ -148,6 +148,8 @@ function Comparing({ before, after, names }: ComparingProps) {
     <View style={{ flex: 1, minHeight: 0, flexDirection: phone ? 'column' : 'row' }}>
       {figures}
       <ScrollView
+        // Words only: without this the keyboard could not scroll it.
+        tabIndex={0}
         style={{
           flex: phone ? 4 : undefined,
           width: phone ? undefined : 380,

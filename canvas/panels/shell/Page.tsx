@@ -9,6 +9,8 @@ export function Page({ children }: { children: ReactNode }) {
   const wide = useLayout().name !== 'phone';
   return (
     <ScrollView
+      // Some pages hold words only: without this the keyboard could not scroll them.
+      tabIndex={0}
       style={{ flex: 1 }}
       contentContainerStyle={{
         alignItems: 'center',

@@ -40,51 +40,50 @@ export function SitesScreen() {
 
   return (
     <Paper>
-      <PageTitle title={t('sites.title')} />
-      <Header
-        title={t('sites.title')}
-        subtitle={sites.data && sites.data.length > 0 ? t('sites.count', { count: sites.data.length }) : undefined}
-        actions={
-          <>
-            <IconButton icon="person" label={t('auth.account.open')} onPress={() => setOpen('account')} />
-            {sites.data && sites.data.length > 0 ? add('filled') : null}
-          </>
-        }
-      />
-      {online ? null : <Offline />}
-      {sites.data ? (
-        sites.data.length === 0 ? (
-          <Empty icon="plan" title={t('sites.empty')} text={t('sites.emptyText')} action={add('filled')} />
+      <View role="main" style={{ flex: 1, minHeight: 0 }}>
+        <PageTitle title={t('sites.title')} />
+        <Header
+          title={t('sites.title')}
+          subtitle={sites.data && sites.data.length > 0 ? t('sites.count', { count: sites.data.length }) : undefined}
+          actions={
+            <>
+              <IconButton icon="person" label={t('auth.account.open')} onPress={() => setOpen('account')} />
+              {sites.data && sites.data.length > 0 ? add('filled') : null}
+            </>
+          }
+        />
+        {online ? null : <Offline />}
+        {sites.data ? (
+          sites.data.length === 0 ? (
+            <Empty icon="plan" title={t('sites.empty')} text={t('sites.emptyText')} action={add('filled')} />
+          ) : (
+            <ScrollView contentContainerStyle={{ alignItems: 'center', paddingVertical: wide ? space.xl : 0 }}>
+              <View
+                role="list"
+                aria-label={t('sites.listLabel')}
+                style={{
+                  width: '100%',
+                  maxWidth: 920,
+                  borderColor: colours.rule,
+                  borderTopWidth: wide ? strokes.hair : 0,
+                  borderLeftWidth: wide ? strokes.hair : 0,
+                  borderRightWidth: wide ? strokes.hair : 0,
+                }}
+              >
+                {sites.data.map((site) => (
+                  <View role="listitem" key={site.id}>
+                    <SiteRow site={site} />
+                  </View>
+                ))}
+              </View>
+            </ScrollView>
+          )
+        ) : sites.isError ? (
+          <Failed text={errorWords(t, sites.error)} onRetry={() => void sites.refetch()} />
         ) : (
-          <ScrollView
-            role="main"
-            contentContainerStyle={{ alignItems: 'center', paddingVertical: wide ? space.xl : 0 }}
-          >
-            <View
-              role="list"
-              aria-label={t('sites.listLabel')}
-              style={{
-                width: '100%',
-                maxWidth: 920,
-                borderColor: colours.rule,
-                borderTopWidth: wide ? strokes.hair : 0,
-                borderLeftWidth: wide ? strokes.hair : 0,
-                borderRightWidth: wide ? strokes.hair : 0,
-              }}
-            >
-              {sites.data.map((site) => (
-                <View role="listitem" key={site.id}>
-                  <SiteRow site={site} />
-                </View>
-              ))}
-            </View>
-          </ScrollView>
-        )
-      ) : sites.isError ? (
-        <Failed text={errorWords(t, sites.error)} onRetry={() => void sites.refetch()} />
-      ) : (
-        <Loading />
-      )}
+          <Loading />
+        )}
+      </View>
       {open === 'new' ? <NewSiteDialog onClose={() => setOpen('none')} /> : null}
       {open === 'account' ? <AccountDialog open onClose={() => setOpen('none')} /> : null}
     </Paper>
