@@ -24,7 +24,7 @@ export const revisions = {
     title: 'Save revision {{number}}',
     text: 'The drawing and the levels are kept as they are now. A revision can’t be changed afterwards.',
     note: 'What changed, in a line for the crew',
-    notePlaceholder: 'Door moved toward B',
+    notePlaceholder: 'For example: door moved toward B',
     confirm: 'Save revision {{number}}',
     saving: 'Saving',
     saved: 'Revision {{number}} is saved.',
