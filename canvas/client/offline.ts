@@ -27,8 +27,11 @@ export async function recallOffline(client: QueryClient, userId: string): Promis
   if (!place) return;
   try {
     const kept = await get<Kept>(KEPT_AS, place);
-    if (kept?.shape === SHAPE && kept.userId === userId) hydrate(client, kept.state);
-    else if (kept) await clear(place);
+    if (kept?.shape === SHAPE && kept.userId === userId) {
+      hydrate(client, kept.state);
+      // What was written down may lag behind what was seen, so it is shown at once and asked for again.
+      await client.invalidateQueries({ queryKey: ['sites'], refetchType: 'none' });
+    } else if (kept) await clear(place);
   } catch {
     // A browser may refuse storage, in a private window for one: then there is nothing to recall.
   }
