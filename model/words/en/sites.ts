@@ -50,7 +50,7 @@ export const sites = {
     title: 'More',
     site: 'This site',
     sheets: 'Sheets to print',
-    sheetsTells: 'Plan, elevations, a card and a full-size strip for every pole, takeoff',
+    sheetsTells: 'Plan, every wall from outside, a card for each pole',
     draftSheets: 'The draft',
     draftSheetsTells: 'Marked as a draft: not for the wall',
     revisionSheets: 'Revision {{number}}',
