@@ -37,7 +37,7 @@ async function main() {
   const end = async (status) => {
     if (ended) return;
     ended = true;
-    stopPrograms();
+    await stopPrograms();
     for (const each of undo.reverse()) await each().catch(sayFailure);
     process.exit(status);
   };

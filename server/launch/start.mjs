@@ -101,7 +101,7 @@ async function main() {
   const stop = async (status) => {
     if (stopping) return;
     stopping = true;
-    stopPrograms();
+    await stopPrograms();
     for (const each of undo.reverse()) await each().catch(sayFailure);
     process.exit(status);
   };

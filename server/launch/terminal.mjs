@@ -31,12 +31,26 @@ export async function step(name, work) {
 /** @type {Set<import('node:child_process').ChildProcess>} */
 const programs = new Set();
 
-/** Ends the programs still running, when the command itself is stopped. */
-export function stopPrograms() {
-  for (const child of programs) {
-    // Its whole group: npx leaves its child behind otherwise.
-    if (child.pid) process.kill(-child.pid, 'SIGTERM');
-  }
+const PATIENCE_MS = 2000;
+
+/** Ends the programs still running, when the command itself is stopped: asked first, then forced. */
+export async function stopPrograms() {
+  // Its whole group: npx leaves its child behind otherwise.
+  const signal = (/** @type {NodeJS.Signals} */ name) => {
+    for (const child of programs) {
+      try {
+        if (child.pid) process.kill(-child.pid, name);
+      } catch {
+        // It ended by itself meanwhile.
+      }
+    }
+  };
+  if (programs.size === 0) return;
+  signal('SIGTERM');
+  const patience = Date.now() + PATIENCE_MS;
+  while (programs.size > 0 && Date.now() < patience) await new Promise((resolve) => setTimeout(resolve, 50));
+  // Expo's export goes on after SIGTERM; what it writes is not used until it is whole.
+  signal('SIGKILL');
 }
 
 /**
